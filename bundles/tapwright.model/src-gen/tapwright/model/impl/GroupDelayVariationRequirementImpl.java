@@ -1,0 +1,278 @@
+/**
+ * SPDX-License-Identifier: EPL-2.0
+ * Generated from model/tapwright.ecore: change the model, then run releng/generate-model.
+ */
+package tapwright.model.impl;
+
+import org.eclipse.emf.common.notify.Notification;
+
+import org.eclipse.emf.ecore.EClass;
+
+import org.eclipse.emf.ecore.impl.ENotificationImpl;
+
+import tapwright.model.GroupDelayVariationRequirement;
+import tapwright.model.ModelPackage;
+
+/**
+ * <!-- begin-user-doc -->
+ * An implementation of the model object '<em><b>Group Delay Variation Requirement</b></em>'.
+ * <!-- end-user-doc -->
+ * <p>
+ * The following features are implemented:
+ * </p>
+ * <ul>
+ *   <li>{@link tapwright.model.impl.GroupDelayVariationRequirementImpl#getFrom <em>From</em>}</li>
+ *   <li>{@link tapwright.model.impl.GroupDelayVariationRequirementImpl#getTo <em>To</em>}</li>
+ *   <li>{@link tapwright.model.impl.GroupDelayVariationRequirementImpl#getMax <em>Max</em>}</li>
+ * </ul>
+ *
+ * @generated
+ */
+public class GroupDelayVariationRequirementImpl extends RequirementImpl implements GroupDelayVariationRequirement {
+	/**
+	 * The default value of the '{@link #getFrom() <em>From</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getFrom()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final String FROM_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getFrom() <em>From</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getFrom()
+	 * @generated
+	 * @ordered
+	 */
+	protected String from = FROM_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getTo() <em>To</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getTo()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final String TO_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getTo() <em>To</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getTo()
+	 * @generated
+	 * @ordered
+	 */
+	protected String to = TO_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getMax() <em>Max</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getMax()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final String MAX_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getMax() <em>Max</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getMax()
+	 * @generated
+	 * @ordered
+	 */
+	protected String max = MAX_EDEFAULT;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected GroupDelayVariationRequirementImpl() {
+		super();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	protected EClass eStaticClass() {
+		return ModelPackage.Literals.GROUP_DELAY_VARIATION_REQUIREMENT;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String getFrom() {
+		return from;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setFrom(String newFrom) {
+		String oldFrom = from;
+		from = newFrom;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__FROM, oldFrom, from));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String getTo() {
+		return to;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setTo(String newTo) {
+		String oldTo = to;
+		to = newTo;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__TO, oldTo, to));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String getMax() {
+		return max;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setMax(String newMax) {
+		String oldMax = max;
+		max = newMax;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__MAX, oldMax, max));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Object eGet(int featureID, boolean resolve, boolean coreType) {
+		switch (featureID) {
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__FROM:
+				return getFrom();
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__TO:
+				return getTo();
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__MAX:
+				return getMax();
+		}
+		return super.eGet(featureID, resolve, coreType);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void eSet(int featureID, Object newValue) {
+		switch (featureID) {
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__FROM:
+				setFrom((String)newValue);
+				return;
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__TO:
+				setTo((String)newValue);
+				return;
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__MAX:
+				setMax((String)newValue);
+				return;
+		}
+		super.eSet(featureID, newValue);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void eUnset(int featureID) {
+		switch (featureID) {
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__FROM:
+				setFrom(FROM_EDEFAULT);
+				return;
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__TO:
+				setTo(TO_EDEFAULT);
+				return;
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__MAX:
+				setMax(MAX_EDEFAULT);
+				return;
+		}
+		super.eUnset(featureID);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public boolean eIsSet(int featureID) {
+		switch (featureID) {
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__FROM:
+				return FROM_EDEFAULT == null ? from != null : !FROM_EDEFAULT.equals(from);
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__TO:
+				return TO_EDEFAULT == null ? to != null : !TO_EDEFAULT.equals(to);
+			case ModelPackage.GROUP_DELAY_VARIATION_REQUIREMENT__MAX:
+				return MAX_EDEFAULT == null ? max != null : !MAX_EDEFAULT.equals(max);
+		}
+		return super.eIsSet(featureID);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String toString() {
+		if (eIsProxy()) return super.toString();
+
+		StringBuilder result = new StringBuilder(super.toString());
+		result.append(" (from: ");
+		result.append(from);
+		result.append(", to: ");
+		result.append(to);
+		result.append(", max: ");
+		result.append(max);
+		result.append(')');
+		return result.toString();
+	}
+
+} //GroupDelayVariationRequirementImpl

@@ -1,0 +1,222 @@
+/**
+ * SPDX-License-Identifier: EPL-2.0
+ * Generated from model/tapwright.ecore: change the model, then run releng/generate-model.
+ */
+package tapwright.model.impl;
+
+import org.eclipse.emf.common.notify.Notification;
+
+import org.eclipse.emf.ecore.EClass;
+
+import org.eclipse.emf.ecore.impl.ENotificationImpl;
+
+import tapwright.model.ImpulseTailRequirement;
+import tapwright.model.ModelPackage;
+
+/**
+ * <!-- begin-user-doc -->
+ * An implementation of the model object '<em><b>Impulse Tail Requirement</b></em>'.
+ * <!-- end-user-doc -->
+ * <p>
+ * The following features are implemented:
+ * </p>
+ * <ul>
+ *   <li>{@link tapwright.model.impl.ImpulseTailRequirementImpl#getAfter <em>After</em>}</li>
+ *   <li>{@link tapwright.model.impl.ImpulseTailRequirementImpl#getMax <em>Max</em>}</li>
+ * </ul>
+ *
+ * @generated
+ */
+public class ImpulseTailRequirementImpl extends RequirementImpl implements ImpulseTailRequirement {
+	/**
+	 * The default value of the '{@link #getAfter() <em>After</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getAfter()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final String AFTER_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getAfter() <em>After</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getAfter()
+	 * @generated
+	 * @ordered
+	 */
+	protected String after = AFTER_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getMax() <em>Max</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getMax()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final String MAX_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getMax() <em>Max</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getMax()
+	 * @generated
+	 * @ordered
+	 */
+	protected String max = MAX_EDEFAULT;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected ImpulseTailRequirementImpl() {
+		super();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	protected EClass eStaticClass() {
+		return ModelPackage.Literals.IMPULSE_TAIL_REQUIREMENT;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String getAfter() {
+		return after;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setAfter(String newAfter) {
+		String oldAfter = after;
+		after = newAfter;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.IMPULSE_TAIL_REQUIREMENT__AFTER, oldAfter, after));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String getMax() {
+		return max;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setMax(String newMax) {
+		String oldMax = max;
+		max = newMax;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.IMPULSE_TAIL_REQUIREMENT__MAX, oldMax, max));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Object eGet(int featureID, boolean resolve, boolean coreType) {
+		switch (featureID) {
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__AFTER:
+				return getAfter();
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__MAX:
+				return getMax();
+		}
+		return super.eGet(featureID, resolve, coreType);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void eSet(int featureID, Object newValue) {
+		switch (featureID) {
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__AFTER:
+				setAfter((String)newValue);
+				return;
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__MAX:
+				setMax((String)newValue);
+				return;
+		}
+		super.eSet(featureID, newValue);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void eUnset(int featureID) {
+		switch (featureID) {
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__AFTER:
+				setAfter(AFTER_EDEFAULT);
+				return;
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__MAX:
+				setMax(MAX_EDEFAULT);
+				return;
+		}
+		super.eUnset(featureID);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public boolean eIsSet(int featureID) {
+		switch (featureID) {
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__AFTER:
+				return AFTER_EDEFAULT == null ? after != null : !AFTER_EDEFAULT.equals(after);
+			case ModelPackage.IMPULSE_TAIL_REQUIREMENT__MAX:
+				return MAX_EDEFAULT == null ? max != null : !MAX_EDEFAULT.equals(max);
+		}
+		return super.eIsSet(featureID);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String toString() {
+		if (eIsProxy()) return super.toString();
+
+		StringBuilder result = new StringBuilder(super.toString());
+		result.append(" (after: ");
+		result.append(after);
+		result.append(", max: ");
+		result.append(max);
+		result.append(')');
+		return result.toString();
+	}
+
+} //ImpulseTailRequirementImpl
