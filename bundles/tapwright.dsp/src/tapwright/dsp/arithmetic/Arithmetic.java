@@ -7,6 +7,8 @@ import java.util.List;
 import java.util.Objects;
 import java.util.Optional;
 
+import org.apache.commons.math3.fraction.BigFraction;
+
 import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.exact.Symmetry;
 
@@ -111,6 +113,27 @@ public record Arithmetic(Structure structure, Optional<NumberFormat> coefficient
 			throw new IllegalArgumentException("the half-band structure needs an odd number of even-symmetric coefficients"
 					+ " with zeros at every even distance from the middle");
 		}
+	}
+
+	/**
+	 * The coefficients as the integers that are stored: in steps of their format, or in lowest terms when none is stated.
+	 *
+	 * @throws IllegalArgumentException
+	 *             when the structure cannot run the coefficients or they are no numbers of the format
+	 */
+	public ExactTaps stored(ExactTaps taps) {
+		check(taps);
+		BigInteger common = BigInteger.ZERO;
+		for (int k = 0; k < taps.length(); k++) {
+			common = common.gcd(taps.integer(k));
+		}
+		BigFraction step = coefficient.isPresent() ? coefficient.get().step()
+				: taps.unit().multiply(common.max(BigInteger.ONE));
+		List<BigInteger> integers = new ArrayList<>(taps.length());
+		for (int k = 0; k < taps.length(); k++) {
+			integers.add(taps.tap(k).divide(step).getNumerator());
+		}
+		return ExactTaps.ofIntegers(integers, step);
 	}
 
 	/**
