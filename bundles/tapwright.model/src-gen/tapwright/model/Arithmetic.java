@@ -20,6 +20,7 @@ import org.eclipse.emf.ecore.EObject;
  * </p>
  * <ul>
  *   <li>{@link tapwright.model.Arithmetic#getStructure <em>Structure</em>}</li>
+ *   <li>{@link tapwright.model.Arithmetic#getFactor <em>Factor</em>}</li>
  *   <li>{@link tapwright.model.Arithmetic#getCoefficient <em>Coefficient</em>}</li>
  *   <li>{@link tapwright.model.Arithmetic#getInput <em>Input</em>}</li>
  *   <li>{@link tapwright.model.Arithmetic#getProduct <em>Product</em>}</li>
@@ -61,6 +62,32 @@ public interface Arithmetic extends EObject {
 	 * @generated
 	 */
 	void setStructure(Structure value);
+
+	/**
+	 * Returns the value of the '<em><b>Factor</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Rate factor of polyphase and half-band structures; 1 when empty.
+	 * <!-- end-model-doc -->
+	 * @return the value of the '<em>Factor</em>' attribute.
+	 * @see #setFactor(String)
+	 * @see tapwright.model.ModelPackage#getArithmetic_Factor()
+	 * @model dataType="tapwright.model.Quantity"
+	 *        annotation="urn:tapwright:meta unit='1'"
+	 * @generated
+	 */
+	String getFactor();
+
+	/**
+	 * Sets the value of the '{@link tapwright.model.Arithmetic#getFactor <em>Factor</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @param value the new value of the '<em>Factor</em>' attribute.
+	 * @see #getFactor()
+	 * @generated
+	 */
+	void setFactor(String value);
 
 	/**
 	 * Returns the value of the '<em><b>Coefficient</b></em>' containment reference.

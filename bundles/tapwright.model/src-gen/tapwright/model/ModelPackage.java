@@ -2681,13 +2681,22 @@ public interface ModelPackage extends EPackage {
 	int ARITHMETIC__STRUCTURE = 0;
 
 	/**
+	 * The feature id for the '<em><b>Factor</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int ARITHMETIC__FACTOR = 1;
+
+	/**
 	 * The feature id for the '<em><b>Coefficient</b></em>' containment reference.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__COEFFICIENT = 1;
+	int ARITHMETIC__COEFFICIENT = 2;
 
 	/**
 	 * The feature id for the '<em><b>Input</b></em>' containment reference.
@@ -2696,7 +2705,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__INPUT = 2;
+	int ARITHMETIC__INPUT = 3;
 
 	/**
 	 * The feature id for the '<em><b>Product</b></em>' containment reference.
@@ -2705,7 +2714,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__PRODUCT = 3;
+	int ARITHMETIC__PRODUCT = 4;
 
 	/**
 	 * The feature id for the '<em><b>Accumulator</b></em>' containment reference.
@@ -2714,7 +2723,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__ACCUMULATOR = 4;
+	int ARITHMETIC__ACCUMULATOR = 5;
 
 	/**
 	 * The feature id for the '<em><b>Output</b></em>' containment reference.
@@ -2723,7 +2732,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__OUTPUT = 5;
+	int ARITHMETIC__OUTPUT = 6;
 
 	/**
 	 * The feature id for the '<em><b>Rounding</b></em>' attribute.
@@ -2732,7 +2741,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__ROUNDING = 6;
+	int ARITHMETIC__ROUNDING = 7;
 
 	/**
 	 * The feature id for the '<em><b>Overflow</b></em>' attribute.
@@ -2741,7 +2750,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC__OVERFLOW = 7;
+	int ARITHMETIC__OVERFLOW = 8;
 
 	/**
 	 * The number of structural features of the '<em>Arithmetic</em>' class.
@@ -2750,7 +2759,7 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 * @ordered
 	 */
-	int ARITHMETIC_FEATURE_COUNT = 8;
+	int ARITHMETIC_FEATURE_COUNT = 9;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.impl.FormatImpl <em>Format</em>}' class.
@@ -4963,6 +4972,17 @@ public interface ModelPackage extends EPackage {
 	EAttribute getArithmetic_Structure();
 
 	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.Arithmetic#getFactor <em>Factor</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Factor</em>'.
+	 * @see tapwright.model.Arithmetic#getFactor()
+	 * @see #getArithmetic()
+	 * @generated
+	 */
+	EAttribute getArithmetic_Factor();
+
+	/**
 	 * Returns the meta object for the containment reference '{@link tapwright.model.Arithmetic#getCoefficient <em>Coefficient</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -6973,6 +6993,14 @@ public interface ModelPackage extends EPackage {
 		 * @generated
 		 */
 		EAttribute ARITHMETIC__STRUCTURE = eINSTANCE.getArithmetic_Structure();
+
+		/**
+		 * The meta object literal for the '<em><b>Factor</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute ARITHMETIC__FACTOR = eINSTANCE.getArithmetic_Factor();
 
 		/**
 		 * The meta object literal for the '<em><b>Coefficient</b></em>' containment reference feature.

@@ -60,7 +60,46 @@ public enum Structure implements Enumerator {
 	 * @generated
 	 * @ordered
 	 */
-	TRANSPOSED(2, "TRANSPOSED", "transposed");
+	TRANSPOSED(2, "TRANSPOSED", "transposed"),
+
+	/**
+	 * The '<em><b>HALF BAND</b></em>' literal object.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Like folded, but zero coefficients cost nothing; needs a half-band filter.
+	 * <!-- end-model-doc -->
+	 * @see #HALF_BAND_VALUE
+	 * @generated
+	 * @ordered
+	 */
+	HALF_BAND(3, "HALF_BAND", "half-band"),
+
+	/**
+	 * The '<em><b>POLYPHASE DECIMATOR</b></em>' literal object.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Computes only the samples that are kept.
+	 * <!-- end-model-doc -->
+	 * @see #POLYPHASE_DECIMATOR_VALUE
+	 * @generated
+	 * @ordered
+	 */
+	POLYPHASE_DECIMATOR(4, "POLYPHASE_DECIMATOR", "polyphase-decimator"),
+
+	/**
+	 * The '<em><b>POLYPHASE INTERPOLATOR</b></em>' literal object.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Leaves out the products with inserted zeros.
+	 * <!-- end-model-doc -->
+	 * @see #POLYPHASE_INTERPOLATOR_VALUE
+	 * @generated
+	 * @ordered
+	 */
+	POLYPHASE_INTERPOLATOR(5, "POLYPHASE_INTERPOLATOR", "polyphase-interpolator");
 
 	/**
 	 * The '<em><b>DIRECT</b></em>' literal value.
@@ -105,6 +144,48 @@ public enum Structure implements Enumerator {
 	public static final int TRANSPOSED_VALUE = 2;
 
 	/**
+	 * The '<em><b>HALF BAND</b></em>' literal value.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Like folded, but zero coefficients cost nothing; needs a half-band filter.
+	 * <!-- end-model-doc -->
+	 * @see #HALF_BAND
+	 * @model literal="half-band"
+	 * @generated
+	 * @ordered
+	 */
+	public static final int HALF_BAND_VALUE = 3;
+
+	/**
+	 * The '<em><b>POLYPHASE DECIMATOR</b></em>' literal value.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Computes only the samples that are kept.
+	 * <!-- end-model-doc -->
+	 * @see #POLYPHASE_DECIMATOR
+	 * @model literal="polyphase-decimator"
+	 * @generated
+	 * @ordered
+	 */
+	public static final int POLYPHASE_DECIMATOR_VALUE = 4;
+
+	/**
+	 * The '<em><b>POLYPHASE INTERPOLATOR</b></em>' literal value.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * <!-- begin-model-doc -->
+	 * Leaves out the products with inserted zeros.
+	 * <!-- end-model-doc -->
+	 * @see #POLYPHASE_INTERPOLATOR
+	 * @model literal="polyphase-interpolator"
+	 * @generated
+	 * @ordered
+	 */
+	public static final int POLYPHASE_INTERPOLATOR_VALUE = 5;
+
+	/**
 	 * An array of all the '<em><b>Structure</b></em>' enumerators.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -115,6 +196,9 @@ public enum Structure implements Enumerator {
 			DIRECT,
 			FOLDED,
 			TRANSPOSED,
+			HALF_BAND,
+			POLYPHASE_DECIMATOR,
+			POLYPHASE_INTERPOLATOR,
 		};
 
 	/**
@@ -174,6 +258,9 @@ public enum Structure implements Enumerator {
 			case DIRECT_VALUE: return DIRECT;
 			case FOLDED_VALUE: return FOLDED;
 			case TRANSPOSED_VALUE: return TRANSPOSED;
+			case HALF_BAND_VALUE: return HALF_BAND;
+			case POLYPHASE_DECIMATOR_VALUE: return POLYPHASE_DECIMATOR;
+			case POLYPHASE_INTERPOLATOR_VALUE: return POLYPHASE_INTERPOLATOR;
 		}
 		return null;
 	}

@@ -76,17 +76,17 @@ public enum WindowKind implements Enumerator {
 	HAMMING(3, "HAMMING", "hamming"),
 
 	/**
-	 * The '<em><b>EXACT HAMMING</b></em>' literal object.
+	 * The '<em><b>HAMMING EXACT</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * <!-- begin-model-doc -->
 	 * 25/46 and 21/46.
 	 * <!-- end-model-doc -->
-	 * @see #EXACT_HAMMING_VALUE
+	 * @see #HAMMING_EXACT_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	EXACT_HAMMING(4, "EXACT_HAMMING", "exact-hamming"),
+	HAMMING_EXACT(4, "HAMMING_EXACT", "hamming-exact"),
 
 	/**
 	 * The '<em><b>BLACKMAN</b></em>' literal object.
@@ -102,17 +102,17 @@ public enum WindowKind implements Enumerator {
 	BLACKMAN(5, "BLACKMAN", "blackman"),
 
 	/**
-	 * The '<em><b>EXACT BLACKMAN</b></em>' literal object.
+	 * The '<em><b>BLACKMAN EXACT</b></em>' literal object.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * <!-- begin-model-doc -->
 	 * 7938/18608, 9240/18608 and 1430/18608.
 	 * <!-- end-model-doc -->
-	 * @see #EXACT_BLACKMAN_VALUE
+	 * @see #BLACKMAN_EXACT_VALUE
 	 * @generated
 	 * @ordered
 	 */
-	EXACT_BLACKMAN(6, "EXACT_BLACKMAN", "exact-blackman"),
+	BLACKMAN_EXACT(6, "BLACKMAN_EXACT", "blackman-exact"),
 
 	/**
 	 * The '<em><b>BLACKMAN HARRIS</b></em>' literal object.
@@ -275,18 +275,18 @@ public enum WindowKind implements Enumerator {
 	public static final int HAMMING_VALUE = 3;
 
 	/**
-	 * The '<em><b>EXACT HAMMING</b></em>' literal value.
+	 * The '<em><b>HAMMING EXACT</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * <!-- begin-model-doc -->
 	 * 25/46 and 21/46.
 	 * <!-- end-model-doc -->
-	 * @see #EXACT_HAMMING
-	 * @model literal="exact-hamming"
+	 * @see #HAMMING_EXACT
+	 * @model literal="hamming-exact"
 	 * @generated
 	 * @ordered
 	 */
-	public static final int EXACT_HAMMING_VALUE = 4;
+	public static final int HAMMING_EXACT_VALUE = 4;
 
 	/**
 	 * The '<em><b>BLACKMAN</b></em>' literal value.
@@ -303,18 +303,18 @@ public enum WindowKind implements Enumerator {
 	public static final int BLACKMAN_VALUE = 5;
 
 	/**
-	 * The '<em><b>EXACT BLACKMAN</b></em>' literal value.
+	 * The '<em><b>BLACKMAN EXACT</b></em>' literal value.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
 	 * <!-- begin-model-doc -->
 	 * 7938/18608, 9240/18608 and 1430/18608.
 	 * <!-- end-model-doc -->
-	 * @see #EXACT_BLACKMAN
-	 * @model literal="exact-blackman"
+	 * @see #BLACKMAN_EXACT
+	 * @model literal="blackman-exact"
 	 * @generated
 	 * @ordered
 	 */
-	public static final int EXACT_BLACKMAN_VALUE = 6;
+	public static final int BLACKMAN_EXACT_VALUE = 6;
 
 	/**
 	 * The '<em><b>BLACKMAN HARRIS</b></em>' literal value.
@@ -440,9 +440,9 @@ public enum WindowKind implements Enumerator {
 			BARTLETT,
 			HANN,
 			HAMMING,
-			EXACT_HAMMING,
+			HAMMING_EXACT,
 			BLACKMAN,
-			EXACT_BLACKMAN,
+			BLACKMAN_EXACT,
 			BLACKMAN_HARRIS,
 			NUTTALL,
 			FLAT_TOP,
@@ -511,9 +511,9 @@ public enum WindowKind implements Enumerator {
 			case BARTLETT_VALUE: return BARTLETT;
 			case HANN_VALUE: return HANN;
 			case HAMMING_VALUE: return HAMMING;
-			case EXACT_HAMMING_VALUE: return EXACT_HAMMING;
+			case HAMMING_EXACT_VALUE: return HAMMING_EXACT;
 			case BLACKMAN_VALUE: return BLACKMAN;
-			case EXACT_BLACKMAN_VALUE: return EXACT_BLACKMAN;
+			case BLACKMAN_EXACT_VALUE: return BLACKMAN_EXACT;
 			case BLACKMAN_HARRIS_VALUE: return BLACKMAN_HARRIS;
 			case NUTTALL_VALUE: return NUTTALL;
 			case FLAT_TOP_VALUE: return FLAT_TOP;

@@ -67,6 +67,7 @@ public class ArithmeticItemProvider
 			super.getPropertyDescriptors(object);
 
 			addStructurePropertyDescriptor(object);
+			addFactorPropertyDescriptor(object);
 			addRoundingPropertyDescriptor(object);
 			addOverflowPropertyDescriptor(object);
 		}
@@ -87,6 +88,28 @@ public class ArithmeticItemProvider
 				 getString("_UI_Arithmetic_structure_feature"),
 				 getString("_UI_PropertyDescriptor_description", "_UI_Arithmetic_structure_feature", "_UI_Arithmetic_type"),
 				 ModelPackage.Literals.ARITHMETIC__STRUCTURE,
+				 true,
+				 false,
+				 false,
+				 ItemPropertyDescriptor.GENERIC_VALUE_IMAGE,
+				 null,
+				 null));
+	}
+
+	/**
+	 * This adds a property descriptor for the Factor feature.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected void addFactorPropertyDescriptor(Object object) {
+		itemPropertyDescriptors.add
+			(createItemPropertyDescriptor
+				(((ComposeableAdapterFactory)adapterFactory).getRootAdapterFactory(),
+				 getResourceLocator(),
+				 getString("_UI_Arithmetic_factor_feature"),
+				 getString("_UI_PropertyDescriptor_description", "_UI_Arithmetic_factor_feature", "_UI_Arithmetic_type"),
+				 ModelPackage.Literals.ARITHMETIC__FACTOR,
 				 true,
 				 false,
 				 false,
@@ -212,6 +235,7 @@ public class ArithmeticItemProvider
 
 		switch (notification.getFeatureID(Arithmetic.class)) {
 			case ModelPackage.ARITHMETIC__STRUCTURE:
+			case ModelPackage.ARITHMETIC__FACTOR:
 			case ModelPackage.ARITHMETIC__ROUNDING:
 			case ModelPackage.ARITHMETIC__OVERFLOW:
 				fireNotifyChanged(new ViewerNotification(notification, notification.getNotifier(), false, true));

@@ -29,6 +29,7 @@ import tapwright.model.Structure;
  * </p>
  * <ul>
  *   <li>{@link tapwright.model.impl.ArithmeticImpl#getStructure <em>Structure</em>}</li>
+ *   <li>{@link tapwright.model.impl.ArithmeticImpl#getFactor <em>Factor</em>}</li>
  *   <li>{@link tapwright.model.impl.ArithmeticImpl#getCoefficient <em>Coefficient</em>}</li>
  *   <li>{@link tapwright.model.impl.ArithmeticImpl#getInput <em>Input</em>}</li>
  *   <li>{@link tapwright.model.impl.ArithmeticImpl#getProduct <em>Product</em>}</li>
@@ -60,6 +61,26 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 	 * @ordered
 	 */
 	protected Structure structure = STRUCTURE_EDEFAULT;
+
+	/**
+	 * The default value of the '{@link #getFactor() <em>Factor</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getFactor()
+	 * @generated
+	 * @ordered
+	 */
+	protected static final String FACTOR_EDEFAULT = null;
+
+	/**
+	 * The cached value of the '{@link #getFactor() <em>Factor</em>}' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getFactor()
+	 * @generated
+	 * @ordered
+	 */
+	protected String factor = FACTOR_EDEFAULT;
 
 	/**
 	 * The cached value of the '{@link #getCoefficient() <em>Coefficient</em>}' containment reference.
@@ -191,6 +212,29 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 		structure = newStructure == null ? STRUCTURE_EDEFAULT : newStructure;
 		if (eNotificationRequired())
 			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.ARITHMETIC__STRUCTURE, oldStructure, structure));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public String getFactor() {
+		return factor;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setFactor(String newFactor) {
+		String oldFactor = factor;
+		factor = newFactor;
+		if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.ARITHMETIC__FACTOR, oldFactor, factor));
 	}
 
 	/**
@@ -496,6 +540,8 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 		switch (featureID) {
 			case ModelPackage.ARITHMETIC__STRUCTURE:
 				return getStructure();
+			case ModelPackage.ARITHMETIC__FACTOR:
+				return getFactor();
 			case ModelPackage.ARITHMETIC__COEFFICIENT:
 				return getCoefficient();
 			case ModelPackage.ARITHMETIC__INPUT:
@@ -524,6 +570,9 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 		switch (featureID) {
 			case ModelPackage.ARITHMETIC__STRUCTURE:
 				setStructure((Structure)newValue);
+				return;
+			case ModelPackage.ARITHMETIC__FACTOR:
+				setFactor((String)newValue);
 				return;
 			case ModelPackage.ARITHMETIC__COEFFICIENT:
 				setCoefficient((Format)newValue);
@@ -561,6 +610,9 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 			case ModelPackage.ARITHMETIC__STRUCTURE:
 				setStructure(STRUCTURE_EDEFAULT);
 				return;
+			case ModelPackage.ARITHMETIC__FACTOR:
+				setFactor(FACTOR_EDEFAULT);
+				return;
 			case ModelPackage.ARITHMETIC__COEFFICIENT:
 				setCoefficient((Format)null);
 				return;
@@ -596,6 +648,8 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 		switch (featureID) {
 			case ModelPackage.ARITHMETIC__STRUCTURE:
 				return structure != STRUCTURE_EDEFAULT;
+			case ModelPackage.ARITHMETIC__FACTOR:
+				return FACTOR_EDEFAULT == null ? factor != null : !FACTOR_EDEFAULT.equals(factor);
 			case ModelPackage.ARITHMETIC__COEFFICIENT:
 				return coefficient != null;
 			case ModelPackage.ARITHMETIC__INPUT:
@@ -626,6 +680,8 @@ public class ArithmeticImpl extends MinimalEObjectImpl.Container implements Arit
 		StringBuilder result = new StringBuilder(super.toString());
 		result.append(" (structure: ");
 		result.append(structure);
+		result.append(", factor: ");
+		result.append(factor);
 		result.append(", rounding: ");
 		result.append(rounding);
 		result.append(", overflow: ");

@@ -2090,8 +2090,8 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
-	public EReference getArithmetic_Coefficient() {
-		return (EReference)arithmeticEClass.getEStructuralFeatures().get(1);
+	public EAttribute getArithmetic_Factor() {
+		return (EAttribute)arithmeticEClass.getEStructuralFeatures().get(1);
 	}
 
 	/**
@@ -2100,7 +2100,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
-	public EReference getArithmetic_Input() {
+	public EReference getArithmetic_Coefficient() {
 		return (EReference)arithmeticEClass.getEStructuralFeatures().get(2);
 	}
 
@@ -2110,7 +2110,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
-	public EReference getArithmetic_Product() {
+	public EReference getArithmetic_Input() {
 		return (EReference)arithmeticEClass.getEStructuralFeatures().get(3);
 	}
 
@@ -2120,7 +2120,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
-	public EReference getArithmetic_Accumulator() {
+	public EReference getArithmetic_Product() {
 		return (EReference)arithmeticEClass.getEStructuralFeatures().get(4);
 	}
 
@@ -2130,7 +2130,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
-	public EReference getArithmetic_Output() {
+	public EReference getArithmetic_Accumulator() {
 		return (EReference)arithmeticEClass.getEStructuralFeatures().get(5);
 	}
 
@@ -2140,8 +2140,18 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
+	public EReference getArithmetic_Output() {
+		return (EReference)arithmeticEClass.getEStructuralFeatures().get(6);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EAttribute getArithmetic_Rounding() {
-		return (EAttribute)arithmeticEClass.getEStructuralFeatures().get(6);
+		return (EAttribute)arithmeticEClass.getEStructuralFeatures().get(7);
 	}
 
 	/**
@@ -2151,7 +2161,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 */
 	@Override
 	public EAttribute getArithmetic_Overflow() {
-		return (EAttribute)arithmeticEClass.getEStructuralFeatures().get(7);
+		return (EAttribute)arithmeticEClass.getEStructuralFeatures().get(8);
 	}
 
 	/**
@@ -2965,6 +2975,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 
 		arithmeticEClass = createEClass(ARITHMETIC);
 		createEAttribute(arithmeticEClass, ARITHMETIC__STRUCTURE);
+		createEAttribute(arithmeticEClass, ARITHMETIC__FACTOR);
 		createEReference(arithmeticEClass, ARITHMETIC__COEFFICIENT);
 		createEReference(arithmeticEClass, ARITHMETIC__INPUT);
 		createEReference(arithmeticEClass, ARITHMETIC__PRODUCT);
@@ -3297,6 +3308,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 
 		initEClass(arithmeticEClass, Arithmetic.class, "Arithmetic", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getArithmetic_Structure(), this.getStructure(), "structure", null, 0, 1, Arithmetic.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getArithmetic_Factor(), this.getQuantity(), "factor", null, 0, 1, Arithmetic.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getArithmetic_Coefficient(), this.getFormat(), null, "coefficient", null, 0, 1, Arithmetic.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getArithmetic_Input(), this.getFormat(), null, "input", null, 0, 1, Arithmetic.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEReference(getArithmetic_Product(), this.getFormat(), null, "product", null, 0, 1, Arithmetic.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -3395,6 +3407,9 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		addEEnumLiteral(structureEEnum, Structure.DIRECT);
 		addEEnumLiteral(structureEEnum, Structure.FOLDED);
 		addEEnumLiteral(structureEEnum, Structure.TRANSPOSED);
+		addEEnumLiteral(structureEEnum, Structure.HALF_BAND);
+		addEEnumLiteral(structureEEnum, Structure.POLYPHASE_DECIMATOR);
+		addEEnumLiteral(structureEEnum, Structure.POLYPHASE_INTERPOLATOR);
 
 		initEEnum(roundingEEnum, Rounding.class, "Rounding");
 		addEEnumLiteral(roundingEEnum, Rounding.TOWARD_ZERO);
@@ -3422,9 +3437,9 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		addEEnumLiteral(windowKindEEnum, WindowKind.BARTLETT);
 		addEEnumLiteral(windowKindEEnum, WindowKind.HANN);
 		addEEnumLiteral(windowKindEEnum, WindowKind.HAMMING);
-		addEEnumLiteral(windowKindEEnum, WindowKind.EXACT_HAMMING);
+		addEEnumLiteral(windowKindEEnum, WindowKind.HAMMING_EXACT);
 		addEEnumLiteral(windowKindEEnum, WindowKind.BLACKMAN);
-		addEEnumLiteral(windowKindEEnum, WindowKind.EXACT_BLACKMAN);
+		addEEnumLiteral(windowKindEEnum, WindowKind.BLACKMAN_EXACT);
 		addEEnumLiteral(windowKindEEnum, WindowKind.BLACKMAN_HARRIS);
 		addEEnumLiteral(windowKindEEnum, WindowKind.NUTTALL);
 		addEEnumLiteral(windowKindEEnum, WindowKind.FLAT_TOP);
@@ -3646,6 +3661,24 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		   source,
 		   new String[] {
 			   "documentation", "One multiplier per coefficient, delays between the adders."
+		   });
+		addAnnotation
+		  (structureEEnum.getELiterals().get(3),
+		   source,
+		   new String[] {
+			   "documentation", "Like folded, but zero coefficients cost nothing; needs a half-band filter."
+		   });
+		addAnnotation
+		  (structureEEnum.getELiterals().get(4),
+		   source,
+		   new String[] {
+			   "documentation", "Computes only the samples that are kept."
+		   });
+		addAnnotation
+		  (structureEEnum.getELiterals().get(5),
+		   source,
+		   new String[] {
+			   "documentation", "Leaves out the products with inserted zeros."
 		   });
 		addAnnotation
 		  (roundingEEnum,
@@ -4740,6 +4773,12 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 			   "documentation", "Order of operations."
 		   });
 		addAnnotation
+		  (getArithmetic_Factor(),
+		   source,
+		   new String[] {
+			   "documentation", "Rate factor of polyphase and half-band structures; 1 when empty."
+		   });
+		addAnnotation
 		  (getArithmetic_Coefficient(),
 		   source,
 		   new String[] {
@@ -5625,6 +5664,12 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		   source,
 		   new String[] {
 			   "json", "integers"
+		   });
+		addAnnotation
+		  (getArithmetic_Factor(),
+		   source,
+		   new String[] {
+			   "unit", "1"
 		   });
 		addAnnotation
 		  (getFormat_Word(),
