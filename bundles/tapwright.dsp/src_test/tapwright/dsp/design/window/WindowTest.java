@@ -154,7 +154,7 @@ class WindowTest {
 		for (int k = 0; k < first.length; k++) {
 			assertEquals(first[k], window[k], 1e-9);
 		}
-		assertEquals(-attenuation, peakSideLobe(window, 1 << 14), 1e-5);
+		assertEquals(-attenuation, peakSideLobe(window, 1 << 14), 1e-4);
 	}
 
 	private static void assertFigures(Window window, double gain, double bandwidth, double scalloping, double sideLobe) {

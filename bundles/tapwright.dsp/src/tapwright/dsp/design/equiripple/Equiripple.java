@@ -1,0 +1,128 @@
+// SPDX-License-Identifier: EPL-2.0
+package tapwright.dsp.design.equiripple;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+
+import tapwright.dsp.Progress;
+import tapwright.dsp.design.Band;
+import tapwright.dsp.design.Bands;
+import tapwright.dsp.design.Design;
+import tapwright.dsp.design.DesignException;
+import tapwright.dsp.design.DesignResult;
+import tapwright.dsp.design.LinearPhaseType;
+import tapwright.dsp.exact.Enclosure;
+import tapwright.dsp.exact.Symmetry;
+
+/**
+ * Linear-phase design with the least largest weighted error over all bands; between bands the response is free (T. W. Parks and
+ * J. H. McClellan, Chebyshev approximation for nonrecursive digital filters with linear phase, IEEE Transactions on Circuit Theory
+ * 19(2), 1972; all four types: J. H. McClellan and T. W. Parks, A unified approach to the design of optimum FIR linear-phase digital
+ * filters, IEEE Transactions on Circuit Theory 20(6), 1973). Every answer is checked by a proof before it is given.
+ *
+ * @param taps
+ *            number of coefficients, at most {@link #LONGEST}
+ * @param symmetry
+ *            even, or odd for differentiators and Hilbert transformers
+ * @param bands
+ *            rising; two may touch where their desired amplitudes agree
+ * @param tolerance
+ *            how far the largest error may be above the best possible one, relatively; 1e-10 to 0.1
+ */
+public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double tolerance) implements Design {
+
+	/** The greatest number of coefficients. */
+	public static final int LONGEST = 8192;
+
+	/** The usual tolerance. */
+	public static final double STANDARD = 1e-4;
+
+	private static final int MOST_BANDS = 256;
+	/** Beyond this excess the answer is not worth having. */
+	private static final double USELESS = 0.05;
+	private static final double HIGH_PEAK = 1.2;
+
+	/** Checks the parameters. */
+	public Equiripple {
+		if (taps < 1 || taps > LONGEST) {
+			throw new IllegalArgumentException("an equiripple design of " + taps + " coefficients was asked for; ask for 1 to " + LONGEST);
+		}
+		if (!(tolerance >= 1e-10 && tolerance <= 0.1)) {
+			throw new IllegalArgumentException("the tolerance is " + tolerance + "; it must be between 1e-10 and 0.1");
+		}
+		bands = Bands.rising(bands, true);
+		if (bands.size() > MOST_BANDS) {
+			throw new IllegalArgumentException(bands.size() + " bands are too many; give at most " + MOST_BANDS);
+		}
+		for (int k = 1; k < bands.size(); k++) {
+			Band before = bands.get(k - 1);
+			Band band = bands.get(k);
+			if (before.to() == band.from() && before.desiredTo() != band.desiredFrom()) {
+				throw new IllegalArgumentException("the desired amplitude jumps from " + before.desiredTo() + " to " + band.desiredFrom()
+						+ " at " + band.from() + " cycles per sample; no filter can follow: leave a transition between the bands");
+			}
+		}
+		LinearPhaseType.of(taps, symmetry).refuseImpossible(bands);
+	}
+
+	/** With the usual tolerance. */
+	public Equiripple(int taps, Symmetry symmetry, List<Band> bands) {
+		this(taps, symmetry, bands, STANDARD);
+	}
+
+	@Override
+	public DesignResult compute(Progress progress) throws DesignException {
+		EquirippleSolution solution = solve(progress);
+		return new DesignResult(solution.taps(), solution.notes());
+	}
+
+	/**
+	 * Computes the coefficients and what is proven of them.
+	 *
+	 * @throws DesignException
+	 *             when double precision cannot resolve the solution; says what to do
+	 * @throws java.util.concurrent.CancellationException
+	 *             when cancelled
+	 */
+	public EquirippleSolution solve(Progress progress) throws DesignException {
+		LinearPhaseType type = LinearPhaseType.of(taps, symmetry);
+		int unknowns = type.unknowns(taps);
+		Exchange.Outcome outcome = new Exchange(type, bands, progress).solve(unknowns, tolerance / 4);
+		double[] h = type.taps(Recovery.coefficients(outcome.approximation(), unknowns));
+		progress.checkCancelled();
+		return proven(type, h, outcome.reference().frequencies(new Target(type, bands, unknowns)), outcome.reference().band());
+	}
+
+	private EquirippleSolution proven(LinearPhaseType type, double[] h, double[] extremes, int[] band) throws DesignException {
+		WeightedError error = new WeightedError(type, h, bands);
+		Enclosure largest = error.largest(tolerance / 8);
+		double lower = error.leastAlternating(extremes, band);
+		double wanted = 0;
+		double peak = 0;
+		for (int k = 0; k < bands.size(); k++) {
+			wanted = Math.max(wanted, Math.max(Math.abs(bands.get(k).desiredFrom()), Math.abs(bands.get(k).desiredTo())));
+			double end = k == 0 ? 0 : bands.get(k - 1).to();
+			peak = end < bands.get(k).from() ? Math.max(peak, error.peakBetween(end, bands.get(k).from())) : peak;
+		}
+		double last = bands.get(bands.size() - 1).to();
+		peak = last < 0.5 ? Math.max(peak, error.peakBetween(last, 0.5)) : peak;
+		List<String> notes = new ArrayList<>();
+		if (peak > HIGH_PEAK * wanted) {
+			notes.add(String.format(Locale.ROOT, "Between the bands the gain rises to about %.4g.", peak));
+		}
+		double excess = largest.hi() / lower - 1;
+		if (!(excess <= USELESS)) {
+			throw new DesignException(peak > 1e6 * wanted
+					? String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands, and coefficients in double"
+							+ " precision cannot carry it; make the transitions more equal in width or reduce the taps", peak)
+					: String.format(Locale.ROOT, "the best weighted error is near what double precision resolves (errors up to %.3g, best"
+							+ " possible %.3g); reduce the taps or narrow the transitions", largest.hi(), lower));
+		}
+		if (excess > tolerance) {
+			notes.add(String.format(Locale.ROOT, "The largest weighted error is proven to be within %.2g of the best possible one,"
+					+ " relatively; double precision gives no better proof.", excess));
+		}
+		return new EquirippleSolution(h, lower, largest.hi(), extremes, peak, List.copyOf(notes));
+	}
+}
