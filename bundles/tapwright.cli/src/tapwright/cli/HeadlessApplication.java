@@ -12,7 +12,7 @@ public final class HeadlessApplication implements IApplication {
 	@Override
 	public Object start(IApplicationContext context) {
 		var args = (String[]) context.getArguments().get(IApplicationContext.APPLICATION_ARGS);
-		return Main.run(List.of(args), System.out, System.err);
+		return Main.run(List.of(args), new Console(System.out, System.err, false));
 	}
 
 	@Override

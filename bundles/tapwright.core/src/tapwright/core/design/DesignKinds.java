@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 
 import tapwright.core.InputException;
+import tapwright.core.design.kind.EquirippleDesignKind;
 import tapwright.core.design.kind.WindowDesignKind;
 import tapwright.model.Design;
 import tapwright.model.GivenDesign;
@@ -17,7 +18,7 @@ public final class DesignKinds {
 	private static final Map<Class<?>, DesignKind<?>> KINDS = new LinkedHashMap<>();
 
 	static {
-		for (DesignKind<?> kind : List.of(new WindowDesignKind())) {
+		for (DesignKind<?> kind : List.of(new WindowDesignKind(), new EquirippleDesignKind())) {
 			KINDS.put(kind.type(), kind);
 		}
 	}
