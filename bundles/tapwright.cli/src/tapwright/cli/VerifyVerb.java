@@ -89,7 +89,9 @@ final class VerifyVerb implements Verb {
 			console.out().print(text);
 		}
 		List<String> problems = run.problems();
-		problems.forEach(problem -> console.err().println("tapwright verify: " + problem));
+		if (output.isPresent() || !format.name().equals("table")) { // the table shows them itself
+			problems.forEach(problem -> console.err().println("tapwright verify: " + problem));
+		}
 		return problems.isEmpty() ? run.allMet() ? Main.OK : Main.NOT_MET : Main.BAD_USAGE;
 	}
 

@@ -17,9 +17,12 @@ import tapwright.core.quantity.Expression;
 import tapwright.core.quantity.Numbers;
 import tapwright.core.quantity.Quantity;
 import tapwright.dsp.arithmetic.Arithmetic;
+import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.verify.Effort;
+import tapwright.dsp.verify.Proof;
 import tapwright.dsp.verify.Subject;
+import tapwright.dsp.verify.Verdict;
 import tapwright.model.Filter;
 import tapwright.model.ModelPackage;
 import tapwright.model.Requirement;
@@ -30,6 +33,11 @@ import tapwright.model.io.ModelFiles;
  * afterwards, so that it can be answered on any thread, and answered again with the same result.
  */
 public final class FilterQuestion {
+
+	// Of a filter without usable coefficients nothing is known.
+	private static final Enclosure ANYTHING = new Enclosure(Double.NEGATIVE_INFINITY, Double.POSITIVE_INFINITY);
+	private static final Proof UNKNOWN = new Proof(Verdict.UNPROVEN, Double.NaN, ANYTHING, Double.NaN, ANYTHING,
+			"there are no coefficients to prove it of");
 
 	private final String name;
 	private final String hash;
@@ -91,7 +99,7 @@ public final class FilterQuestion {
 		return parameters;
 	}
 
-	/** The filter as the numbers that ship; nothing when it has no coefficients or they cannot be read. */
+	/** The filter as the numbers that ship; nothing when it has no coefficients yet or they cannot be read. */
 	public Optional<Subject> subject() {
 		return subject;
 	}
@@ -105,9 +113,11 @@ public final class FilterQuestion {
 	public FilterEvidence answer(Effort effort) {
 		var evidence = new ArrayList<RequirementEvidence>();
 		var found = new ArrayList<>(problems);
-		if (subject.isPresent()) { // otherwise the reason is among the problems
-			for (Statement statement : statements) {
-				effort.progress().checkCancelled();
+		for (Statement statement : statements) {
+			effort.progress().checkCancelled();
+			if (subject.isEmpty()) {
+				evidence.add(statement.evidence(UNKNOWN));
+			} else {
 				try {
 					evidence.add(statement.evidence(statement.claim().prove(subject.get(), effort)));
 				} catch (IllegalArgumentException e) {
@@ -122,7 +132,7 @@ public final class FilterQuestion {
 		try {
 			double rate = numbers.get(filter, ModelPackage.Literals.FILTER__SAMPLE_RATE);
 			if (filter.getCoefficients() == null) {
-				throw new InputException("coefficients", "there are none; run the design or bring them in");
+				return Optional.empty();
 			}
 			ExactTaps stored = FilterNumbers.stored(filter.getCoefficients());
 			if (filter.getArithmetic() == null) {
