@@ -47,7 +47,7 @@ final class EvidenceWords {
 		}
 		return switch (evidence.proof().verdict()) {
 		case MISSED -> "short by " + Words.of(-margin.middle(), evidence.valueUnit(), 3);
-		case MET -> margin.hi() == 0 ? "exactly at the limit" : Words.of(margin.middle(), evidence.valueUnit(), 3) + " to spare";
+		case MET -> margin.hi() == 0 ? "" : Words.of(margin.middle(), evidence.valueUnit(), 3) + " to spare";
 		case UNPROVEN -> "between " + Words.of(margin.lo(), evidence.valueUnit(), 3) + " and "
 				+ Words.of(margin.hi(), evidence.valueUnit(), 3) + " to spare";
 		};

@@ -79,6 +79,9 @@ public final class GainKind implements RequirementKind<GainRequirement> {
 	}
 
 	private static String limits(Breakpoint point) {
+		if (point.lower() == point.upper()) {
+			return "exactly " + Words.exactly(point.upper(), "dB");
+		}
 		if (point.lower() == NO_LOWER) {
 			return "at most " + Words.exactly(point.upper(), "dB");
 		}
