@@ -12,7 +12,6 @@ import tapwright.dsp.design.Design;
 import tapwright.dsp.design.DesignException;
 import tapwright.dsp.design.DesignResult;
 import tapwright.dsp.design.LinearPhaseType;
-import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.exact.Symmetry;
 
 /**
@@ -41,7 +40,10 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	private static final int MOST_BANDS = 256;
 	/** Beyond this excess the answer is not worth having. */
 	private static final double USELESS = 0.05;
+	/** Gains between bands above this multiple of the largest desired one are mentioned. */
 	private static final double HIGH_PEAK = 1.2;
+	/** Gains between bands that explain why the proof failed. */
+	private static final double UNBEARABLE = 1e6;
 
 	/** Checks the parameters. */
 	public Equiripple {
@@ -86,43 +88,61 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	 *             when cancelled
 	 */
 	public EquirippleSolution solve(Progress progress) throws DesignException {
+		return solve(progress, null).solution();
+	}
+
+	/** A solution and the reference that a search can go on from. */
+	record Solved(EquirippleSolution solution, Reference reference) {
+	}
+
+	/** The same from the reference of another length, or from the usual start when there is none. */
+	Solved solve(Progress progress, Reference warm) throws DesignException {
 		LinearPhaseType type = LinearPhaseType.of(taps, symmetry);
 		int unknowns = type.unknowns(taps);
-		Exchange.Outcome outcome = new Exchange(type, bands, progress).solve(unknowns, tolerance / 4);
+		Exchange exchange = new Exchange(type, bands, progress);
+		Exchange.Outcome outcome = warm == null ? exchange.solve(unknowns, tolerance / 4)
+				: exchange.solve(unknowns, tolerance / 4, warm);
 		double[] h = type.taps(Recovery.coefficients(outcome.approximation(), unknowns));
 		progress.checkCancelled();
-		return proven(type, h, outcome.reference().frequencies(new Target(type, bands, unknowns)), outcome.reference().band());
+		Reference reference = outcome.reference();
+		return new Solved(proven(type, h, reference.frequencies(new Target(type, bands, unknowns)), reference.band()), reference);
 	}
 
 	private EquirippleSolution proven(LinearPhaseType type, double[] h, double[] extremes, int[] band) throws DesignException {
 		WeightedError error = new WeightedError(type, h, bands);
-		Enclosure largest = error.largest(tolerance / 8);
+		double upper = error.largest(tolerance / 8).hi();
 		double lower = error.leastAlternating(extremes, band);
 		double wanted = 0;
-		double peak = 0;
-		for (int k = 0; k < bands.size(); k++) {
-			wanted = Math.max(wanted, Math.max(Math.abs(bands.get(k).desiredFrom()), Math.abs(bands.get(k).desiredTo())));
-			double end = k == 0 ? 0 : bands.get(k - 1).to();
-			peak = end < bands.get(k).from() ? Math.max(peak, error.peakBetween(end, bands.get(k).from())) : peak;
+		for (Band line : bands) {
+			wanted = Math.max(wanted, Math.max(Math.abs(line.desiredFrom()), Math.abs(line.desiredTo())));
 		}
-		double last = bands.get(bands.size() - 1).to();
-		peak = last < 0.5 ? Math.max(peak, error.peakBetween(last, 0.5)) : peak;
-		List<String> notes = new ArrayList<>();
-		if (peak > HIGH_PEAK * wanted) {
-			notes.add(String.format(Locale.ROOT, "Between the bands the gain rises to about %.4g.", peak));
-		}
-		double excess = largest.hi() / lower - 1;
+		double peak = peakOutside(error);
+		double excess = upper / lower - 1;
 		if (!(excess <= USELESS)) {
-			throw new DesignException(peak > 1e6 * wanted
+			throw new DesignException(peak > UNBEARABLE * wanted
 					? String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands, and coefficients in double"
 							+ " precision cannot carry it; make the transitions more equal in width or reduce the taps", peak)
 					: String.format(Locale.ROOT, "the best weighted error is near what double precision resolves (errors up to %.3g, best"
-							+ " possible %.3g); reduce the taps or narrow the transitions", largest.hi(), lower));
+							+ " possible %.3g); reduce the taps or narrow the transitions", upper, lower));
+		}
+		List<String> notes = new ArrayList<>();
+		if (peak > HIGH_PEAK * wanted) {
+			notes.add(String.format(Locale.ROOT, "Between the bands the gain rises to about %.4g.", peak));
 		}
 		if (excess > tolerance) {
 			notes.add(String.format(Locale.ROOT, "The largest weighted error is proven to be within %.2g of the best possible one,"
 					+ " relatively; double precision gives no better proof.", excess));
 		}
-		return new EquirippleSolution(h, lower, largest.hi(), extremes, peak, List.copyOf(notes));
+		return new EquirippleSolution(h, lower, upper, extremes, peak, List.copyOf(notes));
+	}
+
+	private double peakOutside(WeightedError error) {
+		double peak = 0;
+		double end = 0;
+		for (Band band : bands) {
+			peak = end < band.from() ? Math.max(peak, error.peakBetween(end, band.from())) : peak;
+			end = band.to();
+		}
+		return end < 0.5 ? Math.max(peak, error.peakBetween(end, 0.5)) : peak;
 	}
 }
