@@ -22,6 +22,7 @@ final class GainProof {
 
 	private final List<LimitLine> lines;
 	private final GainReference reference;
+	private final Subject subject;
 	private final ExactTaps taps;
 	private final double sampleRate;
 	private final Patience patience;
@@ -29,23 +30,32 @@ final class GainProof {
 	GainProof(List<LimitLine> lines, GainReference reference, Subject subject, Effort effort) {
 		this.lines = lines;
 		this.reference = reference;
+		this.subject = subject;
 		this.taps = subject.taps();
 		this.sampleRate = subject.sampleRate();
 		this.patience = new Patience(effort);
 	}
 
 	Proof prove() {
-		SplitTaps split = new SplitTaps(taps);
-		if (split.sizeBits() == 0) {
+		if (taps.isZero()) {
 			return zeroFilter();
 		}
 		Optional<LimitLine> nothing = lines.stream().filter(LimitLine::isNothing).findFirst();
 		if (nothing.isPresent()) {
-			return noGainAllowed(split, nothing.get());
+			return noGainAllowed(new SplitTaps(taps), nothing.get());
 		}
-		GainUnit unit = new GainUnit(reference, split, sampleRate, patience);
-		List<Stretch> stretches = lines.stream().flatMap(line -> line.stretches(sampleRate, taps.length()).stream()).toList();
-		return search(split, unit, stretches);
+		QuickSearch space = QuickGain.WORK_SPACE.get();
+		try {
+			QuickGain quick = new QuickGain(space, lines, reference, subject);
+			return quick.proof().orElseGet(() -> {
+				SplitTaps split = new SplitTaps(taps);
+				return search(split, new GainUnit(reference, split, sampleRate, patience), quick.open());
+			});
+		} finally {
+			if (!space.isWorthKeeping()) {
+				QuickGain.WORK_SPACE.remove();
+			}
+		}
 	}
 
 	private Proof zeroFilter() {
