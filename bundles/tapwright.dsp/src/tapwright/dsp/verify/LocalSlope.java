@@ -16,6 +16,7 @@ final class LocalSlope {
 	private static final double SMALL = 1e-15;
 
 	private final double[] series = new double[TERMS];
+	private double relativeRemainder;
 	private double remainder;
 	private double size;
 
@@ -31,7 +32,7 @@ final class LocalSlope {
 
 	/** Whether a narrower part would have a much smaller error. */
 	boolean isTooWide() {
-		return !(remainder <= SMALL * size);
+		return !(relativeRemainder <= SMALL);
 	}
 
 	/**
@@ -59,17 +60,16 @@ final class LocalSlope {
 		double rise = (squared ? 2 : 1) * NEPERS * (line.toDb() - line.fromDb());
 		double level = line.at(turns * sampleRate);
 		series[0] = StrictMath.pow(10, -level / (squared ? 10 : 20));
-		double factor;
 		if (line.logarithmic()) {
-			factor = power(rise / Math.log(line.to() / line.from()), width / turns);
+			relativeRemainder = power(rise / Math.log(line.to() / line.from()), width / turns);
 		} else {
-			factor = exponential(-rise * (width * sampleRate / (line.to() - line.from())));
+			relativeRemainder = exponential(-rise * (width * sampleRate / (line.to() - line.from())));
 		}
 		size = 0;
 		for (double term : series) {
 			size += Math.abs(term);
 		}
-		remainder = factor * size;
+		remainder = relativeRemainder * size;
 		size += remainder;
 	}
 

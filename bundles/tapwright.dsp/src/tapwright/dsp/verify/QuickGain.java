@@ -26,6 +26,7 @@ final class QuickGain {
 	private final double[] factors;
 	private boolean possible = true;
 	private double doubt;
+	private double slack;
 
 	/** Prepares a search; not a limit of negative infinity among the lines. */
 	QuickGain(QuickSearch search, List<LimitLine> lines, GainReference reference, Subject subject) {
@@ -60,7 +61,7 @@ final class QuickGain {
 			return Optional.empty();
 		}
 		search.search(lines, factors);
-		double slack = 1 + 2 * (doubt + limitDoubt) + 0x1p-49;
+		slack = 1 + 2 * (doubt + limitDoubt) + 0x1p-49;
 		double lo = search.lo() / slack;
 		double hi = search.hi() * slack;
 		boolean decided = hi <= 1 || lo > 1;
@@ -75,7 +76,7 @@ final class QuickGain {
 	/** What an exact search has to look at after {@link #proof()} gave none. */
 	List<Stretch> open() {
 		if (possible) {
-			return search.open(lines, factors);
+			return search.open(lines, factors, slack * slack);
 		}
 		List<Stretch> stretches = new ArrayList<>();
 		for (LimitLine line : lines) {
@@ -98,18 +99,19 @@ final class QuickGain {
 				return Math.scalb(1.0, exponent);
 			}
 			case GainReference.AtFrequency at -> {
-				possible = false;
-				return 1;
+				return inverse(search.gainAt(at.frequency()));
 			}
 			case GainReference.LargestIn in -> {
 				search.search(List.of(new LimitLine(in.from(), in.to(), 0, 0, true, false)), new double[] { 1 });
-				double lo = search.lo();
-				double hi = search.hi();
-				possible = lo > 0 && hi <= lo * WIDE;
-				doubt = (hi - lo) / lo + 0x1p-50;
-				return 2 / (lo + hi);
+				return inverse(new Enclosure(search.lo(), search.hi()));
 			}
 		}
+	}
+
+	private double inverse(Enclosure gain) {
+		possible = gain.lo() > 0 && gain.hi() <= gain.lo() * WIDE;
+		doubt = (gain.hi() - gain.lo()) / gain.lo() + 0x1p-50;
+		return 2 / (gain.lo() + gain.hi());
 	}
 
 	// Decibels of a ratio of gains, a logarithm within one unit in the last place.

@@ -6,6 +6,7 @@ import java.util.List;
 
 import org.apache.commons.math3.fraction.BigFraction;
 
+import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.exact.Rationals;
 import tapwright.dsp.verify.ExactSearch.Stretch;
 
@@ -47,6 +48,11 @@ final class QuickSearch {
 	private double localRounding;
 	private double localError;
 	private boolean sharp;
+	// Of the present line: certain signs of the amplitude seen so far, and the place of its smallest gain.
+	private boolean seenPositive;
+	private boolean seenNegative;
+	private double lineLoad;
+	private double linePlace;
 	private double innerLo;
 	private double innerHi;
 
@@ -80,6 +86,22 @@ final class QuickSearch {
 		cells.load(subject.taps().scaled().values(), subject.taps().symmetry());
 	}
 
+	/** Encloses the scaled gain at one frequency. */
+	Enclosure gainAt(double hertz) {
+		int size = cells.size();
+		double place = hertz / sampleRate * size;
+		int nearest = (int) Math.rint(place);
+		double s = 2 * (place - nearest);
+		int n = cells.polynomial(nearest, whole);
+		double total = cells.isSquared() ? cells.squareSize() : size(whole, n);
+		// The place is off by less than 2^-51 of the number of cells; no slope exceeds n times the total.
+		double doubt = total * ((cells.isSquared() ? SQUARE_ROUNDING : ROUNDING) + n * size * 0x1p-51);
+		double value = CellMaximum.at(whole, n, s);
+		double low = cells.isSquared() ? Math.sqrt(Math.max(0, value - doubt)) : Math.abs(value) - doubt;
+		double high = cells.isSquared() ? Math.sqrt(Math.max(0, value + doubt)) : Math.abs(value) + doubt;
+		return new Enclosure(Math.max(0, low * (1 - 0x1p-50) - cells.error()), high * (1 + 0x1p-50) + cells.error());
+	}
+
 	/**
 	 * Searches all lines.
 	 *
@@ -96,11 +118,14 @@ final class QuickSearch {
 	}
 
 	/**
-	 * The stretches where the load may be larger than {@link #lo()}, after a search. The true worst place is among them, since
-	 * what is certain there is always a little less than what is true.
+	 * The stretches that may hold the worst place, after a search.
+	 *
+	 * @param slack
+	 *            how wrong a ratio of two gains can be, as a factor
 	 */
-	List<Stretch> open(List<LimitLine> lines, double[] gains) {
+	List<Stretch> open(List<LimitLine> lines, double[] gains, double slack) {
 		open = new ArrayList<>();
+		best /= slack;
 		sweep(lines, gains);
 		return open;
 	}
@@ -109,6 +134,10 @@ final class QuickSearch {
 		for (int k = 0; k < gains.length; k++) {
 			line = lines.get(k);
 			gain = gains[k];
+			seenPositive = false;
+			seenNegative = false;
+			lineLoad = 0;
+			linePlace = line.from();
 			int size = cells.size();
 			double from = line.from() / sampleRate * size;
 			double to = line.to() / sampleRate * size;
@@ -173,9 +202,23 @@ final class QuickSearch {
 		}
 		double sign = cells.isSquared() || low + high > 0 ? 1 : -1;
 		double least = sign > 0 ? low : -high;
+		if (!cells.isSquared() && innerLo <= Math.min(1, centre + radius) && innerHi >= Math.max(-1, centre - radius)) {
+			seeSigns(low > localError, -high > localError);
+		}
 		if (under(least) > best) {
 			sharp = true;
 			settle(refine(c, -sign, centre, radius), centre, radius, depth);
+		}
+	}
+
+	// An amplitude that is positive at one place and negative at another is zero between them.
+	private void seeSigns(boolean positive, boolean negative) {
+		seenPositive |= positive;
+		seenNegative |= negative;
+		if (seenPositive && seenNegative && open == null) {
+			best = Double.POSITIVE_INFINITY;
+			bestLine = line;
+			bestPlace = linePlace;
 		}
 	}
 
@@ -227,11 +270,16 @@ final class QuickSearch {
 	}
 
 	private void raise(double load, double s) {
+		if (load <= lineLoad || open != null) {
+			return;
+		}
+		lineLoad = load;
+		linePlace = s == innerLo && s > -1 ? line.from() : s == innerHi && s < 1 ? line.to()
+					: CellMaximum.clamp((cell + s / 2) / cells.size() * sampleRate, line.from(), line.to());
 		if (load > best) {
 			best = load;
 			bestLine = line;
-			bestPlace = s == innerLo && s > -1 ? line.from() : s == innerHi && s < 1 ? line.to()
-					: CellMaximum.clamp((cell + s / 2) / cells.size() * sampleRate, line.from(), line.to());
+			bestPlace = linePlace;
 		}
 	}
 
