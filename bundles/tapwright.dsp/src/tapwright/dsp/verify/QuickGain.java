@@ -117,11 +117,11 @@ final class QuickGain {
 	// Decibels of a ratio of gains, a logarithm within one unit in the last place.
 	private static double up(double ratio) {
 		double db = 20 * StrictMath.log10(ratio);
-		return db + 4 * Math.ulp(db);
+		return Double.isInfinite(db) ? db : db + 4 * Math.ulp(db);
 	}
 
 	private static double down(double ratio) {
 		double db = 20 * StrictMath.log10(ratio);
-		return db - 4 * Math.ulp(db);
+		return Double.isInfinite(db) ? db : db - 4 * Math.ulp(db);
 	}
 }
