@@ -16,11 +16,13 @@ import tapwright.model.Requirement;
  * The target that gain requirements imply: in the middle between the limits where there are two, zero where there is only an upper
  * one far below 0 dB, and no wish where there is only an upper one near 0 dB. The weight is the inverse of the tolerance.
  */
-final class ImpliedBands {
+public final class ImpliedBands {
 
 	/** An upper limit alone asks for a stop band below this amplitude, and above it only forbids excess. */
 	private static final double STOP_BAND = 0.5;
 	private static final double SAME = 1e-12;
+	/** Limits in dB become amplitudes with rounding errors; this much wider, the target excludes nothing that meets them. */
+	private static final double WIDER = 1 + 1e-9;
 
 	private ImpliedBands() {
 	}
@@ -52,6 +54,24 @@ final class ImpliedBands {
 		return bands;
 	}
 
+	/**
+	 * Whether the deviation 1 / weight from the desired amplitude is all that the requirements allow, so that a target that cannot be
+	 * met shows that the requirements cannot. With several bands that pass, their amplitudes could differ in sign; a sloping limit is
+	 * only approximated; a relative limit moves with the filter.
+	 */
+	static boolean areLimits(List<Requirement> requirements, List<Band> bands) {
+		return bands.stream().filter(band -> band.desiredFrom() != 0 || band.desiredTo() != 0).count() <= 1
+				&& requirements.stream().filter(GainRequirement.class::isInstance).map(GainRequirement.class::cast)
+						.allMatch(gain -> gain.getPoints().isEmpty() && gain.getReferenceAt() == null
+								&& gain.getReferenceFrom() == null && gain.getReferenceTo() == null);
+	}
+
+	/** The attenuation in dB that the smallest tolerance of all bands asks for; a window gives the same ripple at every edge. */
+	public static double attenuation(List<Band> bands) {
+		double weight = bands.stream().mapToDouble(band -> Math.max(band.weightFrom(), band.weightTo())).max().orElseThrow();
+		return 20 * Math.log10(weight);
+	}
+
 	private static void add(List<Band> bands, List<Corridor> corridors, double from, double to, double sampleRate)
 			throws InputException {
 		double[] lower = { Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY };
@@ -80,6 +100,7 @@ final class ImpliedBands {
 				desired[end] = Double.isInfinite(upper[end]) ? Math.max(1, 1.01 * lower[end]) : (lower[end] + upper[end]) / 2;
 				tolerance[end] = desired[end] - lower[end];
 			}
+			tolerance[end] *= WIDER;
 		}
 		var band = new Band(from / sampleRate, Math.min(to / sampleRate, 0.5), desired[0], desired[1], 1 / tolerance[0],
 				1 / tolerance[1]);

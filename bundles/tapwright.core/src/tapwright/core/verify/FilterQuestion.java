@@ -42,15 +42,26 @@ public final class FilterQuestion {
 	private final String name;
 	private final String hash;
 	private final Set<String> parameters;
+	private final Optional<Platform> platform;
 	private final Optional<Subject> subject;
 	private final List<Statement> statements;
 	private final List<InputProblem> problems;
 
-	private FilterQuestion(Filter filter, Numbers numbers, Optional<Subject> subject, List<Statement> statements,
-			List<InputProblem> problems) {
+	/** What coefficients run on. */
+	private record Platform(double sampleRate, Optional<Arithmetic> arithmetic) {
+
+		Subject carry(ExactTaps stored) {
+			return new Subject(arithmetic.map(formats -> FilterNumbers.shipped(stored, formats)).orElse(stored), sampleRate,
+					arithmetic);
+		}
+	}
+
+	private FilterQuestion(Filter filter, Numbers numbers, Optional<Platform> platform, Optional<Subject> subject,
+			List<Statement> statements, List<InputProblem> problems) {
 		this.name = filter.getName() == null ? "" : filter.getName();
 		this.hash = hash(filter, numbers.used());
 		this.parameters = Set.copyOf(numbers.used().keySet());
+		this.platform = platform;
 		this.subject = subject;
 		this.statements = List.copyOf(statements);
 		this.problems = List.copyOf(problems);
@@ -65,7 +76,8 @@ public final class FilterQuestion {
 	public static FilterQuestion of(Filter filter, Expression.Names parameters) {
 		var numbers = new Numbers(parameters);
 		var problems = new ArrayList<InputProblem>();
-		Optional<Subject> subject = subject(filter, numbers, problems);
+		Optional<Platform> platform = platform(filter, numbers, problems);
+		Optional<Subject> subject = platform.flatMap(carrier -> subject(filter, carrier, problems));
 		var statements = new ArrayList<Statement>();
 		var ids = new HashSet<String>();
 		for (Requirement requirement : filter.getRequirements()) {
@@ -81,7 +93,12 @@ public final class FilterQuestion {
 				problems.add(new InputProblem(id, e.describe()));
 			}
 		}
-		return new FilterQuestion(filter, numbers, subject, statements, problems);
+		return new FilterQuestion(filter, numbers, platform, subject, statements, problems);
+	}
+
+	/** Structure and formats; nothing when the filter states none or they make no sense. */
+	public Optional<Arithmetic> arithmetic() {
+		return platform.flatMap(Platform::arithmetic);
 	}
 
 	/** Name of the filter. */
@@ -111,15 +128,33 @@ public final class FilterQuestion {
 	 *             when cancelled
 	 */
 	public FilterEvidence answer(Effort effort) {
-		var evidence = new ArrayList<RequirementEvidence>();
+		return answer(subject, problems, effort);
+	}
+
+	/**
+	 * Proves or disproves the same statements of other coefficients, as if they were stored in the filter: they are rounded to the
+	 * coefficient format where there is one. The hash of the evidence is empty.
+	 *
+	 * @param stored
+	 *            in place of the filter's own
+	 */
+	public FilterEvidence answerFor(ExactTaps stored, Effort effort) {
 		var found = new ArrayList<>(problems);
+		Optional<Subject> other = platform.flatMap(carrier -> carry(carrier, stored, found));
+		FilterEvidence evidence = answer(other, found, effort);
+		return new FilterEvidence(name, "", evidence.requirements(), evidence.problems());
+	}
+
+	private FilterEvidence answer(Optional<Subject> of, List<InputProblem> known, Effort effort) {
+		var evidence = new ArrayList<RequirementEvidence>();
+		var found = new ArrayList<>(known);
 		for (Statement statement : statements) {
 			effort.progress().checkCancelled();
-			if (subject.isEmpty()) {
+			if (of.isEmpty()) {
 				evidence.add(statement.evidence(UNKNOWN));
 			} else {
 				try {
-					evidence.add(statement.evidence(statement.claim().prove(subject.get(), effort)));
+					evidence.add(statement.evidence(statement.claim().prove(of.get(), effort)));
 				} catch (IllegalArgumentException e) {
 					found.add(new InputProblem(statement.id(), e.getMessage()));
 				}
@@ -128,24 +163,37 @@ public final class FilterQuestion {
 		return new FilterEvidence(name, hash, evidence, found);
 	}
 
-	private static Optional<Subject> subject(Filter filter, Numbers numbers, List<InputProblem> problems) {
+	private static Optional<Platform> platform(Filter filter, Numbers numbers, List<InputProblem> problems) {
 		try {
 			double rate = numbers.get(filter, ModelPackage.Literals.FILTER__SAMPLE_RATE);
-			if (filter.getCoefficients() == null) {
-				return Optional.empty();
-			}
-			ExactTaps stored = FilterNumbers.stored(filter.getCoefficients());
-			if (filter.getArithmetic() == null) {
-				return Optional.of(new Subject(stored, rate));
-			}
-			Arithmetic arithmetic = FilterNumbers.arithmetic(filter.getArithmetic(), numbers);
-			return Optional.of(new Subject(FilterNumbers.shipped(stored, arithmetic), rate, Optional.of(arithmetic)));
+			Optional<Arithmetic> arithmetic = filter.getArithmetic() == null ? Optional.empty()
+					: Optional.of(FilterNumbers.arithmetic(filter.getArithmetic(), numbers));
+			return Optional.of(new Platform(rate, arithmetic));
 		} catch (InputException e) {
 			problems.add(new InputProblem("", e.describe()));
+			return Optional.empty();
+		}
+	}
+
+	private static Optional<Subject> subject(Filter filter, Platform platform, List<InputProblem> problems) {
+		if (filter.getCoefficients() == null) {
+			return Optional.empty();
+		}
+		try {
+			return carry(platform, FilterNumbers.stored(filter.getCoefficients()), problems);
+		} catch (InputException e) {
+			problems.add(new InputProblem("", e.describe()));
+			return Optional.empty();
+		}
+	}
+
+	private static Optional<Subject> carry(Platform platform, ExactTaps stored, List<InputProblem> problems) {
+		try {
+			return Optional.of(platform.carry(stored));
 		} catch (IllegalArgumentException e) {
 			problems.add(new InputProblem("", e.getMessage()));
+			return Optional.empty();
 		}
-		return Optional.empty();
 	}
 
 	private static String hash(Filter filter, Map<String, Quantity> parameters) {

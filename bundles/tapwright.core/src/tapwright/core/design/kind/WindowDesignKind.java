@@ -1,13 +1,13 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.core.design.kind;
 
-import java.util.Comparator;
 import java.util.List;
 import java.util.OptionalDouble;
 
 import tapwright.core.InputException;
 import tapwright.core.design.DesignInput;
 import tapwright.core.design.DesignKind;
+import tapwright.core.design.ImpliedBands;
 import tapwright.dsp.design.Band;
 import tapwright.dsp.design.window.CommonWindow;
 import tapwright.dsp.design.window.DolphChebyshevWindow;
@@ -39,7 +39,7 @@ public final class WindowDesignKind implements DesignKind<WindowDesign> {
 	private static Window window(WindowDesign design, List<Band> bands, DesignInput input) throws InputException {
 		OptionalDouble parameter = input.numbers().find(design, Literals.WINDOW_DESIGN__PARAMETER);
 		if (design.getWindow() == tapwright.model.WindowKind.KAISER && parameter.isEmpty()) {
-			return new KaiserWindow(KaiserEstimate.beta(attenuation(bands)));
+			return new KaiserWindow(KaiserEstimate.beta(ImpliedBands.attenuation(bands)));
 		}
 		return switch (design.getWindow()) {
 		case KAISER -> new KaiserWindow(needed(parameter));
@@ -58,12 +58,5 @@ public final class WindowDesignKind implements DesignKind<WindowDesign> {
 
 	private static double needed(OptionalDouble parameter) throws InputException {
 		return parameter.orElseThrow(() -> new InputException("parameter", "is missing; this window has a shape parameter"));
-	}
-
-	// The smallest tolerance of all bands rules: a window gives the same ripple at every edge.
-	private static double attenuation(List<Band> bands) {
-		double ripple = bands.stream().map(band -> 1 / Math.max(band.weightFrom(), band.weightTo()))
-				.min(Comparator.naturalOrder()).orElseThrow();
-		return -20 * Math.log10(ripple);
 	}
 }
