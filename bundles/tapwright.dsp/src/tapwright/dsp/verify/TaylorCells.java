@@ -12,12 +12,13 @@ import tapwright.dsp.response.Fft;
  * thread: loaded again for every filter.
  * <p>
  * Cell j has its centre at j / M cycles per sample and the local variable s, -1 &lt;= s &lt;= 1, at (j + s/2) / M. With symmetric
- * coefficients a cell's polynomial is the real amplitude (up to sign), otherwise the square of the magnitude.
+ * coefficients a cell's polynomial is the real amplitude A of {@link tapwright.dsp.design.LinearPhaseType}, otherwise the square of
+ * the magnitude.
  */
-final class TaylorCells {
+public final class TaylorCells {
 
 	/** Number of Taylor coefficients. */
-	static final int TERMS = 12;
+	public static final int TERMS = 12;
 	/** Number of coefficients of a squared magnitude. */
 	static final int SQUARE_TERMS = 2 * TERMS - 1;
 
@@ -49,7 +50,7 @@ final class TaylorCells {
 	private final double[] norms = new double[TERMS + 1];
 
 	/** Twice the number of cells M: the number of cells around the whole circle. */
-	int size() {
+	public int size() {
 		return size;
 	}
 
@@ -59,7 +60,7 @@ final class TaylorCells {
 	}
 
 	/** Bound on the error of the magnitude anywhere in a cell, rounding of the polynomial itself not counted. */
-	double error() {
+	public double error() {
 		return error;
 	}
 
@@ -81,7 +82,7 @@ final class TaylorCells {
 	 * @param symmetry
 	 *            the exact symmetry of the true coefficients
 	 */
-	void load(double[] taps, Symmetry symmetry) {
+	public void load(double[] taps, Symmetry symmetry) {
 		this.symmetry = symmetry;
 		int n = taps.length;
 		halfIndex = n % 2 == 0;
@@ -192,7 +193,7 @@ final class TaylorCells {
 	}
 
 	/** Writes the polynomial of a cell, lowest power first; returns the number of coefficients. */
-	int polynomial(int cell, double[] target) {
+	public int polynomial(int cell, double[] target) {
 		int a = fft.position(cell);
 		int b = fft.position(-cell & size - 1);
 		if (symmetry == Symmetry.NONE) {

@@ -105,11 +105,11 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 		double[] h = type.taps(Recovery.coefficients(outcome.approximation(), unknowns));
 		progress.checkCancelled();
 		Reference reference = outcome.reference();
-		return new Solved(proven(type, h, reference.frequencies(new Target(type, bands, unknowns)), reference.band()), reference);
+		return new Solved(proven(h, reference.frequencies(new Target(type, bands, unknowns)), reference.band()), reference);
 	}
 
-	private EquirippleSolution proven(LinearPhaseType type, double[] h, double[] extremes, int[] band) throws DesignException {
-		WeightedError error = new WeightedError(type, h, bands);
+	private EquirippleSolution proven(double[] h, double[] extremes, int[] band) throws DesignException {
+		WeightedError error = new WeightedError(symmetry, h, bands);
 		double upper = error.largest(tolerance / 8).hi();
 		double lower = error.leastAlternating(extremes, band);
 		double wanted = 0;

@@ -4,8 +4,9 @@ package tapwright.dsp.design.equiripple;
 import java.util.List;
 
 import tapwright.dsp.design.Band;
-import tapwright.dsp.design.LinearPhaseType;
 import tapwright.dsp.exact.Enclosure;
+import tapwright.dsp.exact.Symmetry;
+import tapwright.dsp.verify.TaylorCells;
 
 /**
  * Proven statements on the weighted error W (A - D) of exact coefficients in bands. In a cell the error is a polynomial in s, the
@@ -15,15 +16,21 @@ import tapwright.dsp.exact.Enclosure;
 final class WeightedError {
 
 	private static final double U = 0x1p-53;
-	private static final int TERMS = AmplitudeCells.ORDERS + 1;
+	private static final int TERMS = TaylorCells.TERMS + 1;
 	private static final int HALVINGS = 40;
 
-	private final AmplitudeCells cells;
+	private final TaylorCells cells = new TaylorCells();
 	private final List<Band> bands;
+	private final double[] amplitude = new double[TaylorCells.TERMS];
 
-	/** For the filter whose coefficients are exactly these doubles. */
-	WeightedError(LinearPhaseType type, double[] taps, List<Band> bands) {
-		cells = new AmplitudeCells(type, taps);
+	/**
+	 * For the filter whose coefficients are exactly these doubles.
+	 *
+	 * @param taps
+	 *            exactly symmetric as told
+	 */
+	WeightedError(Symmetry symmetry, double[] taps, List<Band> bands) {
+		cells.load(taps, symmetry);
 		this.bands = bands;
 	}
 
@@ -80,18 +87,19 @@ final class WeightedError {
 	double peakBetween(double from, double to) {
 		double peak = 0;
 		for (int j = cellOf(from); j <= cellOf(to); j++) {
-			peak = Math.max(peak, Math.abs(cells.taylor(0, j)));
+			cells.polynomial(j, amplitude);
+			peak = Math.max(peak, Math.abs(amplitude[0]));
 		}
 		return peak;
 	}
 
 	private int cellOf(double frequency) {
-		return (int) Math.rint(frequency * cells.perCycle());
+		return (int) Math.rint(frequency * cells.size());
 	}
 
 	// Exact: M is a power of two, and the difference of the product and its nearest whole number is a double.
 	private double within(double frequency, int j) {
-		return 2 * (frequency * cells.perCycle() - j);
+		return 2 * (frequency * cells.size() - j);
 	}
 
 	/**
@@ -100,16 +108,17 @@ final class WeightedError {
 	 * @return how far the polynomial and its later evaluation can be off
 	 */
 	private double load(Band band, int j, double[] e) {
-		double centre = (double) j / cells.perCycle();
-		double stretch = 0.5 / cells.perCycle() / (band.to() - band.from());
+		double centre = (double) j / cells.size();
+		double stretch = 0.5 / cells.size() / (band.to() - band.from());
 		double d0 = band.desired(centre);
 		double d1 = (band.desiredTo() - band.desiredFrom()) * stretch;
 		double w0 = band.weight(centre);
 		double w1 = (band.weightTo() - band.weightFrom()) * stretch;
+		cells.polynomial(j, amplitude);
 		double before = 0;
 		double size = Math.abs(d0) + Math.abs(d1);
 		for (int m = 0; m < TERMS; m++) {
-			double p = m < AmplitudeCells.ORDERS ? cells.taylor(m, j) : 0;
+			double p = m < TaylorCells.TERMS ? amplitude[m] : 0;
 			size += Math.scalb(Math.abs(p), m);
 			p -= m == 0 ? d0 : m == 1 ? d1 : 0;
 			e[m] = w0 * p + w1 * before;
