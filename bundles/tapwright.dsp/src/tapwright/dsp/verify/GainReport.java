@@ -34,7 +34,7 @@ final class GainReport {
 		double low = limit + distance.lo() - slack;
 		double high = limit + distance.hi() + slack;
 		boolean exact = low == high && distance.lo() == 0;
-		return new Proof(verdict, place, exact ? Enclosure.of(limit) : new Enclosure(Math.nextDown(low), Math.nextUp(high)), limit,
+		return new Proof(verdict, place, exact ? Enclosure.of(limit) : new Enclosure(Math.nextDown(low), Double.isInfinite(high) ? high : Math.nextUp(high)), limit,
 				sure, note);
 	}
 
