@@ -1,0 +1,23 @@
+// SPDX-License-Identifier: EPL-2.0
+package tapwright.core.remedy;
+
+import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EStructuralFeature;
+
+/**
+ * A new value of one feature. An editor turns it into a command, everyone else applies it.
+ *
+ * @param owner
+ *            object of the filter that the remedy was asked for
+ * @param feature
+ *            single-valued feature of the owner
+ * @param value
+ *            new value
+ */
+public record Edit(EObject owner, EStructuralFeature feature, Object value) {
+
+	/** Sets the value; on the thread that owns the filter. */
+	public void apply() {
+		owner.eSet(feature, value);
+	}
+}
