@@ -5,7 +5,9 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
+import tapwright.core.verify.kind.CostKinds;
 import tapwright.core.verify.kind.GainKind;
+import tapwright.core.verify.kind.TimeKinds;
 import tapwright.model.Requirement;
 
 /** Finds the kind that a requirement is of. A new kind is added here and nowhere else. */
@@ -14,12 +16,16 @@ public final class RequirementKinds {
 	private static final Map<Class<?>, RequirementKind<?>> KINDS = new LinkedHashMap<>();
 
 	static {
-		for (RequirementKind<?> kind : List.of(new GainKind())) {
-			KINDS.put(kind.type(), kind);
-		}
+		register(List.of(new GainKind()));
+		register(TimeKinds.ALL);
+		register(CostKinds.ALL);
 	}
 
 	private RequirementKinds() {
+	}
+
+	private static void register(List<RequirementKind<?>> kinds) {
+		kinds.forEach(kind -> KINDS.put(kind.type(), kind));
 	}
 
 	/** The kind of a requirement. */

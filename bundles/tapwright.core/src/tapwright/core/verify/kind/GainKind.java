@@ -64,7 +64,7 @@ public final class GainKind implements RequirementKind<GainRequirement> {
 		Breakpoint last = points.getLast();
 		String band = first.frequency() == last.frequency() ? "at " + Words.exactly(first.frequency(), "Hz")
 				: Words.band(first.frequency(), last.frequency());
-		return "gain " + band + " " + (gain.getPoints().isEmpty() ? limits(first) : line(gain, first, last))
+		return "gain " + band + " " + (gain.getPoints().isEmpty() ? Limits.words(first.lower(), first.upper(), "dB") : line(gain, first, last))
 				+ relative(gain, numbers);
 	}
 
@@ -76,20 +76,6 @@ public final class GainKind implements RequirementKind<GainRequirement> {
 	@Override
 	public String placeUnit() {
 		return "Hz";
-	}
-
-	private static String limits(Breakpoint point) {
-		if (point.lower() == point.upper()) {
-			return "exactly " + Words.exactly(point.upper(), "dB");
-		}
-		if (point.lower() == NO_LOWER) {
-			return "at most " + Words.exactly(point.upper(), "dB");
-		}
-		if (point.upper() == NO_UPPER) {
-			return "at least " + Words.exactly(point.lower(), "dB");
-		}
-		return point.lower() == -point.upper() ? "within ±" + Words.exactly(point.upper(), "dB")
-				: "between " + Words.exactly(point.lower(), "1") + " and " + Words.exactly(point.upper(), "dB");
 	}
 
 	private static String line(GainRequirement gain, Breakpoint first, Breakpoint last) {
