@@ -117,7 +117,7 @@ class SampleWorkspaceTest {
 		BigDecimal square = angle.multiply(angle, DIGITS);
 		for (int n = first + 1; n < 80; n += 2) {
 			term = term.multiply(square, DIGITS).divide(BigDecimal.valueOf(-(long) n * (n + 1)), DIGITS);
-			sum = sum.add(term);
+			sum = sum.add(term, DIGITS);
 		}
 		return sum;
 	}
@@ -129,7 +129,7 @@ class SampleWorkspaceTest {
 		BigDecimal sum = x;
 		for (int n = 3; n < 120; n += 2) {
 			term = term.multiply(square, DIGITS);
-			sum = sum.add(term.divide(BigDecimal.valueOf(n), DIGITS));
+			sum = sum.add(term.divide(BigDecimal.valueOf(n), DIGITS), DIGITS);
 		}
 		return sum;
 	}
