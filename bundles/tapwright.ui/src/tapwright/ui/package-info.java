@@ -1,4 +1,3 @@
 // SPDX-License-Identifier: EPL-2.0
-
-/** Editors, views and wizards of the window. */
+/** The window's parts for portfolios and filters: editor, views, wizards. Models are changed by commands alone. */
 package tapwright.ui;

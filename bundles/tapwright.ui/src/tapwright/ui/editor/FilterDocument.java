@@ -1,0 +1,133 @@
+// SPDX-License-Identifier: EPL-2.0
+package tapwright.ui.editor;
+
+import java.io.IOException;
+import java.io.InputStream;
+
+import org.eclipse.core.resources.IFile;
+import org.eclipse.core.resources.IResource;
+import org.eclipse.core.resources.IWorkspace;
+import org.eclipse.core.resources.ResourcesPlugin;
+import org.eclipse.core.runtime.CoreException;
+import org.eclipse.core.runtime.IProgressMonitor;
+import org.eclipse.core.runtime.Status;
+import org.eclipse.emf.common.command.BasicCommandStack;
+import org.eclipse.emf.common.util.URI;
+import org.eclipse.emf.edit.domain.AdapterFactoryEditingDomain;
+import org.eclipse.emf.edit.domain.EditingDomain;
+
+import tapwright.core.quantity.Expression;
+import tapwright.model.Filter;
+import tapwright.model.io.AtomicFiles;
+import tapwright.model.io.ModelFileException;
+import tapwright.model.io.ModelResource;
+import tapwright.model.provider.ModelItemProviderAdapterFactory;
+import tapwright.ui.field.ModelAccess;
+import tapwright.workspace.PortfolioProject;
+
+/** A filter file that is being edited: its content, its command stack, and what is on disk. UI thread. */
+public final class FilterDocument implements ModelAccess {
+
+	private final IFile file;
+	private final ModelItemProviderAdapterFactory adapterFactory = new ModelItemProviderAdapterFactory();
+	private final BasicCommandStack commandStack = new BasicCommandStack();
+	private final AdapterFactoryEditingDomain domain = new AdapterFactoryEditingDomain(adapterFactory, commandStack);
+	private final ModelResource resource;
+	private long stamp = IResource.NULL_STAMP;
+
+	/** A document without content; {@link #load()} fills it. */
+	public FilterDocument(IFile file) {
+		this.file = file;
+		this.resource = new ModelResource(URI.createPlatformResourceURI(file.getFullPath().toString(), true));
+		domain.getResourceSet().getResources().add(resource);
+	}
+
+	/**
+	 * Reads the file in place of the present content and forgets all commands.
+	 *
+	 * @throws ModelFileException
+	 *             with place and reason, when the content makes no sense
+	 * @throws CoreException
+	 *             when the file cannot be read
+	 */
+	public void load() throws ModelFileException, CoreException, IOException {
+		byte[] content;
+		try (InputStream stream = file.getContents(true)) {
+			content = stream.readAllBytes();
+		}
+		stamp = file.getModificationStamp();
+		resource.read(content, file.getName());
+		if (!(resource.root() instanceof Filter filter)) {
+			String found = resource.root().eClass().getName();
+			resource.unload();
+			throw new ModelFileException(file.getName(), 1, 1, "holds a " + found + ", but a Filter is expected");
+		}
+		if (filter.getName() == null) {
+			filter.setName(file.getFullPath().removeFileExtension().lastSegment()); // as the verification does
+		}
+		commandStack.flush();
+	}
+
+	/**
+	 * Writes the content, whole or not at all, and lets the workspace know.
+	 *
+	 * @throws CoreException
+	 *             when it cannot be written; the file is then as it was
+	 */
+	public void save(IProgressMonitor monitor) throws CoreException, IOException {
+		byte[] content = resource.toBytes();
+		ResourcesPlugin.getWorkspace().run(inner -> {
+			try {
+				AtomicFiles.write(file.getLocation().toPath(), content);
+			} catch (IOException e) {
+				throw new CoreException(
+						Status.error(file.getName() + " could not be written: " + e.getMessage(), e));
+			}
+			file.refreshLocal(IResource.DEPTH_ZERO, inner);
+			stamp = file.getModificationStamp();
+		}, ResourcesPlugin.getWorkspace().getRuleFactory().refreshRule(file), IWorkspace.AVOID_UPDATE,
+				monitor);
+		commandStack.saveIsDone();
+	}
+
+	/** Whether somebody else wrote the file since it was last read or written here. */
+	public boolean isChangedOutside() {
+		return file.exists() && file.getModificationStamp() != stamp;
+	}
+
+	/** Keeps the present content in face of what is on disk; it counts as seen. */
+	public void keep() {
+		stamp = file.getModificationStamp();
+	}
+
+	/** The filter. */
+	public Filter filter() {
+		return (Filter) resource.root();
+	}
+
+	/** The file. */
+	public IFile file() {
+		return file;
+	}
+
+	/** What makes undo, redo and the dirty mark. */
+	public BasicCommandStack commandStack() {
+		return commandStack;
+	}
+
+	@Override
+	public EditingDomain domain() {
+		return domain;
+	}
+
+	@Override
+	public Expression.Names parameters() {
+		return PortfolioProject.of(file).map(PortfolioProject::parameters).orElse(Expression.Names.NONE);
+	}
+
+	/** Lets go of adapters. */
+	public void dispose() {
+		commandStack.flush();
+		adapterFactory.dispose();
+	}
+}
