@@ -38,6 +38,8 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	public static final double STANDARD = 1e-4;
 
 	private static final int MOST_BANDS = 256;
+	/** A larger excess has other causes than rounding errors in the proof. */
+	private static final double MISSED = 1e-5;
 	/** Beyond this excess the answer is not worth having. */
 	private static final double USELESS = 0.05;
 	/** Gains between bands above this multiple of the largest desired one are mentioned. */
@@ -95,11 +97,23 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	record Solved(EquirippleSolution solution, Reference reference) {
 	}
 
-	/** The same from the reference of another length, or from the usual start when there is none. */
+	/**
+	 * The same from the reference of another length, or from the usual start when there is none. Should the proof find a larger error
+	 * than the exchange did, an extremum was missed; then it is done once more with a denser search.
+	 */
 	Solved solve(Progress progress, Reference warm) throws DesignException {
+		Solved solved = attempt(progress, warm, false);
+		if (solved.solution.excess() > Math.max(tolerance, MISSED)) {
+			Solved thorough = attempt(progress, null, true);
+			return thorough.solution.excess() < solved.solution.excess() ? thorough : solved;
+		}
+		return solved;
+	}
+
+	private Solved attempt(Progress progress, Reference warm, boolean thorough) throws DesignException {
 		LinearPhaseType type = LinearPhaseType.of(taps, symmetry);
 		int unknowns = type.unknowns(taps);
-		Exchange exchange = new Exchange(type, bands, progress);
+		Exchange exchange = new Exchange(type, bands, thorough, progress);
 		Exchange.Outcome outcome = warm == null ? exchange.solve(unknowns, tolerance / 4)
 				: exchange.solve(unknowns, tolerance / 4, warm);
 		double[] h = type.taps(Recovery.coefficients(outcome.approximation(), unknowns));

@@ -22,6 +22,13 @@ final class Exchange {
 	private static final int PATIENCE = 20;
 	/** When errors differ by less than this, refining the extrema pays. */
 	private static final double CLOSE = 0.05;
+	/** While they differ by more than this, a coarse search for them does. */
+	private static final double FAR = 0.5;
+	/** Tolerances below this need extrema refined twice. */
+	private static final double TIGHT = 1e-6;
+	private static final int COARSE_SAMPLES = 4;
+	private static final int USUAL_SAMPLES = 7;
+	private static final int THOROUGH_SAMPLES = 24;
 	/** What the proof is left to judge when no more progress is made. */
 	private static final double ACCEPTABLE = 1.5;
 	/** A levelled error below this part of the largest weighted desired value drowns in rounding errors. */
@@ -29,11 +36,19 @@ final class Exchange {
 
 	private final LinearPhaseType type;
 	private final List<Band> bands;
+	private final boolean thorough;
 	private final Progress progress;
 
-	Exchange(LinearPhaseType type, List<Band> bands, Progress progress) {
+	/**
+	 * An exchange.
+	 *
+	 * @param thorough
+	 *            whether to search extrema so densely that hardly any can be missed
+	 */
+	Exchange(LinearPhaseType type, List<Band> bands, boolean thorough, Progress progress) {
 		this.type = type;
 		this.bands = bands;
+		this.thorough = thorough;
 		this.progress = progress;
 	}
 
@@ -50,25 +65,23 @@ final class Exchange {
 
 	/**
 	 * Solves for {@code unknowns} coefficients until the largest error found exceeds the levelled one by at most the tolerance,
-	 * relatively.
+	 * relatively. A larger problem starts from the rough solution of one half as large.
 	 */
 	Outcome solve(int unknowns, double tolerance) throws DesignException {
-		return run(unknowns, tolerance, start(unknowns));
-	}
-
-	/** The same from a reference that is known to be good, with any number of points. */
-	Outcome solve(int unknowns, double tolerance, Reference warm) throws DesignException {
-		return run(unknowns, tolerance, warm.scaled(new Target(type, bands, unknowns), unknowns + 1));
-	}
-
-	private Reference start(int unknowns) throws DesignException {
+		if (unknowns > SMALL) {
+			return solve(unknowns, tolerance, solve((unknowns + 1) / 2, LOOSE).reference);
+		}
 		Target target = new Target(type, bands, unknowns);
-		return unknowns <= SMALL ? Reference.spread(target, unknowns + 1)
-				: solve((unknowns + 1) / 2, LOOSE).reference().scaled(target, unknowns + 1);
+		return run(target, unknowns, tolerance, Reference.spread(target, unknowns + 1));
 	}
 
-	private Outcome run(int unknowns, double tolerance, Reference start) throws DesignException {
+	/** The same from the reference of a solution with another number of coefficients. */
+	Outcome solve(int unknowns, double tolerance, Reference other) throws DesignException {
 		Target target = new Target(type, bands, unknowns);
+		return run(target, unknowns, tolerance, other.scaled(target, unknowns + 1));
+	}
+
+	private Outcome run(Target target, int unknowns, double tolerance, Reference start) throws DesignException {
 		Reference reference = start;
 		Outcome best = null;
 		int sinceBest = 0;
@@ -77,8 +90,9 @@ final class Exchange {
 			progress.checkCancelled();
 			Interpolant approximation = levelled(target, reference);
 			double level = Math.abs(approximation.error());
-			int polish = spread > CLOSE ? 0 : tolerance < 1e-6 ? 2 : 1;
-			Peaks peaks = new Extrema(target, approximation, unknowns, polish).find(reference);
+			int polish = spread > CLOSE ? 0 : tolerance < TIGHT ? 2 : 1;
+			int density = thorough ? THOROUGH_SAMPLES : spread > FAR ? COARSE_SAMPLES : USUAL_SAMPLES;
+			Peaks peaks = new Extrema(target, approximation, unknowns, density, polish).find(reference);
 			double largest = peaks.largest();
 			spread = (largest - level) / largest;
 			if (!(spread > -CLOSE)) {

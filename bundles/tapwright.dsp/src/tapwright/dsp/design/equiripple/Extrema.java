@@ -10,7 +10,6 @@ import java.util.Arrays;
  */
 final class Extrema {
 
-	private static final int STEPS_PER_GAP = 7;
 	/** A refined parabola is this part as wide as the one before. */
 	private static final double NARROWING = 1.0 / 16;
 	/** Parts of a step at which samples near a band's edges lie too: a sloped target can have an extremum just beside its edge. */
@@ -19,6 +18,7 @@ final class Extrema {
 	private final Target target;
 	private final Interpolant approximation;
 	private final int unknowns;
+	private final int stepsPerGap;
 	private final int polish;
 
 	private double[] angle;
@@ -32,13 +32,16 @@ final class Extrema {
 	/**
 	 * A search.
 	 *
+	 * @param stepsPerGap
+	 *            samples between neighbouring points of the reference, plus one
 	 * @param polish
 	 *            how many more times each extremum is refined
 	 */
-	Extrema(Target target, Interpolant approximation, int unknowns, int polish) {
+	Extrema(Target target, Interpolant approximation, int unknowns, int stepsPerGap, int polish) {
 		this.target = target;
 		this.approximation = approximation;
 		this.unknowns = unknowns;
+		this.stepsPerGap = stepsPerGap;
 		this.polish = polish;
 	}
 
@@ -128,7 +131,7 @@ final class Extrema {
 
 	private void sample(Reference reference) {
 		int n = reference.x().length;
-		x = new double[STEPS_PER_GAP * (n + 3 * target.bands())];
+		x = new double[stepsPerGap * (n + 3 * target.bands())];
 		angle = new double[x.length];
 		band = new int[x.length];
 		count = 0;
@@ -150,7 +153,7 @@ final class Extrema {
 		}
 		double start = angle[count - 1];
 		double end = Math.acos(to);
-		int steps = STEPS_PER_GAP * (int) Math.max(1, Math.rint((end - start) * unknowns / Math.PI));
+		int steps = stepsPerGap * (int) Math.max(1, Math.rint((end - start) * unknowns / Math.PI));
 		double step = (end - start) / steps;
 		double turnCos = Math.cos(step);
 		double turnSin = Math.sin(step);

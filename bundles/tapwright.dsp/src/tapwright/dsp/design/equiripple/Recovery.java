@@ -10,7 +10,7 @@ package tapwright.dsp.design.equiripple;
 final class Recovery {
 
 	private static final int ROUNDS = 8;
-	private static final int STEPS_PER_START = 16;
+	private static final int STEPS_PER_START = 32;
 
 	private Recovery() {
 	}
