@@ -55,7 +55,8 @@ public final class Rationals {
 
 	/** The smallest double that is not below the rational. */
 	public static double above(BigFraction value) {
-		return -below(value.negate());
+		// Adding zero turns -0.0 into 0.0.
+		return -below(value.negate()) + 0.0;
 	}
 
 	/**

@@ -1,6 +1,10 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.dsp.verify;
 
+import org.apache.commons.math3.fraction.BigFraction;
+
+import tapwright.dsp.exact.Rationals;
+
 /** Checks on frequencies that several kinds of requirement share. */
 final class Frequencies {
 
@@ -29,5 +33,10 @@ final class Frequencies {
 			throw new IllegalArgumentException(what + " is " + frequency + " Hz, above half the sample rate of " + sampleRate
 					+ " Hz; lower it or raise the sample rate");
 		}
+	}
+
+	/** The double nearest to a frequency in cycles per sample, in hertz. */
+	static double hertz(BigFraction turns, double sampleRate) {
+		return Rationals.nearest(turns.multiply(Rationals.exact(sampleRate)));
 	}
 }

@@ -19,6 +19,7 @@ final class GainProof {
 	/** Precisions for what lies beside places where the limit is touched exactly. */
 	private static final int[] TOUCH_PRECISIONS = { 128, 512, 2048 };
 	private static final int SPARE_BITS = 48;
+	private static final double DECIBELS_PER_BIT = 20 * Math.log10(2);
 
 	private final List<LimitLine> lines;
 	private final GainReference reference;
@@ -144,13 +145,13 @@ final class GainProof {
 		return new ExactSearch(fix, split, sampleRate, logUnit, patience);
 	}
 
+	// Loads that are far from 1 need more bits to be seen well.
 	private int precision(GainUnit unit, int gap) {
-		double largest = Math.abs(unit.log2());
+		double largest = 0;
 		for (LimitLine line : lines) {
-			if (!line.isNothing()) {
-				for (double db : new double[] { line.fromDb(), line.toDb() }) {
-					largest = Math.max(largest, Math.abs(db / 20 / Math.log10(2) + unit.log2()));
-				}
+			for (double db : new double[] { line.fromDb(), line.toDb() }) {
+				double level = line.isNothing() ? 0 : db / DECIBELS_PER_BIT;
+				largest = Math.max(largest, Math.abs(level + unit.log2()));
 			}
 		}
 		return gap + SPARE_BITS + 2 * (int) Math.ceil(largest) + 2 * (32 - Integer.numberOfLeadingZeros(taps.length()));

@@ -17,6 +17,7 @@ final class QuickGain {
 	private static final double WIDE = 1 + 1.1e-7;
 	/** A gain this far below a lower limit is as good as zero. */
 	private static final double HOPELESS = 1e9;
+	private static final double LOG10_OF_2 = StrictMath.log10(2);
 	private static final double LARGEST_FACTOR = 1e140;
 
 	private final QuickSearch search;
@@ -25,6 +26,7 @@ final class QuickGain {
 	private final Subject subject;
 	private final double[] factors;
 	private boolean possible = true;
+	private int exponent;
 	private double doubt;
 	private double slack;
 
@@ -45,17 +47,18 @@ final class QuickGain {
 		for (int k = 0; k < factors.length; k++) {
 			LimitLine line = lines.get(k);
 			double level = -line.fromDb() / 20;
-			double factor = StrictMath.pow(10, level);
 			if (line.isConstant()) {
-				// The power errs by one unit in the last place, the exponent by half a unit of its own.
-				limitDoubt = Math.max(limitDoubt, (4 + 2 * Math.abs(level) * 2.303) * 0x1p-53);
-				factors[k] = factor * unit;
+				// The power errs by one unit in the last place, the exponent by a few units of its terms.
+				double shift = exponent * LOG10_OF_2;
+				limitDoubt = Math.max(limitDoubt, (4 + 8 * (Math.abs(level) + Math.abs(shift))) * 0x1p-53);
+				factors[k] = StrictMath.pow(10, level + shift) * unit;
 			} else {
 				limitDoubt = Math.max(limitDoubt, LocalSlope.doubt(line));
 				factors[k] = unit;
-				possible &= isComfortable(StrictMath.pow(10, -line.toDb() / 20));
+				possible &= exponent == 0 && isComfortable(StrictMath.pow(10, level))
+						&& isComfortable(StrictMath.pow(10, -line.toDb() / 20));
 			}
-			possible &= isComfortable(factor) && isComfortable(factors[k]);
+			possible &= isComfortable(factors[k]);
 		}
 		if (!possible) {
 			return Optional.empty();
@@ -90,13 +93,12 @@ final class QuickGain {
 		return factor > 1 / LARGEST_FACTOR && factor < LARGEST_FACTOR;
 	}
 
-	// What a scaled gain of 1 is worth, relative to what 0 dB stands for.
+	// What a scaled gain of 1 is worth, relative to what 0 dB stands for, but for a power of two.
 	private double unit() {
 		switch (reference) {
 			case GainReference.Absolute absolute -> {
-				int exponent = subject.taps().scaled().exponent();
-				possible = Math.abs(exponent) < 900;
-				return Math.scalb(1.0, exponent);
+				exponent = subject.taps().scaled().exponent();
+				return 1;
 			}
 			case GainReference.AtFrequency at -> {
 				return inverse(search.gainAt(at.frequency()));

@@ -138,6 +138,10 @@ final class QuickSearch {
 			seenNegative = false;
 			lineLoad = 0;
 			linePlace = line.from();
+			if (line.from() == line.to()) {
+				oneFrequency();
+				continue;
+			}
 			int size = cells.size();
 			double from = line.from() / sampleRate * size;
 			double to = line.to() / sampleRate * size;
@@ -160,6 +164,26 @@ final class QuickSearch {
 				} else {
 					visitPart(Math.max(lo, -1), Math.min(hi, 1), 0);
 				}
+			}
+		}
+	}
+
+	private void oneFrequency() {
+		Enclosure scaled = gainAt(line.from());
+		double low = scaled.lo() * gain;
+		double high = scaled.hi() * gain;
+		double load = line.upper() ? low : 1 / high;
+		double bound = line.upper() ? high : 1 / low;
+		if (load > best && open == null) {
+			best = load;
+			bestLine = line;
+			bestPlace = line.from();
+		}
+		if (bound > best) {
+			highest = Math.max(highest, bound);
+			if (open != null) {
+				BigFraction place = LimitLine.turns(line.from(), sampleRate);
+				open.add(new Stretch(line, place, place));
 			}
 		}
 	}

@@ -70,6 +70,14 @@ final class SplitTaps {
 	}
 
 	/**
+	 * The amplitude of symmetric or antisymmetric coefficients, E or O, around a frequency; see {@link #around}.
+	 */
+	LocalFunction amplitude(FixedPoint fix, BigFraction centre, BigFraction radius) {
+		Taylor taylor = taylor(fix, centre, radius);
+		return new LocalFunction(new IntervalPolynomial(fix, hasOdd ? taylor.odd : taylor.even), taylor.rest);
+	}
+
+	/**
 	 * |H|^2 around a frequency as a polynomial in s, -1 &lt;= s &lt;= 1, at frequency centre + s radius.
 	 *
 	 * @param centre
@@ -78,6 +86,21 @@ final class SplitTaps {
 	 *            cycles per sample, not negative
 	 */
 	LocalFunction around(FixedPoint fix, BigFraction centre, BigFraction radius) {
+		Taylor taylor = taylor(fix, centre, radius);
+		// |E| and |O| are at most 1, so squares err by at most 2 rest + rest^2 each.
+		BigInteger error = taylor.rest.multiply(BigInteger.valueOf(5));
+		if (!hasOdd) {
+			return new LocalFunction(IntervalPolynomial.square(fix, taylor.even), error);
+		}
+		IntervalPolynomial square = IntervalPolynomial.square(fix, taylor.odd);
+		return new LocalFunction(hasEven ? square.add(IntervalPolynomial.square(fix, taylor.even)) : square, error);
+	}
+
+	// Coefficients of E and O in s, with a bound on what each leaves out.
+	private record Taylor(Interval[] even, Interval[] odd, BigInteger rest) {
+	}
+
+	private Taylor taylor(FixedPoint fix, BigFraction centre, BigFraction radius) {
 		// x = pi radius 2^indexBits bounds v[k] times the radius in radians; the factor x^m/m! belongs to the m-th derivative.
 		Interval x = fix.shiftRight(fix.multiply(fix.of(radius), fix.pi()), -indexBits);
 		Interval factor = fix.exact(fix.one());
@@ -96,14 +119,7 @@ final class SplitTaps {
 			o[m] = fix.multiply(o[m], factor);
 			factor = fix.divide(fix.multiply(factor, x), m + 1);
 		}
-		// |E| and |O| are at most 1, so squares err by at most 2 rest + rest^2 each.
-		BigInteger error = rest.multiply(BigInteger.valueOf(5));
-		IntervalPolynomial square = hasOdd ? IntervalPolynomial.square(fix, o) : null;
-		if (hasEven || !hasOdd) {
-			IntervalPolynomial other = IntervalPolynomial.square(fix, e);
-			square = square == null ? other : square.add(other);
-		}
-		return new LocalFunction(square, error);
+		return new Taylor(e, o, rest);
 	}
 
 	// Derivatives m of E and O at the centre, divided by 2^(indexBits m - m), in the units of this class.

@@ -8,28 +8,35 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.ExactTaps;
 
 /**
- * Decides exactly what happens where |H|^2 equals a constant limit at a frequency with rational cosine.
+ * Decides exactly how a sum of cosines, r[0] + sum of 2 r[k] cos(kw), or of sines, sum of 2 r[k] sin(kw), behaves near an angle
+ * with rational cosine. |H|^2 is such a sum with r the autocorrelation of the coefficients.
  * <p>
- * With r[k] the autocorrelation of the integer coefficients, |H|^2 = unit^2 (r[0] + sum of 2 r[k] cos(kw)). At w0 = 0, pi/3, pi/2,
- * 2 pi/3 and pi the numbers 2 cos(k w0) are integers and 2 sin(k w0) are integers times 1 or sqrt(3), so all derivatives of the
- * distance to the limit are known exactly up to that positive factor. The first one that is not zero, d of order m, decides the
- * sign near w0 by Taylor's theorem with Lagrange's remainder: |distance - d x^m / m!| &lt;= R |x|^(m+1) / (m+1)! with R the sum of
- * 2 |r[k]| k^(m+1), so the sign is that of d x^m for |x| &lt; (m+1) |d| / R.
+ * At w0 = 0, pi/3, pi/2, 2 pi/3 and pi the numbers 2 cos(k w0) are integers and 2 sin(k w0) are integers times 1 or sqrt(3), so all
+ * derivatives are known exactly up to that positive factor. The first one that is not zero, d of order m, decides the sign of the
+ * difference from the value at w0 by Taylor's theorem with Lagrange's remainder: |difference - d x^m / m!| &lt;= R |x|^(m+1) / (m+1)!
+ * with R the sum of 2 |r[k]| k^(m+1), so the sign is that of d x^m for |x| &lt; (m+1) |d| / R.
  */
 final class Touch {
 
-	/** The frequencies, in twelfths of a cycle per sample. */
+	/** The angles, in twelfths of a turn. */
 	static final int[] TWELFTHS = { 0, 2, 3, 4, 6 };
 
 	private static final int[] TWO_COS = { 2, 0, 1, 0, -1, 0, -2, 0, -1, 0, 1, 0 };
 	private static final int[][] SINES = { { 0 }, {}, { 0, 1, 1, 0, -1, -1 }, { 0, 2, 0, -2 }, { 0, 1, -1 }, {}, { 0 } };
 
 	private final BigInteger[] correlation;
+	private final boolean ofSines;
 
-	/** Of the integer coefficients. */
-	Touch(ExactTaps taps) {
+	/** A sum of cosines or sines; without r[0] for sines. */
+	Touch(BigInteger[] r, boolean sines) {
+		this.correlation = r;
+		this.ofSines = sines;
+	}
+
+	/** The squared magnitude of a filter, in squared units of the coefficients. */
+	static Touch squareOf(ExactTaps taps) {
 		int n = taps.length();
-		correlation = new BigInteger[n];
+		BigInteger[] correlation = new BigInteger[n];
 		for (int k = 0; k < n; k++) {
 			BigInteger sum = BigInteger.ZERO;
 			for (int i = 0; i + k < n; i++) {
@@ -37,31 +44,32 @@ final class Touch {
 			}
 			correlation[k] = sum;
 		}
+		return new Touch(correlation, false);
 	}
 
-	/** |H|^2 over the squared unit, exactly. */
-	BigInteger square(int twelfth) {
-		BigInteger sum = correlation[0];
+	/** The value at an angle, exactly; for sines up to a positive factor. */
+	BigInteger value(int twelfth) {
+		BigInteger sum = ofSines ? BigInteger.ZERO : correlation[0];
 		for (int k = 1; k < correlation.length; k++) {
-			sum = sum.add(correlation[k].multiply(BigInteger.valueOf(TWO_COS[(int) ((long) k * twelfth % 12)])));
+			sum = sum.add(correlation[k].multiply(BigInteger.valueOf(derivative(0, k, twelfth))));
 		}
 		return sum;
 	}
 
 	/**
-	 * The sign of |H|^2 less its value at a frequency, near that frequency.
+	 * The sign of the sum less its value at an angle, near that angle.
 	 *
 	 * @param below
-	 *            sign at lower frequencies
+	 *            sign at smaller angles
 	 * @param above
-	 *            sign at higher frequencies
+	 *            sign at larger angles
 	 * @param radius
-	 *            distance in cycles per sample up to which the signs hold; infinite distance is null
+	 *            distance in turns up to which the signs hold; infinite distance is null
 	 */
 	record Near(int below, int above, BigFraction radius) {
 	}
 
-	/** Examines the surroundings of a frequency. */
+	/** Examines the surroundings of an angle. */
 	Near near(int twelfth) {
 		int n = correlation.length;
 		BigInteger[] weight = correlation.clone();
@@ -86,12 +94,13 @@ final class Touch {
 		return new Near(0, 0, null);
 	}
 
-	// The m-th derivative of 2 cos(k w) at w0 over k^m, and over sqrt(3) where sines have that factor.
-	private static int derivative(int m, int k, int twelfth) {
+	// The m-th derivative of 2 cos(k w) or 2 sin(k w) at w0 over k^m, and over sqrt(3) where sines have that factor.
+	private int derivative(int m, int k, int twelfth) {
 		int cos = TWO_COS[(int) ((long) k * twelfth % 12)];
 		int[] sines = SINES[twelfth];
 		int sin = sines[k % sines.length];
-		return switch (m & 3) {
+		// The sine is the third derivative of the cosine.
+		return switch (m + (ofSines ? 3 : 0) & 3) {
 			case 0 -> cos;
 			case 1 -> -sin;
 			case 2 -> -cos;

@@ -35,7 +35,7 @@ final class Touching {
 		List<LimitLine> rational = lines.stream().filter(line -> line.isConstant() && line.fromDb() % RATIONAL_DB == 0).toList();
 		Touching touching = new Touching(sampleRate);
 		if (!rational.isEmpty() && !(reference instanceof GainReference.LargestIn)) {
-			Touch touch = new Touch(taps);
+			Touch touch = Touch.squareOf(taps);
 			touching.unit(touch, reference, taps).ifPresent(unit -> rational.forEach(line -> touching.examine(touch, line, unit)));
 		}
 		return touching.kept.isEmpty() && touching.broken.isEmpty() ? Optional.empty() : Optional.of(touching);
@@ -49,7 +49,7 @@ final class Touching {
 		BigFraction twelfths = LimitLine.turns(at.frequency(), sampleRate).multiply(12);
 		for (int twelfth : Touch.TWELFTHS) {
 			if (twelfths.equals(new BigFraction(twelfth))) {
-				return Optional.of(new BigFraction(touch.square(twelfth)));
+				return Optional.of(new BigFraction(touch.value(twelfth)));
 			}
 		}
 		return Optional.empty();
@@ -62,7 +62,7 @@ final class Touching {
 		for (int twelfth : Touch.TWELFTHS) {
 			BigFraction place = new BigFraction(twelfth, 12);
 			if (place.compareTo(from) >= 0 && place.compareTo(to) <= 0
-					&& square.equals(new BigFraction(touch.square(twelfth)))) {
+					&& square.equals(new BigFraction(touch.value(twelfth)))) {
 				Touch.Near near = touch.near(twelfth);
 				int bad = line.upper() ? 1 : -1;
 				boolean below = place.compareTo(from) > 0 && near.below() == bad;
