@@ -26,6 +26,8 @@ import org.eclipse.ui.IWorkbenchWindow;
 import org.eclipse.ui.PartInitException;
 import org.eclipse.ui.PlatformUI;
 import org.eclipse.ui.ide.IDE;
+import org.eclipse.ui.navigator.CommonNavigator;
+import org.eclipse.ui.navigator.resources.ProjectExplorer;
 
 import tapwright.core.portfolio.PortfolioFolder;
 import tapwright.dsp.verify.Verdict;
@@ -112,6 +114,9 @@ final class FirstStart extends WorkspaceJob {
 		IWorkbenchPage page = window == null ? null : window.getActivePage();
 		if (page == null || page.getActiveEditor() != null) {
 			return; // the person has begun something already
+		}
+		if (page.findView(ProjectExplorer.VIEW_ID) instanceof CommonNavigator explorer) {
+			explorer.getCommonViewer().expandToLevel(portfolio.project(), 1);
 		}
 		List<IFile> wrong = new ArrayList<>(portfolio.evidence().stream()
 				.filter(found -> found.evidence().evidence().verdict() == Verdict.MISSED).map(PortfolioProject.FileEvidence::file)

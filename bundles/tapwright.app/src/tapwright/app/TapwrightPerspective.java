@@ -16,14 +16,19 @@ public final class TapwrightPerspective implements IPerspectiveFactory {
 	public static final String ID = "tapwright.app.perspective";
 
 
+	private static final String NEW_FILTER = "tapwright.ui.new.filter";
+	private static final String NEW_PORTFOLIO = "tapwright.ui.new.portfolio";
+
 	@Override
 	public void createInitialLayout(IPageLayout layout) {
 		layout.addView(ProjectExplorer.VIEW_ID, IPageLayout.LEFT, 0.24f, layout.getEditorArea());
-		IFolderLayout bottom = layout.createFolder("bottom", IPageLayout.BOTTOM, 0.7f, layout.getEditorArea());
+		IFolderLayout bottom = layout.createFolder("bottom", IPageLayout.BOTTOM, 0.72f, layout.getEditorArea());
 		bottom.addView(IPageLayout.ID_PROBLEM_VIEW);
 		bottom.addView(MarginBoard.ID);
 		bottom.addView(ResponseView.ID);
 		bottom.addPlaceholder(IPageLayout.ID_PROGRESS_VIEW);
+		layout.addNewWizardShortcut(NEW_PORTFOLIO);
+		layout.addNewWizardShortcut(NEW_FILTER);
 		for (String view : new String[] { ProjectExplorer.VIEW_ID, IPageLayout.ID_PROBLEM_VIEW, MarginBoard.ID, ResponseView.ID,
 				IPageLayout.ID_PROGRESS_VIEW }) {
 			layout.addShowViewShortcut(view);

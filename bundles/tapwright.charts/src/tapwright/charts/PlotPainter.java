@@ -16,7 +16,7 @@ final class PlotPainter {
 
 	private static final int HATCH_STEP = 9;
 	private static final int FAINT = 48;
-	private static final int STRONG = 110;
+	private static final int STRONG = 84;
 	private static final int MARK_SIZE = 5;
 
 	private final Chart chart;

@@ -34,6 +34,7 @@ public final class PlotView extends Composite {
 
 	// The workbench's style sheets would paint over the colours of the pictures.
 	private static final String WITHOUT_STYLE_SHEET = "org.eclipse.e4.ui.css.disabled";
+	private static final int VALUE_TICK_PIXELS = 30;
 	private static final LineStyle[] STYLES = { LineStyle.SOLID, LineStyle.DASH, LineStyle.DASHDOT, LineStyle.DOT,
 			LineStyle.DASHDOTDOT };
 
@@ -63,7 +64,7 @@ public final class PlotView extends Composite {
 		chart.getPlotArea().getControl().setData(WITHOUT_STYLE_SHEET, Boolean.TRUE);
 		chart.getTitle().setVisible(false);
 		chart.getLegend().setPosition(SWT.TOP);
-		GridDataFactory.fillDefaults().grab(true, true).hint(200, 120).applyTo(chart);
+		GridDataFactory.fillDefaults().grab(true, true).hint(200, 60).applyTo(chart);
 		readout = new Label(this, SWT.NONE);
 		readout.setData(WITHOUT_STYLE_SHEET, Boolean.TRUE);
 		GridDataFactory.fillDefaults().grab(true, false).indent(8, 0).applyTo(readout);
@@ -73,6 +74,7 @@ public final class PlotView extends Composite {
 			axis.getTick().setFont(JFaceResources.getDialogFont());
 			axis.setDrawPositionMarker(false);
 		}
+		yAxis().getTick().setTickMarkStepHint(VALUE_TICK_PIXELS);
 		painter = new PlotPainter(this, chart);
 		new PlotInput(this, area());
 		new PlotMenu(this, area());

@@ -99,7 +99,7 @@ final class CoefficientTable {
 
 	/** Shows what the model and the proof have now. */
 	void refresh(Optional<Proven> proven) {
-		Coefficients coefficients = editor.document().filter().getCoefficients();
+		Coefficients coefficients = editor.document().root().getCoefficients();
 		stored = switch (coefficients) {
 		case RealCoefficients real -> List.copyOf(real.getValues());
 		case IntegerCoefficients integers -> List.copyOf(integers.getIntegers());
@@ -142,7 +142,7 @@ final class CoefficientTable {
 		}
 		try {
 			Coefficients pasted = PastedNumbers.read(text == null ? "" : text);
-			set(editor.document().filter(), ModelPackage.Literals.FILTER__COEFFICIENTS, pasted);
+			set(editor.document().root(), ModelPackage.Literals.FILTER__COEFFICIENTS, pasted);
 		} catch (InputException e) {
 			MessageDialog.openError(editor.getSite().getShell(), "Nothing was replaced", e.describe());
 		}
@@ -185,7 +185,7 @@ final class CoefficientTable {
 			Optional<Object> number = parse((String) value);
 			int index = (Integer) element;
 			if (number.isPresent() && !number.get().equals(stored.get(index))) {
-				Coefficients coefficients = editor.document().filter().getCoefficients();
+				Coefficients coefficients = editor.document().root().getCoefficients();
 				var feature = coefficients instanceof IntegerCoefficients ? ModelPackage.Literals.INTEGER_COEFFICIENTS__INTEGERS
 						: ModelPackage.Literals.REAL_COEFFICIENTS__VALUES;
 				editor.getEditingDomain().getCommandStack().execute(
@@ -195,7 +195,7 @@ final class CoefficientTable {
 
 		private Optional<Object> parse(String text) {
 			try {
-				boolean integers = editor.document().filter().getCoefficients() instanceof IntegerCoefficients;
+				boolean integers = editor.document().root().getCoefficients() instanceof IntegerCoefficients;
 				Object number = integers ? new BigInteger(text.strip()) : (Object) Double.valueOf(text.strip());
 				return number instanceof Double real && !Double.isFinite(real) ? Optional.empty() : Optional.of(number);
 			} catch (NumberFormatException e) {

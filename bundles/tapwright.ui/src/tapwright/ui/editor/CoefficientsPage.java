@@ -31,26 +31,20 @@ final class CoefficientsPage extends FilterEditorPage {
 		GridLayoutFactory.swtDefaults().margins(8, 8).applyTo(body);
 		var rows = new SashForm(body, SWT.VERTICAL | SWT.SMOOTH);
 		toolkit.adapt(rows);
-		GridDataFactory.fillDefaults().grab(true, true).hint(600, 480).applyTo(rows);
+		GridDataFactory.fillDefaults().grab(true, true).hint(500, 330).applyTo(rows);
 		var top = new SashForm(rows, SWT.HORIZONTAL | SWT.SMOOTH);
 		toolkit.adapt(top);
-		Composite left = pane(toolkit, top);
-		design = new DesignSection(this, toolkit, section(toolkit, left, "Where they come from", "", true));
-		Composite right = pane(toolkit, top);
-		numbers = new CoefficientTable(getEditor(), toolkit, section(toolkit, right, "The numbers", "", true));
+		Composite left = Sections.pane(toolkit, top);
+		design = new DesignSection(this, toolkit, Sections.create(toolkit, left, "Where they come from", "", true));
+		Composite right = Sections.pane(toolkit, top);
+		numbers = new CoefficientTable(getEditor(), toolkit, Sections.create(toolkit, right, "The numbers", "", true));
 		top.setWeights(45, 55);
-		Composite bottom = pane(toolkit, rows);
-		picture = new PicturePane(section(toolkit, bottom, "Impulse response", "", true));
+		Composite bottom = Sections.pane(toolkit, rows);
+		picture = new PicturePane(Sections.create(toolkit, bottom, "Impulse response", "", true));
 		picture.hideTools();
 		picture.setStyle(PictureStyle.USUAL.with(PictureKind.IMPULSE));
-		GridDataFactory.fillDefaults().grab(true, true).hint(400, 120).applyTo(picture);
+		GridDataFactory.fillDefaults().grab(true, true).hint(400, 90).applyTo(picture);
 		rows.setWeights(62, 38);
-	}
-
-	private static Composite pane(FormToolkit toolkit, Composite parent) {
-		Composite pane = toolkit.createComposite(parent);
-		GridLayoutFactory.fillDefaults().extendedMargins(0, 6, 0, 6).applyTo(pane);
-		return pane;
 	}
 
 	@Override

@@ -30,6 +30,7 @@ import tapwright.core.meta.Meta;
 import tapwright.dsp.Progress;
 import tapwright.dsp.design.DesignException;
 import tapwright.model.Design;
+import tapwright.model.Filter;
 import tapwright.model.ModelPackage;
 import tapwright.ui.field.FieldSet;
 import tapwright.ui.look.Icons;
@@ -107,7 +108,7 @@ final class DesignSection {
 	}
 
 	private String state() {
-		FilterDocument document = page.getEditor().document();
+		ModelDocument<Filter> document = page.getEditor().document();
 		try {
 			Optional<Designer> designer = Designer.of(page.filter(), document.parameters());
 			if (designer.isEmpty()) {
@@ -131,7 +132,7 @@ final class DesignSection {
 	private void changeMethod() {
 		EClass chosen = methods.get(method.getSelectionIndex());
 		if (chosen != shown) {
-			FilterDocument document = page.getEditor().document();
+			ModelDocument<Filter> document = page.getEditor().document();
 			document.domain().getCommandStack().execute(SetCommand.create(document.domain(), page.filter(),
 					ModelPackage.Literals.FILTER__DESIGN, EcoreUtil.create(chosen)));
 		}
@@ -139,7 +140,7 @@ final class DesignSection {
 
 	private void compute() {
 		fields.commit();
-		FilterDocument document = page.getEditor().document();
+		ModelDocument<Filter> document = page.getEditor().document();
 		try {
 			Designer.of(page.filter(), document.parameters()).ifPresent(this::run);
 		} catch (InputException e) {
@@ -194,7 +195,7 @@ final class DesignSection {
 	}
 
 	private void adopt(Designer.Outcome result) {
-		FilterDocument document = page.getEditor().document();
+		ModelDocument<Filter> document = page.getEditor().document();
 		document.domain().getCommandStack().execute(SetCommand.create(document.domain(), page.filter(),
 				ModelPackage.Literals.FILTER__COEFFICIENTS, result.coefficients()));
 		say(String.join(" ", result.notes()));

@@ -36,18 +36,18 @@ final class EvidencePage extends FilterEditorPage {
 		GridLayoutFactory.swtDefaults().margins(8, 8).applyTo(body);
 		var rows = new SashForm(body, SWT.VERTICAL | SWT.SMOOTH);
 		toolkit.adapt(rows);
-		GridDataFactory.fillDefaults().grab(true, true).hint(600, 480).applyTo(rows);
+		GridDataFactory.fillDefaults().grab(true, true).hint(500, 330).applyTo(rows);
 		Composite top = toolkit.createComposite(rows);
 		GridLayoutFactory.fillDefaults().applyTo(top);
-		Composite list = section(toolkit, top, "What was proven",
+		Composite list = Sections.create(toolkit, top, "What was proven",
 				"Select a requirement to see the place where its margin is smallest.", true);
 		table = new EvidenceTable(toolkit, list, this::selected);
 		note = toolkit.createLabel(list, "", SWT.WRAP);
 		GridDataFactory.fillDefaults().grab(true, false).hint(300, SWT.DEFAULT).applyTo(note);
 		Composite bottom = toolkit.createComposite(rows);
 		GridLayoutFactory.fillDefaults().applyTo(bottom);
-		picture = new PicturePane(section(toolkit, bottom, "The place", "", true));
-		GridDataFactory.fillDefaults().grab(true, true).hint(400, 180).applyTo(picture);
+		picture = new PicturePane(Sections.create(toolkit, bottom, "The place", "", true));
+		GridDataFactory.fillDefaults().grab(true, true).hint(400, 120).applyTo(picture);
 		rows.setWeights(45, 55);
 		Label caution = toolkit.createLabel(body, CAUTION, SWT.WRAP);
 		GridDataFactory.fillDefaults().grab(true, false).hint(400, SWT.DEFAULT).applyTo(caution);

@@ -13,10 +13,10 @@ import org.eclipse.ui.IWorkbenchPartReference;
 /** Notices that an editor's file was changed by others, or is gone. The question comes when the editor is looked at. */
 final class FileWatch implements IResourceChangeListener, IPartListener2 {
 
-	private final FilterEditor editor;
+	private final ModelEditor<?> editor;
 	private final Display display;
 
-	FileWatch(FilterEditor editor) {
+	FileWatch(ModelEditor<?> editor) {
 		this.editor = editor;
 		this.display = editor.getSite().getShell().getDisplay();
 		ResourcesPlugin.getWorkspace().addResourceChangeListener(this, IResourceChangeEvent.POST_CHANGE);

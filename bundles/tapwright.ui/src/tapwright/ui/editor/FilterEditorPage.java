@@ -7,16 +7,11 @@ import java.util.Optional;
 import java.util.function.Consumer;
 
 import org.eclipse.jface.dialogs.IMessageProvider;
-import org.eclipse.jface.layout.GridDataFactory;
-import org.eclipse.jface.layout.GridLayoutFactory;
-import org.eclipse.swt.SWT;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.ui.forms.IManagedForm;
 import org.eclipse.ui.forms.editor.FormPage;
-import org.eclipse.ui.forms.widgets.ExpandableComposite;
 import org.eclipse.ui.forms.widgets.FormToolkit;
 import org.eclipse.ui.forms.widgets.ScrolledForm;
-import org.eclipse.ui.forms.widgets.Section;
 
 import tapwright.dsp.verify.Verdict;
 import tapwright.model.Filter;
@@ -42,7 +37,7 @@ abstract class FilterEditorPage extends FormPage {
 	}
 
 	Filter filter() {
-		return getEditor().document().filter();
+		return getEditor().document().root();
 	}
 
 	Optional<Proven> proven() {
@@ -110,21 +105,6 @@ abstract class FilterEditorPage extends FormPage {
 
 	final void remove(FieldSet fields) {
 		fieldSets.remove(fields);
-	}
-
-	/** A titled area that fills its cell; its client has no layout yet. */
-	final Composite section(FormToolkit toolkit, Composite parent, String title, String description, boolean tall) {
-		Section section = toolkit.createSection(parent,
-				ExpandableComposite.TITLE_BAR | (description.isEmpty() ? 0 : Section.DESCRIPTION));
-		section.setText(title);
-		if (!description.isEmpty()) {
-			section.setDescription(description);
-		}
-		GridDataFactory.fillDefaults().grab(true, tall).applyTo(section);
-		Composite client = toolkit.createComposite(section, SWT.NONE);
-		GridLayoutFactory.fillDefaults().margins(2, 2).applyTo(client);
-		section.setClient(client);
-		return client;
 	}
 
 	@Override

@@ -20,6 +20,7 @@ import tapwright.core.verify.RequirementEvidence;
 import tapwright.dsp.verify.Verdict;
 import tapwright.model.ModelPackage;
 import tapwright.ui.field.FieldSet;
+import tapwright.ui.field.ObjectTable;
 import tapwright.ui.look.Icons;
 import tapwright.ui.look.Verdicts;
 import tapwright.ui.picture.PicturePane;
@@ -35,7 +36,7 @@ final class FilterPage extends FilterEditorPage {
 
 	private FieldSet identity;
 	private Composite attention;
-	private DeploymentTable deployments;
+	private ObjectTable deployments;
 	private PicturePane picture;
 	private FormToolkit toolkit;
 
@@ -48,15 +49,16 @@ final class FilterPage extends FilterEditorPage {
 		toolkit = formToolkit;
 		GridLayoutFactory.swtDefaults().numColumns(2).equalWidth(true).margins(8, 8).spacing(16, 10).applyTo(body);
 		Composite left = column(body);
-		Composite fields = section(toolkit, left, "What it is", "", false);
+		Composite fields = Sections.create(toolkit, left, "What it is", "", false);
 		identity = new FieldSet(getEditor().document(), toolkit, fields, ModelPackage.Literals.FILTER,
 				feature -> IDENTITY.contains(feature.getName()));
 		add(identity);
-		attention = section(toolkit, left, "Needs attention", "", false);
-		Composite runs = section(toolkit, left, "Where it runs", "", true);
-		deployments = new DeploymentTable(getEditor().document(), toolkit, runs);
+		attention = Sections.create(toolkit, left, "Needs attention", "", false);
+		Composite runs = Sections.create(toolkit, left, "Where it runs", "", true);
+		deployments = new ObjectTable(getEditor().document(), toolkit, runs,
+				ModelPackage.Literals.FILTER__DEPLOYMENTS);
 		Composite right = column(body);
-		Composite glance = section(toolkit, right, "Response", "", true);
+		Composite glance = Sections.create(toolkit, right, "Response", "", true);
 		picture = new PicturePane(glance);
 		picture.hideTools();
 		GridDataFactory.fillDefaults().grab(true, true).hint(320, 260).applyTo(picture);
@@ -72,7 +74,7 @@ final class FilterPage extends FilterEditorPage {
 	@Override
 	void refresh() {
 		identity.setObject(filter());
-		deployments.refresh();
+		deployments.show(filter());
 	}
 
 	@Override

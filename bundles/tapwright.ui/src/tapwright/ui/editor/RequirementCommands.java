@@ -59,7 +59,6 @@ final class RequirementCommands {
 		remove = item(tools, Icons.REMOVE, "Remove (Delete)", this::remove);
 		up = item(tools, Icons.UP, "Move up (Alt+Up)", () -> move(-1));
 		down = item(tools, Icons.DOWN, "Move down (Alt+Down)", () -> move(1));
-		update();
 	}
 
 	private static ToolItem item(ToolBar tools, String icon, String tip, Runnable action) {
@@ -106,7 +105,7 @@ final class RequirementCommands {
 	}
 
 	private Filter filter() {
-		return editor.document().filter();
+		return editor.document().root();
 	}
 
 	private EditingDomain domain() {

@@ -46,12 +46,10 @@ final class RequirementTable {
 		viewer = new TableViewer(table);
 		viewer.setContentProvider(ArrayContentProvider.getInstance());
 		ColumnViewerToolTipSupport.enableFor(viewer);
-		column("Id", 110, Requirement::getId, this::image);
-		column("Statement", 330, this::statement, requirement -> null);
+		column("Id", 95, Requirement::getId, this::image);
+		column("Statement", 300, this::statement, requirement -> null);
 		column("Margin", 95, requirement -> found(requirement).map(Verdicts::margin).orElse(""), requirement -> null);
 		column("Verdict", 90, this::verdict, requirement -> null);
-		column("If missed", 80, requirement -> requirement.getSeverity().getLiteral().equals("must") ? "error" : "warning",
-				requirement -> null);
 		viewer.addSelectionChangedListener(event -> {
 			commands.update();
 			selected.accept((Requirement) viewer.getStructuredSelection().getFirstElement());
@@ -114,7 +112,7 @@ final class RequirementTable {
 	/** Shows what the model and the evidence have now. */
 	void refresh(Optional<Proven> next) {
 		proven = next;
-		List<Requirement> requirements = List.copyOf(editor.document().filter().getRequirements());
+		List<Requirement> requirements = List.copyOf(editor.document().root().getRequirements());
 		var selection = viewer.getStructuredSelection();
 		if (requirements.equals(viewer.getInput())) {
 			viewer.refresh();
@@ -129,7 +127,7 @@ final class RequirementTable {
 
 	/** Selects a requirement by its id. */
 	void select(String id) {
-		editor.document().filter().getRequirements().stream().filter(requirement -> id.equals(requirement.getId()))
+		editor.document().root().getRequirements().stream().filter(requirement -> id.equals(requirement.getId()))
 				.findFirst().ifPresent(this::select);
 	}
 
@@ -141,6 +139,6 @@ final class RequirementTable {
 	/** The selected requirements in the order of the filter. */
 	List<Requirement> selected() {
 		List<?> chosen = viewer.getStructuredSelection().toList();
-		return editor.document().filter().getRequirements().stream().filter(chosen::contains).toList();
+		return editor.document().root().getRequirements().stream().filter(chosen::contains).toList();
 	}
 }

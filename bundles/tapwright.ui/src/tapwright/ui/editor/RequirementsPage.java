@@ -39,15 +39,20 @@ final class RequirementsPage extends FilterEditorPage {
 	void createBody(Composite body, FormToolkit formToolkit) {
 		toolkit = formToolkit;
 		GridLayoutFactory.swtDefaults().margins(8, 8).applyTo(body);
-		var rows = new SashForm(body, SWT.VERTICAL | SWT.SMOOTH);
+		var columns = new SashForm(body, SWT.HORIZONTAL | SWT.SMOOTH);
+		toolkit.adapt(columns);
+		GridDataFactory.fillDefaults().grab(true, true).hint(500, 330).applyTo(columns);
+		var rows = new SashForm(columns, SWT.VERTICAL | SWT.SMOOTH);
 		toolkit.adapt(rows);
-		GridDataFactory.fillDefaults().grab(true, true).hint(600, 480).applyTo(rows);
-		var top = new SashForm(rows, SWT.HORIZONTAL | SWT.SMOOTH);
-		toolkit.adapt(top);
-		Composite left = pane(top);
-		table = new RequirementTable(getEditor(), toolkit, section(toolkit, left, "What is asked", "", true), this::showDetails);
-		Composite right = pane(top);
-		Composite client = section(toolkit, right, "Details", "", true);
+		Composite top = Sections.pane(toolkit, rows);
+		table = new RequirementTable(getEditor(), toolkit, Sections.create(toolkit, top, "What is asked", "", true),
+				this::showDetails);
+		Composite bottom = Sections.pane(toolkit, rows);
+		picture = new PicturePane(Sections.create(toolkit, bottom, "Limits over the response", "", true));
+		GridDataFactory.fillDefaults().grab(true, true).hint(300, 100).applyTo(picture);
+		rows.setWeights(42, 58);
+		Composite right = Sections.pane(toolkit, columns);
+		Composite client = Sections.create(toolkit, right, "Details", "", true);
 		documentation = toolkit.createLabel(client, "", SWT.WRAP);
 		GridDataFactory.fillDefaults().grab(true, false).hint(200, SWT.DEFAULT).applyTo(documentation);
 		scroller = new ScrolledComposite(client, SWT.V_SCROLL);
@@ -55,17 +60,7 @@ final class RequirementsPage extends FilterEditorPage {
 		scroller.setExpandVertical(true);
 		toolkit.adapt(scroller);
 		GridDataFactory.fillDefaults().grab(true, true).hint(240, 120).applyTo(scroller);
-		top.setWeights(60, 40);
-		Composite bottom = pane(rows);
-		picture = new PicturePane(section(toolkit, bottom, "Limits over the response", "", true));
-		GridDataFactory.fillDefaults().grab(true, true).hint(400, 160).applyTo(picture);
-		rows.setWeights(50, 50);
-	}
-
-	private Composite pane(Composite parent) {
-		Composite pane = toolkit.createComposite(parent);
-		GridLayoutFactory.fillDefaults().extendedMargins(0, 6, 0, 6).applyTo(pane);
-		return pane;
+		columns.setWeights(64, 36);
 	}
 
 	@Override

@@ -24,14 +24,15 @@ final class UnreadablePage extends FormPage {
 	private static final String SYSTEM_TEXT_EDITOR = "org.eclipse.ui.systemExternalEditor";
 	private static final int WIDEST = 600;
 
-	private final FilterEditor editor;
+	private final ModelEditor<?> editor;
 	private ModelFileException reason;
 	private Label place;
 	private Label words;
 
-	UnreadablePage(FilterEditor editor) {
+	UnreadablePage(ModelEditor<?> editor, ModelFileException reason) {
 		super(editor, "unreadable", "Not readable");
 		this.editor = editor;
+		this.reason = reason;
 	}
 
 	void setReason(ModelFileException next) {
@@ -45,7 +46,7 @@ final class UnreadablePage extends FormPage {
 	protected void createFormContent(IManagedForm form) {
 		FormToolkit toolkit = form.getToolkit();
 		toolkit.decorateFormHeading(form.getForm().getForm());
-		form.getForm().setText("This file cannot be read as a filter");
+		form.getForm().setText("This file cannot be read");
 		form.getForm().setMessage("The file is left as it is", IMessageProvider.ERROR);
 		Composite body = form.getForm().getBody();
 		GridLayoutFactory.swtDefaults().margins(12, 12).spacing(6, 10).applyTo(body);

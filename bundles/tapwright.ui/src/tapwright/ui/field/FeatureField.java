@@ -123,16 +123,7 @@ public final class FeatureField {
 
 	/** What keeps the text from the model; nothing when it makes sense. */
 	public Optional<String> problem() {
-		String typedText = text.getText();
-		if (!Meta.isQuantity(feature) || typedText.isBlank() || object == null) {
-			return Optional.empty();
-		}
-		try {
-			new Numbers(access.parameters()).evaluate(typedText, feature);
-			return Optional.empty();
-		} catch (InputException e) {
-			return Optional.of(e.getMessage());
-		}
+		return object == null ? Optional.empty() : QuantityCheck.problem(access, feature, text.getText());
 	}
 
 	private String value() {

@@ -23,9 +23,7 @@ import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Text;
 import org.eclipse.ui.forms.widgets.FormToolkit;
 
-import tapwright.core.InputException;
 import tapwright.core.meta.Meta;
-import tapwright.core.quantity.Numbers;
 
 /**
  * A list of contained objects as rows of text, one object a row, the numbers divided by semicolons or tabs, so that rows can be
@@ -132,13 +130,9 @@ public final class RowsField {
 			return Optional.of("row " + number + " has " + cells.length + " numbers, but there are " + columns.size() + " columns");
 		}
 		for (int k = 0; k < cells.length; k++) {
-			if (cells[k].isBlank()) {
-				continue;
-			}
-			try {
-				new Numbers(access.parameters()).evaluate(cells[k], columns.get(k));
-			} catch (InputException e) {
-				return Optional.of("row " + number + ": " + e.describe());
+			Optional<String> problem = QuantityCheck.problem(access, columns.get(k), cells[k]);
+			if (problem.isPresent()) {
+				return Optional.of("row " + number + ", " + FeatureWords.label(columns.get(k)) + ": " + problem.get());
 			}
 		}
 		return Optional.empty();

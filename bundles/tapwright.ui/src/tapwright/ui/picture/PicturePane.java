@@ -32,7 +32,7 @@ public final class PicturePane extends Composite {
 	private static final double CLOSE = 0.3;
 
 	private final PlotView view;
-	private final ToolBar tools;
+	private final Composite tools;
 	private ToolItem passBand;
 	private List<Overlay> overlays = List.of();
 	private PictureStyle style = PictureStyle.USUAL;
@@ -45,36 +45,40 @@ public final class PicturePane extends Composite {
 	public PicturePane(Composite parent) {
 		super(parent, SWT.NONE);
 		GridLayoutFactory.fillDefaults().spacing(0, 0).applyTo(this);
-		tools = new ToolBar(this, SWT.FLAT | SWT.HORIZONTAL | SWT.RIGHT);
+		tools = new Composite(this, SWT.NONE);
+		GridLayoutFactory.fillDefaults().numColumns(2).spacing(6, 0).applyTo(tools);
 		GridDataFactory.fillDefaults().applyTo(tools);
-		fillTools();
+		fillToggles(new ToolBar(tools, SWT.FLAT | SWT.HORIZONTAL)); // apart: text without icons would leave holes for them
+		fillButtons(new ToolBar(tools, SWT.FLAT | SWT.HORIZONTAL | SWT.RIGHT));
 		view = new PlotView(this);
 		GridDataFactory.fillDefaults().grab(true, true).applyTo(view);
 		view.onWindowChange(this::windowChanged);
 		addDisposeListener(event -> cancel());
 	}
 
-	private void fillTools() {
-		toggle("dB", "Gain in decibels, otherwise as a plain number", style.decibels(),
+	private void fillToggles(ToolBar bar) {
+		toggle(bar, "dB", "Gain in decibels, otherwise as a plain number", style.decibels(),
 				on -> setStyle(new PictureStyle(style.kind(), on, style.logarithmic())));
-		toggle("log f", "Frequencies spread by their logarithm", style.logarithmic(),
+		toggle(bar, "log f", "Frequencies spread by their logarithm", style.logarithmic(),
 				on -> setStyle(new PictureStyle(style.kind(), style.decibels(), on)));
-		new ToolItem(tools, SWT.SEPARATOR);
-		button(Icons.HOME, "", "Show everything (Home)", () -> view.zoomHome());
-		button(Icons.BACK, "", "Previous zoom (Backspace)", () -> view.zoomBack());
-		passBand = button(Icons.RESPONSE, "Pass band", "Show the bands that have a lower limit", this::zoomToPassBand);
 	}
 
-	private void toggle(String text, String tip, boolean selected, Consumer<Boolean> action) {
-		var item = new ToolItem(tools, SWT.CHECK);
+	private void fillButtons(ToolBar bar) {
+		button(bar, Icons.HOME, "", "Show everything (Home)", () -> view.zoomHome());
+		button(bar, Icons.BACK, "", "Previous zoom (Backspace)", () -> view.zoomBack());
+		passBand = button(bar, Icons.RESPONSE, "Pass band", "Show the bands that have a lower limit", this::zoomToPassBand);
+	}
+
+	private static void toggle(ToolBar bar, String text, String tip, boolean selected, Consumer<Boolean> action) {
+		var item = new ToolItem(bar, SWT.CHECK);
 		item.setText(text);
 		item.setToolTipText(tip);
 		item.setSelection(selected);
 		item.addListener(SWT.Selection, event -> action.accept(item.getSelection()));
 	}
 
-	private ToolItem button(String icon, String text, String tip, Runnable action) {
-		var item = new ToolItem(tools, SWT.PUSH);
+	private static ToolItem button(ToolBar bar, String icon, String text, String tip, Runnable action) {
+		var item = new ToolItem(bar, SWT.PUSH);
 		item.setImage(Icons.get(icon));
 		item.setText(text);
 		item.setToolTipText(tip);
@@ -179,7 +183,8 @@ public final class PicturePane extends Composite {
 			double place = evidence.proof().worst();
 			if (evidence.placeUnit().equals("Hz") && !Double.isNaN(place)) {
 				plot.curves().stream().findFirst().ifPresent(
-						curve -> view.zoomTo(Pictures.around(plot, place, curve.y()[curve.nearest(place)])));
+						curve -> view.zoomTo(Pictures.around(plot, place, curve.y()[curve.nearest(place)],
+								evidence.proof().margin().middle())));
 				view.setCursor(place);
 			}
 		});

@@ -173,7 +173,7 @@ public final class Pictures {
 		}
 		Window fitted = fit(curves, 0, end);
 		Window home = new Window(-0.02 * end, end, Math.min(fitted.bottom(), 0), Math.max(fitted.top(), 0));
-		return Plot.of(title, new Axis("Time", "s"), new Axis(kind.label(), ""), curves, home, PictureWords.of(title, drawn));
+		return Plot.of(title, new Axis("Time", "s"), new Axis("Amplitude", ""), curves, home, PictureWords.of(title, drawn));
 	}
 
 	private static Window fit(List<Curve> curves, double left, double right) {
@@ -191,24 +191,30 @@ public final class Pictures {
 		return Arrays.stream(values).filter(Double::isFinite).min().orElse(0);
 	}
 
-	/** The window around the worst place of a requirement, for a closer look. */
-	public static Window around(Plot plot, double place, double level) {
+	/**
+	 * The window around a place, for a closer look: high enough to show the value, its limit, and a limit on the other side when it is
+	 * near.
+	 */
+	public static Window around(Plot plot, double place, double level, double margin) {
 		double width = 0.06 * plot.home().width();
 		double from = Math.clamp(place - width, plot.home().left(), plot.home().right() - width);
 		double to = Math.min(Math.max(place + width, from + width), plot.home().right());
+		double near = Math.max(10 * Math.abs(margin), 1e-6 * plot.home().height());
 		double lowest = level;
 		double highest = level;
 		for (Region region : plot.regions()) {
-			for (int k = 0; k < region.x().length; k++) {
-				if (Math.abs(region.y()[k] - level) < 0.12 * plot.home().height()
-						&& region.x()[0] <= to && region.x()[region.x().length - 1] >= from) {
-					lowest = Math.min(lowest, region.y()[k]);
-					highest = Math.max(highest, region.y()[k]);
+			if (min(region.x()) > place || max(region.x()) < place) {
+				continue;
+			}
+			for (double limit : region.y()) {
+				if (Math.abs(limit - level) < near) {
+					lowest = Math.min(lowest, limit);
+					highest = Math.max(highest, limit);
 				}
 			}
 		}
-		double room = Math.max(highest - lowest, 0.02 * plot.home().height());
-		return new Window(from, to, lowest - 2 * room, highest + 2 * room);
+		double room = highest > lowest ? highest - lowest : near;
+		return new Window(from, to, lowest - 1.2 * room, highest + 1.2 * room);
 	}
 
 	/** The window around the bands that have a lower limit: where the signal passes. */

@@ -3,6 +3,7 @@ package tapwright.ui.editor;
 
 import java.io.IOException;
 import java.io.InputStream;
+import java.util.function.Function;
 
 import org.eclipse.core.resources.IFile;
 import org.eclipse.core.resources.IResource;
@@ -13,31 +14,44 @@ import org.eclipse.core.runtime.IProgressMonitor;
 import org.eclipse.core.runtime.Status;
 import org.eclipse.emf.common.command.BasicCommandStack;
 import org.eclipse.emf.common.util.URI;
+import org.eclipse.emf.ecore.EObject;
 import org.eclipse.emf.edit.domain.AdapterFactoryEditingDomain;
 import org.eclipse.emf.edit.domain.EditingDomain;
 
 import tapwright.core.quantity.Expression;
-import tapwright.model.Filter;
 import tapwright.model.io.AtomicFiles;
 import tapwright.model.io.ModelFileException;
 import tapwright.model.io.ModelResource;
 import tapwright.model.provider.ModelItemProviderAdapterFactory;
 import tapwright.ui.field.ModelAccess;
-import tapwright.workspace.PortfolioProject;
 
-/** A filter file that is being edited: its content, its command stack, and what is on disk. UI thread. */
-public final class FilterDocument implements ModelAccess {
+/**
+ * A model file that is being edited: its content, its command stack, and what is on disk. UI thread.
+ *
+ * @param <T>
+ *            what the file holds
+ */
+public final class ModelDocument<T extends EObject> implements ModelAccess {
 
 	private final IFile file;
+	private final Class<T> type;
+	private final Function<T, Expression.Names> parameters;
 	private final ModelItemProviderAdapterFactory adapterFactory = new ModelItemProviderAdapterFactory();
 	private final BasicCommandStack commandStack = new BasicCommandStack();
 	private final AdapterFactoryEditingDomain domain = new AdapterFactoryEditingDomain(adapterFactory, commandStack);
 	private final ModelResource resource;
 	private long stamp = IResource.NULL_STAMP;
 
-	/** A document without content; {@link #load()} fills it. */
-	public FilterDocument(IFile file) {
+	/**
+	 * A document without content; {@link #load()} fills it.
+	 *
+	 * @param parameters
+	 *            gives the parameters that numbers in the content may use
+	 */
+	public ModelDocument(IFile file, Class<T> type, Function<T, Expression.Names> parameters) {
 		this.file = file;
+		this.type = type;
+		this.parameters = parameters;
 		this.resource = new ModelResource(URI.createPlatformResourceURI(file.getFullPath().toString(), true));
 		domain.getResourceSet().getResources().add(resource);
 	}
@@ -57,13 +71,11 @@ public final class FilterDocument implements ModelAccess {
 		}
 		stamp = file.getModificationStamp();
 		resource.read(content, file.getName());
-		if (!(resource.root() instanceof Filter filter)) {
+		if (!type.isInstance(resource.root())) {
 			String found = resource.root().eClass().getName();
 			resource.unload();
-			throw new ModelFileException(file.getName(), 1, 1, "holds a " + found + ", but a Filter is expected");
-		}
-		if (filter.getName() == null) {
-			filter.setName(file.getFullPath().removeFileExtension().lastSegment()); // as the verification does
+			throw new ModelFileException(file.getName(), 1, 1,
+					"holds a " + found + ", but a " + type.getSimpleName() + " is expected");
 		}
 		commandStack.flush();
 	}
@@ -100,9 +112,14 @@ public final class FilterDocument implements ModelAccess {
 		stamp = file.getModificationStamp();
 	}
 
-	/** The filter. */
-	public Filter filter() {
-		return (Filter) resource.root();
+	/** What the file holds. */
+	public T root() {
+		return type.cast(resource.root());
+	}
+
+	/** Whether there is content: the file could be read. */
+	public boolean isLoaded() {
+		return !resource.getContents().isEmpty();
 	}
 
 	/** The file. */
@@ -122,7 +139,7 @@ public final class FilterDocument implements ModelAccess {
 
 	@Override
 	public Expression.Names parameters() {
-		return PortfolioProject.of(file).map(PortfolioProject::parameters).orElse(Expression.Names.NONE);
+		return isLoaded() ? parameters.apply(root()) : Expression.Names.NONE;
 	}
 
 	/** Lets go of adapters. */
