@@ -3,6 +3,7 @@ package tapwright.dsp.verify;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 
 import org.apache.commons.math3.fraction.BigFraction;
 
@@ -20,7 +21,7 @@ import tapwright.dsp.exact.Rationals;
  * @param min
  *            smallest rejection in dB
  */
-public record AliasRejection(int factor, double to, double min) implements Requirement {
+public record AliasRejection(int factor, double to, double min) implements Requirement, ClockRange.Aware {
 
 	/** Checks the numbers. */
 	public AliasRejection {
@@ -46,6 +47,13 @@ public record AliasRejection(int factor, double to, double min) implements Requi
 							"The worst gain lies within rounding of a band edge.");
 		}
 		return new Proof(proof.verdict(), proof.worst(), proof.value().negate(), min, proof.margin(), proof.note());
+	}
+
+	// Multiples of the new rate move with the clock, so only the reach of the bands changes.
+	@Override
+	public Optional<Proof> prove(Subject subject, Effort effort, ClockRange clocks) {
+		return Optional.of(new AliasRejection(factor, Math.min(clocks.highest(to), subject.sampleRate() / factor / 2), min)
+				.prove(subject, effort));
 	}
 
 	private boolean edgesAreDoubles(double rate) {

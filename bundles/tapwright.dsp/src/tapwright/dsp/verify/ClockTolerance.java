@@ -2,16 +2,15 @@
 package tapwright.dsp.verify;
 
 import java.util.Objects;
-
-import tapwright.dsp.exact.Enclosure;
+import java.util.Optional;
 
 /**
  * A statement holds at every sample clock that is off by up to some parts per million.
  * <p>
- * Statements over frequency bands are turned into one statement at the nominal clock that holds exactly when the original holds at
- * every clock: a frequency in hertz, seen at all clocks, is a stretch of frequencies per sample. The edges of such a stretch are
- * rounded outward to prove it, inward to disprove it. Other statements depend on the clock, if at all, through one value that rises or falls
- * with it, so they are proven at both ends of the range.
+ * A frequency in hertz, seen at all clocks, is a stretch of frequencies per sample. So gain limits and alias rejection become one
+ * statement at the nominal clock, with edges rounded outward to prove it and inward to disprove it. Other statements depend on the clock,
+ * if at all, through one value that rises or falls with it, and are proven at both ends of the range; where that is not enough the
+ * answer is unproven.
  *
  * @param statement
  *            what must hold; not itself under a tolerance
@@ -22,8 +21,6 @@ public record ClockTolerance(Requirement statement, double ppm) implements Requi
 
 	private static final double LARGEST = 500_000;
 	private static final double MILLION = 1e6;
-	/** More than the rounding errors of a scaled frequency, in relative terms. */
-	private static final double ROUNDING = 0x1p-50;
 
 	/** Checks the tolerance. */
 	public ClockTolerance {
@@ -36,65 +33,47 @@ public record ClockTolerance(Requirement statement, double ppm) implements Requi
 		}
 	}
 
-	/** What every clock in the range does to a frequency. */
-	record Stretcher(double sampleRate, double ppm, boolean outward) {
-
-		/** Lower end, per nominal sample, of what a frequency becomes. */
-		double low(double hertz) {
-			return Math.min(hertz / (1 + ppm / MILLION) * (outward ? 1 - ROUNDING : 1 + ROUNDING), sampleRate / 2);
-		}
-
-		/** Upper end, per nominal sample, of what a frequency becomes; beyond half the sample rate there is nothing new. */
-		double high(double hertz) {
-			return Math.min(hertz / (1 - ppm / MILLION) * (outward ? 1 + ROUNDING : 1 - ROUNDING), sampleRate / 2);
-		}
-	}
-
-	/** A statement over frequency that knows what it means at all clocks. */
-	interface Stretchable {
-
-		/** Proof at the nominal clock of the statement for stretched frequencies. */
-		Proof prove(Subject subject, Effort effort, Stretcher stretcher);
-	}
-
 	@Override
 	public Proof prove(Subject subject, Effort effort) {
 		if (ppm == 0) {
 			return statement.prove(subject, effort);
 		}
-		if (statement instanceof Stretchable stretchable) {
-			Proof outer = stretchable.prove(subject, effort, new Stretcher(subject.sampleRate(), ppm, true));
-			if (outer.verdict() == Verdict.MET) {
-				return outer;
-			}
-			Proof inner = stretchable.prove(subject, effort, new Stretcher(subject.sampleRate(), ppm, false));
-			return inner.verdict() == Verdict.MISSED ? inner : unproven(outer, "The worst gain lies within rounding of a band edge.");
+		ClockRange outer = new ClockRange(subject.sampleRate(), ppm / MILLION, true);
+		ClockRange inner = new ClockRange(subject.sampleRate(), ppm / MILLION, false);
+		Optional<Proof> all = statement instanceof ClockRange.Aware aware ? aware.prove(subject, effort, outer) : Optional.empty();
+		if (all.isPresent() && all.get().verdict() == Verdict.MET) {
+			return all.get();
 		}
-		Proof slow = statement.prove(at(subject, 1 - ppm / MILLION), effort);
-		Proof fast = statement.prove(at(subject, 1 + ppm / MILLION), effort);
-		Proof worse = Proofs.worse(slow, fast);
-		if (worse.verdict() == Verdict.MET && !isMonotone()) {
-			return unproven(worse, "Proven at both ends of the clock's range, but not between them.");
+		if (all.isPresent()) {
+			Proof weaker = ((ClockRange.Aware) statement).prove(subject, effort, inner).orElseThrow();
+			return weaker.verdict() == Verdict.MISSED ? weaker
+					: unproven(all.get(), "The worst place lies within rounding of a band edge.");
 		}
-		return worse;
+		Proof atOuterEnds = atEnds(subject, effort, outer);
+		if (atOuterEnds.verdict() == Verdict.MET && endsDecide()) {
+			return atOuterEnds;
+		}
+		Proof atEnds = atEnds(subject, effort, inner);
+		return atEnds.verdict() == Verdict.MISSED ? atEnds
+				: unproven(atOuterEnds, "It holds at both ends of the clock's range, but what lies between them is not proven.");
 	}
 
-	private boolean isMonotone() {
-		return switch (statement) {
-			case GroupDelay delay -> false;
-			case GroupDelayVariation variation -> false;
-			case Null zero -> false;
-			case ExactGain gain -> false;
-			default -> true;
-		};
+	private Proof atEnds(Subject subject, Effort effort, ClockRange range) {
+		return Proofs.worse(statement.prove(at(subject, range.slowest()), effort),
+				statement.prove(at(subject, range.fastest()), effort));
 	}
 
-	private static Subject at(Subject subject, double factor) {
-		return new Subject(subject.taps(), subject.sampleRate() * factor, subject.arithmetic());
+	private static Subject at(Subject subject, double sampleRate) {
+		return new Subject(subject.taps(), sampleRate, subject.arithmetic());
+	}
+
+	// Whether the statement can only change its truth once when the clock rises.
+	private boolean endsDecide() {
+		return !(statement instanceof GainLimit || statement instanceof GroupDelay || statement instanceof GroupDelayVariation
+				|| statement instanceof Null || statement instanceof ExactGain);
 	}
 
 	private static Proof unproven(Proof proof, String why) {
-		return new Proof(Verdict.UNPROVEN, proof.worst(), proof.value(), proof.limit(),
-				new Enclosure(proof.margin().lo(), proof.margin().hi()), why);
+		return new Proof(Verdict.UNPROVEN, proof.worst(), proof.value(), proof.limit(), proof.margin(), why);
 	}
 }

@@ -4,6 +4,7 @@ package tapwright.dsp.verify;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
+import java.util.Optional;
 
 /**
  * The magnitude of the frequency response stays between a lower and an upper limit, each a broken line in decibels. Between two
@@ -20,7 +21,7 @@ import java.util.Objects;
  * @param reference
  *            what 0 dB means
  */
-public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainReference reference) implements Requirement {
+public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainReference reference) implements Requirement, ClockRange.Aware {
 
 	/**
 	 * Limits at one frequency.
@@ -93,8 +94,26 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 		return new GainLimit(breakpoints, logarithmic, other);
 	}
 
+	// Relative limits whose reference moves with the clock have no single statement.
+	@Override
+	public Optional<Proof> prove(Subject subject, Effort effort, ClockRange clocks) {
+		check(subject);
+		boolean isFixed = reference instanceof GainReference.Absolute
+				|| reference instanceof GainReference.AtFrequency at && at.frequency() == 0;
+		if (!isFixed) {
+			return Optional.empty();
+		}
+		List<LimitLine> stretched = lines().stream().flatMap(line -> line.stretched(clocks).stream()).toList();
+		return Optional.of(new GainProof(stretched, reference, subject, effort).prove());
+	}
+
 	@Override
 	public Proof prove(Subject subject, Effort effort) {
+		check(subject);
+		return new GainProof(lines(), reference, subject, effort).prove();
+	}
+
+	private void check(Subject subject) {
 		Frequencies.checkBelowHalf("the last breakpoint", breakpoints.getLast().frequency, subject.sampleRate());
 		switch (reference) {
 			case GainReference.Absolute absolute -> {
@@ -105,7 +124,6 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 			case GainReference.LargestIn in ->
 				Frequencies.checkBelowHalf("the upper edge of the reference band", in.to(), subject.sampleRate());
 		}
-		return new GainProof(lines(), reference, subject, effort).prove();
 	}
 
 	/** Every straight piece of every limit. */

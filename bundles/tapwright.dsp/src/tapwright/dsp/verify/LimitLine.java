@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.dsp.verify;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
 
@@ -28,6 +29,9 @@ import tapwright.dsp.verify.ExactSearch.Stretch;
  *            whether the line is straight over the logarithm of frequency
  */
 record LimitLine(double from, double to, double fromDb, double toDb, boolean upper, boolean logarithmic) {
+
+	/** More than the rounding errors of a scaled frequency, in relative terms. */
+	private static final double TINY = 0x1p-50;
 
 	boolean isConstant() {
 		return fromDb == toDb;
@@ -68,5 +72,44 @@ record LimitLine(double from, double to, double fromDb, double toDb, boolean upp
 		BigFraction step = width.divide(count);
 		return IntStream.range(0, count)
 				.mapToObj(k -> new Stretch(this, lo.add(step.multiply(k)), lo.add(step.multiply(k + 1)))).toList();
+	}
+
+	/**
+	 * Lines that hold at the nominal clock exactly when this one holds at all clocks, but for rounding to the side that the range
+	 * says. A limit that gets stricter with rising frequency is met by the slowest clock's place, and the other way round.
+	 */
+	List<LimitLine> stretched(ClockRange clocks) {
+		if (isConstant()) {
+			double low = clocks.lowest(from);
+			double high = clocks.highest(to);
+			return low <= high ? List.of(new LimitLine(low, high, fromDb, toDb, upper, logarithmic)) : List.of();
+		}
+		boolean eases = upper == toDb > fromDb;
+		List<LimitLine> lines = new ArrayList<>();
+		if (eases) {
+			// The place at the slowest clock counts, after a flat start.
+			add(lines, clocks, clocks.lowest(from), clocks.highest(from), fromDb, fromDb);
+			add(lines, clocks, clocks.highest(from), to / (1 - clocks.deviation()) * (clocks.outward() ? 1 + TINY : 1 - TINY), fromDb, toDb);
+		} else {
+			add(lines, clocks, clocks.lowest(from), clocks.lowest(to), fromDb, toDb);
+			add(lines, clocks, clocks.lowest(to), clocks.highest(to), toDb, toDb);
+		}
+		return lines;
+	}
+
+	// Cuts at half the sample rate; the level there is rounded to the side that the range says.
+	private void add(List<LimitLine> lines, ClockRange clocks, double low, double high, double lowDb, double highDb) {
+		double end = clocks.nominal() / 2;
+		if (low > high || low > end) {
+			return;
+		}
+		LimitLine line = new LimitLine(low, high, lowDb, highDb, upper, logarithmic);
+		if (high <= end) {
+			lines.add(line);
+		} else {
+			double slack = 64 * Math.ulp(Math.max(Math.abs(lowDb), Math.abs(highDb)));
+			double cut = line.at(end) + (upper == clocks.outward() ? -slack : slack);
+			lines.add(new LimitLine(low, end, lowDb, cut, upper, logarithmic));
+		}
 	}
 }
