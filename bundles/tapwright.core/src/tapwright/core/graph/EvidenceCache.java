@@ -1,0 +1,74 @@
+// SPDX-License-Identifier: EPL-2.0
+package tapwright.core.graph;
+
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.concurrent.ConcurrentHashMap;
+import java.util.concurrent.atomic.AtomicLong;
+
+import tapwright.core.verify.FilterEvidence;
+import tapwright.core.verify.FilterQuestion;
+import tapwright.dsp.verify.Effort;
+
+/**
+ * Remembers answers by the hash of their questions, in memory and in a store that outlives the session. Thread-safe. Evidence is
+ * derived: losing it costs time, nothing else.
+ */
+public final class EvidenceCache {
+
+	private final EvidenceStore store;
+	private final Map<String, FilterEvidence> answers = new ConcurrentHashMap<>();
+	private final AtomicLong computed = new AtomicLong();
+
+	/** A cache over a store. */
+	public EvidenceCache(EvidenceStore store) {
+		this.store = store;
+	}
+
+	/**
+	 * The answer to a question, computed only when it is not known.
+	 *
+	 * @throws java.util.concurrent.CancellationException
+	 *             when cancelled
+	 */
+	public FilterEvidence answer(FilterQuestion question, Effort effort) {
+		FilterEvidence known = answers.get(question.hash());
+		if (known == null) {
+			known = store.find(question.hash()).orElse(null);
+		}
+		if (known == null) {
+			known = question.answer(effort);
+			computed.incrementAndGet();
+			if (isFinal(known)) {
+				store.put(known);
+			}
+		}
+		// What is wrong with the input may depend on parameters that have no value, which the hash does not cover.
+		if (known.problems().isEmpty()) {
+			answers.put(question.hash(), known);
+		}
+		return known;
+	}
+
+	/** How many questions were answered by computing since this cache was made. */
+	public long computed() {
+		return computed.get();
+	}
+
+	/** Forgets answers to questions that nobody asks any more. */
+	void retain(Set<String> hashes) {
+		answers.keySet().retainAll(hashes);
+	}
+
+	/** Removes such answers from the store, too. */
+	void retainStored(Set<String> hashes) {
+		store.retain(hashes);
+	}
+
+	// A faster machine, or more time, may prove what this one could not: so 'unproven' lasts for a session only.
+	private static boolean isFinal(FilterEvidence evidence) {
+		return evidence.problems().isEmpty() && evidence.requirements().stream()
+				.noneMatch(requirement -> requirement.proof().verdict() == tapwright.dsp.verify.Verdict.UNPROVEN);
+	}
+}
