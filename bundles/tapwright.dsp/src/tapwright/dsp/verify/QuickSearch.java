@@ -23,7 +23,8 @@ final class QuickSearch {
 	private static final double ROUNDING = 1e-14;
 	private static final double SQUARE_ROUNDING = 4e-14;
 
-	private final TaylorCells cells = new TaylorCells();
+	private final TaylorCells cells;
+	private final double errorFactor;
 	private final CellMaximum maximum = new CellMaximum();
 	private final LocalSlope slope = new LocalSlope();
 	private final double[] whole = new double[LONGEST];
@@ -55,6 +56,17 @@ final class QuickSearch {
 	private double linePlace;
 	private double innerLo;
 	private double innerHi;
+
+	/** Work space. */
+	QuickSearch() {
+		this(1);
+	}
+
+	/** Work space whose error bounds are multiplied by a factor: below 1 they are wrong, so that tests can see it. */
+	QuickSearch(double errorFactor) {
+		this.errorFactor = errorFactor;
+		this.cells = new TaylorCells(errorFactor);
+	}
 
 	/** Largest load found at a real place, 0 when there is none. */
 	double lo() {
@@ -155,7 +167,7 @@ final class QuickSearch {
 				innerHi = Math.min(1, hi - 2 * doubt);
 				terms = cells.polynomial(cell, whole);
 				wholeSize = cells.isSquared() ? cells.squareSize() : size(whole, terms);
-				rounding = (cells.isSquared() ? SQUARE_ROUNDING : ROUNDING) * wholeSize;
+				rounding = errorFactor * (cells.isSquared() ? SQUARE_ROUNDING : ROUNDING) * wholeSize;
 				if (lo <= -1 && hi >= 1 && line.isConstant()) {
 					localTerms = terms;
 					localRounding = rounding;

@@ -9,17 +9,20 @@ import java.math.RoundingMode;
  * Decimal arithmetic for judging proofs, by other methods than the product's: pi by the arithmetic-geometric mean (C. F. Gauss, A.-M. Legendre;
  * R. Brent 1976), the cosine by its series and repeated doubling, logarithms after repeated square roots.
  */
-final class OracleMath {
+public final class OracleMath {
 
-	static final MathContext DIGITS = new MathContext(90, RoundingMode.HALF_EVEN);
-	static final BigDecimal PI = pi();
+	/** Working precision. */
+	public static final MathContext DIGITS = new MathContext(90, RoundingMode.HALF_EVEN);
+	/** The number pi. */
+	public static final BigDecimal PI = pi();
 	private static final BigDecimal LN10 = ln(BigDecimal.TEN);
 	private static final int HALVINGS = 20;
 
 	private OracleMath() {
 	}
 
-	static BigDecimal cos(BigDecimal angle) {
+	/** Cosine of an angle in radians. */
+	public static BigDecimal cos(BigDecimal angle) {
 		BigDecimal small = angle.divide(BigDecimal.TWO.pow(HALVINGS), DIGITS);
 		BigDecimal square = small.multiply(small, DIGITS);
 		BigDecimal term = BigDecimal.ONE;
@@ -34,7 +37,8 @@ final class OracleMath {
 		return sum;
 	}
 
-	static BigDecimal log10(BigDecimal x) {
+	/** Decimal logarithm of a positive number. */
+	public static BigDecimal log10(BigDecimal x) {
 		int digits = x.precision() - x.scale();
 		return ln(x.scaleByPowerOfTen(-digits)).divide(LN10, DIGITS).add(BigDecimal.valueOf(digits), DIGITS);
 	}
