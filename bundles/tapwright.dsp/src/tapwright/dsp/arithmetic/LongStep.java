@@ -47,7 +47,7 @@ final class LongStep {
 			return Optional.empty();
 		}
 		boolean limited = step.range().isPresent() && !isWithin(step.range().get(), after);
-		return Optional.of(new LongStep(step, limited));
+		return limited && step.range().get().word() > LONGEST ? Optional.empty() : Optional.of(new LongStep(step, limited));
 	}
 
 	private static boolean isWithin(NumberFormat format, BigInteger magnitude) {
