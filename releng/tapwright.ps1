@@ -42,7 +42,7 @@ if ($folder) {
 	& $java '-Xmx2g' '--enable-native-access=ALL-UNNAMED' '-jar' (Get-Jar 'org.eclipse.equinox.launcher') '-data' $data '-portfolio' $folder
 } else {
 	$jars = @('tapwright.cli', 'tapwright.core', 'tapwright.model', 'tapwright.dsp', 'org.eclipse.emf.common', 'org.eclipse.emf.ecore',
-		'org.eclipse.emf.ecore.change', 'org.eclipse.emf.ecore.xmi', 'org.apache.commons.math3', 'org.apache.commons.commons-codec',
+		'org.eclipse.emf.ecore.change', 'org.eclipse.emf.ecore.xmi', 'com.google.gson', 'org.apache.commons.math3', 'org.apache.commons.commons-codec',
 		'org.eclipse.jgit', 'com.googlecode.javaewah.JavaEWAH', 'slf4j.api', 'slf4j.nop') | ForEach-Object { Get-Jar $_ }
 	& $java '-Dstdout.encoding=UTF-8' '-Dstderr.encoding=UTF-8' '-Xlog:disable' '-Xlog:all=error:stderr' '-cp' ($jars -join ';') 'tapwright.cli.Main' @args
 }
