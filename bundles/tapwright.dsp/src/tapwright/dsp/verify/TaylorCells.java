@@ -51,7 +51,7 @@ public final class TaylorCells {
 	private final double[] norms = new double[TERMS + 1];
 
 	/** Work space. */
-	TaylorCells() {
+	public TaylorCells() {
 		this(1);
 	}
 
