@@ -10,7 +10,7 @@ import org.junit.jupiter.api.Test;
 /** Breaks the error bound of the fast search on purpose: the judge of the other tests must see it. */
 class BoundMutationTest {
 
-	private static final int FILTERS = 60;
+	private static final int FILTERS = 20;
 
 	@AfterEach
 	void restore() {

@@ -12,7 +12,7 @@ import org.junit.jupiter.api.Test;
  */
 class GainLimitOracleTest {
 
-	private static final int FILTERS = Integer.getInteger("tapwright.filters", Boolean.getBoolean("tapwright.thorough") ? 3800 : 40);
+	private static final int FILTERS = Integer.getInteger("tapwright.filters", Boolean.getBoolean("tapwright.thorough") ? 3800 : 24);
 	private static final long SEED = Long.getLong("tapwright.seed", 20260);
 
 	@Test
