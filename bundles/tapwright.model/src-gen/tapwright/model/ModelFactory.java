@@ -348,6 +348,60 @@ public interface ModelFactory extends EFactory {
 	EquirippleDesign createEquirippleDesign();
 
 	/**
+	 * Returns a new object of class '<em>Moving Average Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Moving Average Design</em>'.
+	 * @generated
+	 */
+	MovingAverageDesign createMovingAverageDesign();
+
+	/**
+	 * Returns a new object of class '<em>Binomial Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Binomial Design</em>'.
+	 * @generated
+	 */
+	BinomialDesign createBinomialDesign();
+
+	/**
+	 * Returns a new object of class '<em>Maximally Flat Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Maximally Flat Design</em>'.
+	 * @generated
+	 */
+	MaximallyFlatDesign createMaximallyFlatDesign();
+
+	/**
+	 * Returns a new object of class '<em>Savitzky Golay Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Savitzky Golay Design</em>'.
+	 * @generated
+	 */
+	SavitzkyGolayDesign createSavitzkyGolayDesign();
+
+	/**
+	 * Returns a new object of class '<em>Lagrange Delay Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Lagrange Delay Design</em>'.
+	 * @generated
+	 */
+	LagrangeDelayDesign createLagrangeDelayDesign();
+
+	/**
+	 * Returns a new object of class '<em>Raised Cosine Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Raised Cosine Design</em>'.
+	 * @generated
+	 */
+	RaisedCosineDesign createRaisedCosineDesign();
+
+	/**
 	 * Returns a new object of class '<em>Real Coefficients</em>'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->

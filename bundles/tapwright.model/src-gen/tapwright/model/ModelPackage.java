@@ -2551,6 +2551,264 @@ public interface ModelPackage extends EPackage {
 	int EQUIRIPPLE_DESIGN_FEATURE_COUNT = BAND_DESIGN_FEATURE_COUNT + 2;
 
 	/**
+	 * The meta object id for the '{@link tapwright.model.impl.MovingAverageDesignImpl <em>Moving Average Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.MovingAverageDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getMovingAverageDesign()
+	 * @generated
+	 */
+	int MOVING_AVERAGE_DESIGN = 40;
+
+	/**
+	 * The feature id for the '<em><b>Taps</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MOVING_AVERAGE_DESIGN__TAPS = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Sections</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MOVING_AVERAGE_DESIGN__SECTIONS = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The number of structural features of the '<em>Moving Average Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MOVING_AVERAGE_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.BinomialDesignImpl <em>Binomial Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.BinomialDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getBinomialDesign()
+	 * @generated
+	 */
+	int BINOMIAL_DESIGN = 41;
+
+	/**
+	 * The feature id for the '<em><b>Order</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int BINOMIAL_DESIGN__ORDER = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The number of structural features of the '<em>Binomial Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int BINOMIAL_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.MaximallyFlatDesignImpl <em>Maximally Flat Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.MaximallyFlatDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getMaximallyFlatDesign()
+	 * @generated
+	 */
+	int MAXIMALLY_FLAT_DESIGN = 42;
+
+	/**
+	 * The feature id for the '<em><b>Flatness</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MAXIMALLY_FLAT_DESIGN__FLATNESS = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Zeros</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MAXIMALLY_FLAT_DESIGN__ZEROS = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The number of structural features of the '<em>Maximally Flat Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MAXIMALLY_FLAT_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.SavitzkyGolayDesignImpl <em>Savitzky Golay Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.SavitzkyGolayDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getSavitzkyGolayDesign()
+	 * @generated
+	 */
+	int SAVITZKY_GOLAY_DESIGN = 43;
+
+	/**
+	 * The feature id for the '<em><b>Points</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SAVITZKY_GOLAY_DESIGN__POINTS = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Degree</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SAVITZKY_GOLAY_DESIGN__DEGREE = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Derivative</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SAVITZKY_GOLAY_DESIGN__DERIVATIVE = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The feature id for the '<em><b>Position</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SAVITZKY_GOLAY_DESIGN__POSITION = DESIGN_FEATURE_COUNT + 3;
+
+	/**
+	 * The number of structural features of the '<em>Savitzky Golay Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int SAVITZKY_GOLAY_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 4;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.LagrangeDelayDesignImpl <em>Lagrange Delay Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.LagrangeDelayDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getLagrangeDelayDesign()
+	 * @generated
+	 */
+	int LAGRANGE_DELAY_DESIGN = 44;
+
+	/**
+	 * The feature id for the '<em><b>Order</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LAGRANGE_DELAY_DESIGN__ORDER = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Delay</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LAGRANGE_DELAY_DESIGN__DELAY = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The number of structural features of the '<em>Lagrange Delay Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LAGRANGE_DELAY_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.RaisedCosineDesignImpl <em>Raised Cosine Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.RaisedCosineDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getRaisedCosineDesign()
+	 * @generated
+	 */
+	int RAISED_COSINE_DESIGN = 45;
+
+	/**
+	 * The feature id for the '<em><b>Roll Off</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int RAISED_COSINE_DESIGN__ROLL_OFF = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Samples Per Symbol</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int RAISED_COSINE_DESIGN__SAMPLES_PER_SYMBOL = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Symbols</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int RAISED_COSINE_DESIGN__SYMBOLS = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The feature id for the '<em><b>Root</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int RAISED_COSINE_DESIGN__ROOT = DESIGN_FEATURE_COUNT + 3;
+
+	/**
+	 * The feature id for the '<em><b>Gain</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int RAISED_COSINE_DESIGN__GAIN = DESIGN_FEATURE_COUNT + 4;
+
+	/**
+	 * The number of structural features of the '<em>Raised Cosine Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int RAISED_COSINE_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 5;
+
+	/**
 	 * The meta object id for the '{@link tapwright.model.impl.CoefficientsImpl <em>Coefficients</em>}' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2558,7 +2816,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getCoefficients()
 	 * @generated
 	 */
-	int COEFFICIENTS = 40;
+	int COEFFICIENTS = 46;
 
 	/**
 	 * The feature id for the '<em><b>Design Hash</b></em>' attribute.
@@ -2586,7 +2844,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getRealCoefficients()
 	 * @generated
 	 */
-	int REAL_COEFFICIENTS = 41;
+	int REAL_COEFFICIENTS = 47;
 
 	/**
 	 * The feature id for the '<em><b>Design Hash</b></em>' attribute.
@@ -2623,7 +2881,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getIntegerCoefficients()
 	 * @generated
 	 */
-	int INTEGER_COEFFICIENTS = 42;
+	int INTEGER_COEFFICIENTS = 48;
 
 	/**
 	 * The feature id for the '<em><b>Design Hash</b></em>' attribute.
@@ -2669,7 +2927,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getArithmetic()
 	 * @generated
 	 */
-	int ARITHMETIC = 43;
+	int ARITHMETIC = 49;
 
 	/**
 	 * The feature id for the '<em><b>Structure</b></em>' attribute.
@@ -2769,7 +3027,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getFormat()
 	 * @generated
 	 */
-	int FORMAT = 44;
+	int FORMAT = 50;
 
 	/**
 	 * The feature id for the '<em><b>Word</b></em>' attribute.
@@ -2815,7 +3073,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getEvidence()
 	 * @generated
 	 */
-	int EVIDENCE = 45;
+	int EVIDENCE = 51;
 
 	/**
 	 * The feature id for the '<em><b>Tool</b></em>' attribute.
@@ -2861,7 +3119,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getResult()
 	 * @generated
 	 */
-	int RESULT = 46;
+	int RESULT = 52;
 
 	/**
 	 * The feature id for the '<em><b>Requirement</b></em>' attribute.
@@ -2961,7 +3219,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getRevision()
 	 * @generated
 	 */
-	int REVISION = 47;
+	int REVISION = 53;
 
 	/**
 	 * The feature id for the '<em><b>Parents</b></em>' attribute list.
@@ -3052,7 +3310,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getBaseline()
 	 * @generated
 	 */
-	int BASELINE = 48;
+	int BASELINE = 54;
 
 	/**
 	 * The feature id for the '<em><b>Name</b></em>' attribute.
@@ -3125,7 +3383,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getBaselineEntry()
 	 * @generated
 	 */
-	int BASELINE_ENTRY = 49;
+	int BASELINE_ENTRY = 55;
 
 	/**
 	 * The feature id for the '<em><b>Filter</b></em>' attribute.
@@ -3171,7 +3429,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getSignOff()
 	 * @generated
 	 */
-	int SIGN_OFF = 50;
+	int SIGN_OFF = 56;
 
 	/**
 	 * The feature id for the '<em><b>Filter</b></em>' attribute.
@@ -3253,7 +3511,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getSeverity()
 	 * @generated
 	 */
-	int SEVERITY = 51;
+	int SEVERITY = 57;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Unit <em>Unit</em>}' enum.
@@ -3263,7 +3521,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getUnit()
 	 * @generated
 	 */
-	int UNIT = 52;
+	int UNIT = 58;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Side <em>Side</em>}' enum.
@@ -3273,7 +3531,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getSide()
 	 * @generated
 	 */
-	int SIDE = 53;
+	int SIDE = 59;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Interpolation <em>Interpolation</em>}' enum.
@@ -3283,7 +3541,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getInterpolation()
 	 * @generated
 	 */
-	int INTERPOLATION = 54;
+	int INTERPOLATION = 60;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.PhaseType <em>Phase Type</em>}' enum.
@@ -3293,7 +3551,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getPhaseType()
 	 * @generated
 	 */
-	int PHASE_TYPE = 55;
+	int PHASE_TYPE = 61;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.InputClass <em>Input Class</em>}' enum.
@@ -3303,7 +3561,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getInputClass()
 	 * @generated
 	 */
-	int INPUT_CLASS = 56;
+	int INPUT_CLASS = 62;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Structure <em>Structure</em>}' enum.
@@ -3313,7 +3571,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getStructure()
 	 * @generated
 	 */
-	int STRUCTURE = 57;
+	int STRUCTURE = 63;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Rounding <em>Rounding</em>}' enum.
@@ -3323,7 +3581,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getRounding()
 	 * @generated
 	 */
-	int ROUNDING = 58;
+	int ROUNDING = 64;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Overflow <em>Overflow</em>}' enum.
@@ -3333,7 +3591,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getOverflow()
 	 * @generated
 	 */
-	int OVERFLOW = 59;
+	int OVERFLOW = 65;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Verdict <em>Verdict</em>}' enum.
@@ -3343,7 +3601,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getVerdict()
 	 * @generated
 	 */
-	int VERDICT = 60;
+	int VERDICT = 66;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Decision <em>Decision</em>}' enum.
@@ -3353,7 +3611,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getDecision()
 	 * @generated
 	 */
-	int DECISION = 61;
+	int DECISION = 67;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.WindowKind <em>Window Kind</em>}' enum.
@@ -3363,7 +3621,17 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getWindowKind()
 	 * @generated
 	 */
-	int WINDOW_KIND = 62;
+	int WINDOW_KIND = 68;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.PulseGain <em>Pulse Gain</em>}' enum.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.PulseGain
+	 * @see tapwright.model.impl.ModelPackageImpl#getPulseGain()
+	 * @generated
+	 */
+	int PULSE_GAIN = 69;
 
 	/**
 	 * The meta object id for the '<em>Quantity</em>' data type.
@@ -3373,7 +3641,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getQuantity()
 	 * @generated
 	 */
-	int QUANTITY = 63;
+	int QUANTITY = 70;
 
 
 	/**
@@ -4877,6 +5145,242 @@ public interface ModelPackage extends EPackage {
 	EAttribute getEquirippleDesign_Tolerance();
 
 	/**
+	 * Returns the meta object for class '{@link tapwright.model.MovingAverageDesign <em>Moving Average Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Moving Average Design</em>'.
+	 * @see tapwright.model.MovingAverageDesign
+	 * @generated
+	 */
+	EClass getMovingAverageDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.MovingAverageDesign#getTaps <em>Taps</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Taps</em>'.
+	 * @see tapwright.model.MovingAverageDesign#getTaps()
+	 * @see #getMovingAverageDesign()
+	 * @generated
+	 */
+	EAttribute getMovingAverageDesign_Taps();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.MovingAverageDesign#getSections <em>Sections</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Sections</em>'.
+	 * @see tapwright.model.MovingAverageDesign#getSections()
+	 * @see #getMovingAverageDesign()
+	 * @generated
+	 */
+	EAttribute getMovingAverageDesign_Sections();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.BinomialDesign <em>Binomial Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Binomial Design</em>'.
+	 * @see tapwright.model.BinomialDesign
+	 * @generated
+	 */
+	EClass getBinomialDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.BinomialDesign#getOrder <em>Order</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Order</em>'.
+	 * @see tapwright.model.BinomialDesign#getOrder()
+	 * @see #getBinomialDesign()
+	 * @generated
+	 */
+	EAttribute getBinomialDesign_Order();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.MaximallyFlatDesign <em>Maximally Flat Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Maximally Flat Design</em>'.
+	 * @see tapwright.model.MaximallyFlatDesign
+	 * @generated
+	 */
+	EClass getMaximallyFlatDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.MaximallyFlatDesign#getFlatness <em>Flatness</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Flatness</em>'.
+	 * @see tapwright.model.MaximallyFlatDesign#getFlatness()
+	 * @see #getMaximallyFlatDesign()
+	 * @generated
+	 */
+	EAttribute getMaximallyFlatDesign_Flatness();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.MaximallyFlatDesign#getZeros <em>Zeros</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Zeros</em>'.
+	 * @see tapwright.model.MaximallyFlatDesign#getZeros()
+	 * @see #getMaximallyFlatDesign()
+	 * @generated
+	 */
+	EAttribute getMaximallyFlatDesign_Zeros();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.SavitzkyGolayDesign <em>Savitzky Golay Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Savitzky Golay Design</em>'.
+	 * @see tapwright.model.SavitzkyGolayDesign
+	 * @generated
+	 */
+	EClass getSavitzkyGolayDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.SavitzkyGolayDesign#getPoints <em>Points</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Points</em>'.
+	 * @see tapwright.model.SavitzkyGolayDesign#getPoints()
+	 * @see #getSavitzkyGolayDesign()
+	 * @generated
+	 */
+	EAttribute getSavitzkyGolayDesign_Points();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.SavitzkyGolayDesign#getDegree <em>Degree</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Degree</em>'.
+	 * @see tapwright.model.SavitzkyGolayDesign#getDegree()
+	 * @see #getSavitzkyGolayDesign()
+	 * @generated
+	 */
+	EAttribute getSavitzkyGolayDesign_Degree();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.SavitzkyGolayDesign#getDerivative <em>Derivative</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Derivative</em>'.
+	 * @see tapwright.model.SavitzkyGolayDesign#getDerivative()
+	 * @see #getSavitzkyGolayDesign()
+	 * @generated
+	 */
+	EAttribute getSavitzkyGolayDesign_Derivative();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.SavitzkyGolayDesign#getPosition <em>Position</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Position</em>'.
+	 * @see tapwright.model.SavitzkyGolayDesign#getPosition()
+	 * @see #getSavitzkyGolayDesign()
+	 * @generated
+	 */
+	EAttribute getSavitzkyGolayDesign_Position();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.LagrangeDelayDesign <em>Lagrange Delay Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Lagrange Delay Design</em>'.
+	 * @see tapwright.model.LagrangeDelayDesign
+	 * @generated
+	 */
+	EClass getLagrangeDelayDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.LagrangeDelayDesign#getOrder <em>Order</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Order</em>'.
+	 * @see tapwright.model.LagrangeDelayDesign#getOrder()
+	 * @see #getLagrangeDelayDesign()
+	 * @generated
+	 */
+	EAttribute getLagrangeDelayDesign_Order();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.LagrangeDelayDesign#getDelay <em>Delay</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Delay</em>'.
+	 * @see tapwright.model.LagrangeDelayDesign#getDelay()
+	 * @see #getLagrangeDelayDesign()
+	 * @generated
+	 */
+	EAttribute getLagrangeDelayDesign_Delay();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.RaisedCosineDesign <em>Raised Cosine Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Raised Cosine Design</em>'.
+	 * @see tapwright.model.RaisedCosineDesign
+	 * @generated
+	 */
+	EClass getRaisedCosineDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.RaisedCosineDesign#getRollOff <em>Roll Off</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Roll Off</em>'.
+	 * @see tapwright.model.RaisedCosineDesign#getRollOff()
+	 * @see #getRaisedCosineDesign()
+	 * @generated
+	 */
+	EAttribute getRaisedCosineDesign_RollOff();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.RaisedCosineDesign#getSamplesPerSymbol <em>Samples Per Symbol</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Samples Per Symbol</em>'.
+	 * @see tapwright.model.RaisedCosineDesign#getSamplesPerSymbol()
+	 * @see #getRaisedCosineDesign()
+	 * @generated
+	 */
+	EAttribute getRaisedCosineDesign_SamplesPerSymbol();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.RaisedCosineDesign#getSymbols <em>Symbols</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Symbols</em>'.
+	 * @see tapwright.model.RaisedCosineDesign#getSymbols()
+	 * @see #getRaisedCosineDesign()
+	 * @generated
+	 */
+	EAttribute getRaisedCosineDesign_Symbols();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.RaisedCosineDesign#isRoot <em>Root</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Root</em>'.
+	 * @see tapwright.model.RaisedCosineDesign#isRoot()
+	 * @see #getRaisedCosineDesign()
+	 * @generated
+	 */
+	EAttribute getRaisedCosineDesign_Root();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.RaisedCosineDesign#getGain <em>Gain</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Gain</em>'.
+	 * @see tapwright.model.RaisedCosineDesign#getGain()
+	 * @see #getRaisedCosineDesign()
+	 * @generated
+	 */
+	EAttribute getRaisedCosineDesign_Gain();
+
+	/**
 	 * Returns the meta object for class '{@link tapwright.model.Coefficients <em>Coefficients</em>}'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -5677,6 +6181,16 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 */
 	EEnum getWindowKind();
+
+	/**
+	 * Returns the meta object for enum '{@link tapwright.model.PulseGain <em>Pulse Gain</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for enum '<em>Pulse Gain</em>'.
+	 * @see tapwright.model.PulseGain
+	 * @generated
+	 */
+	EEnum getPulseGain();
 
 	/**
 	 * Returns the meta object for data type '{@link java.lang.String <em>Quantity</em>}'.
@@ -6915,6 +7429,194 @@ public interface ModelPackage extends EPackage {
 		EAttribute EQUIRIPPLE_DESIGN__TOLERANCE = eINSTANCE.getEquirippleDesign_Tolerance();
 
 		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.MovingAverageDesignImpl <em>Moving Average Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.MovingAverageDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getMovingAverageDesign()
+		 * @generated
+		 */
+		EClass MOVING_AVERAGE_DESIGN = eINSTANCE.getMovingAverageDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Taps</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MOVING_AVERAGE_DESIGN__TAPS = eINSTANCE.getMovingAverageDesign_Taps();
+
+		/**
+		 * The meta object literal for the '<em><b>Sections</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MOVING_AVERAGE_DESIGN__SECTIONS = eINSTANCE.getMovingAverageDesign_Sections();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.BinomialDesignImpl <em>Binomial Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.BinomialDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getBinomialDesign()
+		 * @generated
+		 */
+		EClass BINOMIAL_DESIGN = eINSTANCE.getBinomialDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Order</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute BINOMIAL_DESIGN__ORDER = eINSTANCE.getBinomialDesign_Order();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.MaximallyFlatDesignImpl <em>Maximally Flat Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.MaximallyFlatDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getMaximallyFlatDesign()
+		 * @generated
+		 */
+		EClass MAXIMALLY_FLAT_DESIGN = eINSTANCE.getMaximallyFlatDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Flatness</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MAXIMALLY_FLAT_DESIGN__FLATNESS = eINSTANCE.getMaximallyFlatDesign_Flatness();
+
+		/**
+		 * The meta object literal for the '<em><b>Zeros</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute MAXIMALLY_FLAT_DESIGN__ZEROS = eINSTANCE.getMaximallyFlatDesign_Zeros();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.SavitzkyGolayDesignImpl <em>Savitzky Golay Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.SavitzkyGolayDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getSavitzkyGolayDesign()
+		 * @generated
+		 */
+		EClass SAVITZKY_GOLAY_DESIGN = eINSTANCE.getSavitzkyGolayDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Points</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SAVITZKY_GOLAY_DESIGN__POINTS = eINSTANCE.getSavitzkyGolayDesign_Points();
+
+		/**
+		 * The meta object literal for the '<em><b>Degree</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SAVITZKY_GOLAY_DESIGN__DEGREE = eINSTANCE.getSavitzkyGolayDesign_Degree();
+
+		/**
+		 * The meta object literal for the '<em><b>Derivative</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SAVITZKY_GOLAY_DESIGN__DERIVATIVE = eINSTANCE.getSavitzkyGolayDesign_Derivative();
+
+		/**
+		 * The meta object literal for the '<em><b>Position</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute SAVITZKY_GOLAY_DESIGN__POSITION = eINSTANCE.getSavitzkyGolayDesign_Position();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.LagrangeDelayDesignImpl <em>Lagrange Delay Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.LagrangeDelayDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getLagrangeDelayDesign()
+		 * @generated
+		 */
+		EClass LAGRANGE_DELAY_DESIGN = eINSTANCE.getLagrangeDelayDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Order</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute LAGRANGE_DELAY_DESIGN__ORDER = eINSTANCE.getLagrangeDelayDesign_Order();
+
+		/**
+		 * The meta object literal for the '<em><b>Delay</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute LAGRANGE_DELAY_DESIGN__DELAY = eINSTANCE.getLagrangeDelayDesign_Delay();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.RaisedCosineDesignImpl <em>Raised Cosine Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.RaisedCosineDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getRaisedCosineDesign()
+		 * @generated
+		 */
+		EClass RAISED_COSINE_DESIGN = eINSTANCE.getRaisedCosineDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Roll Off</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute RAISED_COSINE_DESIGN__ROLL_OFF = eINSTANCE.getRaisedCosineDesign_RollOff();
+
+		/**
+		 * The meta object literal for the '<em><b>Samples Per Symbol</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute RAISED_COSINE_DESIGN__SAMPLES_PER_SYMBOL = eINSTANCE.getRaisedCosineDesign_SamplesPerSymbol();
+
+		/**
+		 * The meta object literal for the '<em><b>Symbols</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute RAISED_COSINE_DESIGN__SYMBOLS = eINSTANCE.getRaisedCosineDesign_Symbols();
+
+		/**
+		 * The meta object literal for the '<em><b>Root</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute RAISED_COSINE_DESIGN__ROOT = eINSTANCE.getRaisedCosineDesign_Root();
+
+		/**
+		 * The meta object literal for the '<em><b>Gain</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute RAISED_COSINE_DESIGN__GAIN = eINSTANCE.getRaisedCosineDesign_Gain();
+
+		/**
 		 * The meta object literal for the '{@link tapwright.model.impl.CoefficientsImpl <em>Coefficients</em>}' class.
 		 * <!-- begin-user-doc -->
 		 * <!-- end-user-doc -->
@@ -7559,6 +8261,16 @@ public interface ModelPackage extends EPackage {
 		 * @generated
 		 */
 		EEnum WINDOW_KIND = eINSTANCE.getWindowKind();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.PulseGain <em>Pulse Gain</em>}' enum.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.PulseGain
+		 * @see tapwright.model.impl.ModelPackageImpl#getPulseGain()
+		 * @generated
+		 */
+		EEnum PULSE_GAIN = eINSTANCE.getPulseGain();
 
 		/**
 		 * The meta object literal for the '<em>Quantity</em>' data type.

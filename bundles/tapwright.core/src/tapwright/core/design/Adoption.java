@@ -8,10 +8,10 @@ import tapwright.core.quantity.Expression;
 import tapwright.dsp.Progress;
 import tapwright.dsp.design.DesignException;
 import tapwright.model.BandDesign;
+import tapwright.model.Coefficients;
 import tapwright.model.Design;
 import tapwright.model.Filter;
 import tapwright.model.ModelFactory;
-import tapwright.model.RealCoefficients;
 
 /**
  * New model objects for a filter that takes over a candidate. The filter itself is not changed: the window does that by a command.
@@ -21,7 +21,7 @@ import tapwright.model.RealCoefficients;
  * @param coefficients
  *            what the design gives
  */
-public record Adoption(Design design, RealCoefficients coefficients) {
+public record Adoption(Design design, Coefficients coefficients) {
 
 	/**
 	 * Prepares to take over a candidate.

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 
 import tapwright.core.InputException;
+import tapwright.core.design.kind.ClosedFormKinds;
 import tapwright.core.design.kind.EquirippleDesignKind;
 import tapwright.core.design.kind.WindowDesignKind;
 import tapwright.model.Design;
@@ -18,12 +19,15 @@ public final class DesignKinds {
 	private static final Map<Class<?>, DesignKind<?>> KINDS = new LinkedHashMap<>();
 
 	static {
-		for (DesignKind<?> kind : List.of(new WindowDesignKind(), new EquirippleDesignKind())) {
-			KINDS.put(kind.type(), kind);
-		}
+		register(List.of(new WindowDesignKind(), new EquirippleDesignKind()));
+		register(ClosedFormKinds.ALL);
 	}
 
 	private DesignKinds() {
+	}
+
+	private static void register(List<DesignKind<?>> kinds) {
+		kinds.forEach(kind -> KINDS.put(kind.type(), kind));
 	}
 
 	/** The method with all its numbers; nothing for coefficients that were made elsewhere. */

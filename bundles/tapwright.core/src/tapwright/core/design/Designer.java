@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.core.design;
 
+import java.math.BigInteger;
 import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
@@ -16,7 +17,11 @@ import tapwright.dsp.Progress;
 import tapwright.dsp.design.Design;
 import tapwright.dsp.design.DesignException;
 import tapwright.dsp.design.DesignResult;
+import tapwright.dsp.design.special.ExactDesign;
+import tapwright.dsp.exact.ExactTaps;
+import tapwright.model.Coefficients;
 import tapwright.model.Filter;
+import tapwright.model.IntegerCoefficients;
 import tapwright.model.ModelFactory;
 import tapwright.model.ModelPackage;
 import tapwright.model.RealCoefficients;
@@ -30,6 +35,7 @@ import tapwright.model.RealCoefficients;
 public record Designer(Design method) {
 
 	private static final int HASH_DIGITS = 12;
+	private static final int LONGEST_DENOMINATOR = 200; // bits
 
 	/**
 	 * Coefficients and what a person should know of them.
@@ -39,7 +45,7 @@ public record Designer(Design method) {
 	 * @param notes
 	 *            whole sentences
 	 */
-	public record Outcome(RealCoefficients coefficients, List<String> notes) {
+	public record Outcome(Coefficients coefficients, List<String> notes) {
 	}
 
 	/**
@@ -76,10 +82,34 @@ public record Designer(Design method) {
 	 *             when cancelled
 	 */
 	public Outcome run(Progress progress) throws DesignException {
-		DesignResult result = method.compute(progress);
+		Outcome outcome = method instanceof ExactDesign exact ? exact(exact.exact(progress)) : reals(method.compute(progress));
+		outcome.coefficients().setDesignHash(hash());
+		return outcome;
+	}
+
+	private static Outcome reals(DesignResult result) {
 		RealCoefficients coefficients = ModelFactory.eINSTANCE.createRealCoefficients();
 		coefficients.getValues().addAll(Arrays.stream(result.taps()).boxed().toList());
-		coefficients.setDesignHash(hash());
 		return new Outcome(coefficients, result.notes());
+	}
+
+	// Rationals are kept as they are, unless nobody could read them.
+	private static Outcome exact(ExactTaps taps) {
+		BigInteger denominator = taps.unit().getDenominator();
+		boolean powerOfTwo = denominator.bitCount() == 1 && taps.unit().getNumerator().equals(BigInteger.ONE);
+		if (denominator.bitLength() > LONGEST_DENOMINATOR) {
+			return reals(new DesignResult(taps.toDoubles()));
+		}
+		return new Outcome(integers(taps, powerOfTwo ? "2^-" + (denominator.bitLength() - 1)
+				: taps.unit().getNumerator() + "/" + denominator), List.of());
+	}
+
+	private static IntegerCoefficients integers(ExactTaps taps, String scale) {
+		IntegerCoefficients coefficients = ModelFactory.eINSTANCE.createIntegerCoefficients();
+		for (int k = 0; k < taps.length(); k++) {
+			coefficients.getIntegers().add(taps.integer(k));
+		}
+		coefficients.setScale(scale);
+		return coefficients;
 	}
 }

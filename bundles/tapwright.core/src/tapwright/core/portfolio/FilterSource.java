@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import java.util.Optional;
 
 import tapwright.core.quantity.Parameters;
+import tapwright.core.verify.Partners;
 import tapwright.model.Filter;
 
 /**
@@ -16,8 +17,10 @@ import tapwright.model.Filter;
  *            its content; nothing when it cannot be read
  * @param parameters
  *            of the portfolio that it belongs to
+ * @param partners
+ *            the other filters of that portfolio
  * @param problem
  *            why it cannot be read, with the place; empty when it can
  */
-public record FilterSource(Path file, Optional<Filter> filter, Parameters parameters, String problem) {
+public record FilterSource(Path file, Optional<Filter> filter, Parameters parameters, Partners partners, String problem) {
 }

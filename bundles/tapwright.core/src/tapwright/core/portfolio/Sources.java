@@ -16,6 +16,7 @@ import java.util.Set;
 import tapwright.core.InputException;
 import tapwright.core.interchange.FilterJson;
 import tapwright.core.quantity.Parameters;
+import tapwright.core.verify.Partners;
 import tapwright.model.Filter;
 import tapwright.model.io.ModelFileException;
 import tapwright.model.io.ModelFiles;
@@ -87,7 +88,7 @@ public final class Sources {
 			if (filter.getName() == null) {
 				filter.setName(baseName(file));
 			}
-			sources.add(new FilterSource(file, Optional.of(filter), parameters, ""));
+			sources.add(new FilterSource(file, Optional.of(filter), parameters, partners(file, parameters), ""));
 		} catch (InputException e) {
 			sources.add(unreadable(file, file + ": " + e.describe()));
 		} catch (ModelFileException e) {
@@ -121,8 +122,12 @@ public final class Sources {
 		return known;
 	}
 
+	private static Partners partners(Path file, Parameters parameters) {
+		return PortfolioFolder.above(file).map(folder -> (Partners) new FolderPartners(folder, parameters)).orElse(Partners.NONE);
+	}
+
 	private static FilterSource unreadable(Path file, String problem) {
-		return new FilterSource(file, Optional.empty(), Parameters.NONE, problem);
+		return new FilterSource(file, Optional.empty(), Parameters.NONE, Partners.NONE, problem);
 	}
 
 	private static String baseName(Path file) {

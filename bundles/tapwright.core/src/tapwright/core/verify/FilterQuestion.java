@@ -11,6 +11,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.TreeMap;
 
 import tapwright.core.InputException;
 import tapwright.core.quantity.Expression;
@@ -42,6 +43,7 @@ public final class FilterQuestion {
 	private final String name;
 	private final String hash;
 	private final Set<String> parameters;
+	private final Set<String> partners;
 	private final Optional<Platform> platform;
 	private final Optional<Subject> subject;
 	private final List<Statement> statements;
@@ -56,11 +58,12 @@ public final class FilterQuestion {
 		}
 	}
 
-	private FilterQuestion(Filter filter, Numbers numbers, Optional<Platform> platform, Optional<Subject> subject,
-			List<Statement> statements, List<InputProblem> problems) {
+	private FilterQuestion(Filter filter, Numbers numbers, Map<String, ExactTaps> partners, Optional<Platform> platform,
+			Optional<Subject> subject, List<Statement> statements, List<InputProblem> problems) {
 		this.name = filter.getName() == null ? "" : filter.getName();
-		this.hash = hash(filter, numbers.used());
+		this.hash = hash(filter, numbers.used(), partners);
 		this.parameters = Set.copyOf(numbers.used().keySet());
+		this.partners = Set.copyOf(partners.keySet());
 		this.platform = platform;
 		this.subject = subject;
 		this.statements = List.copyOf(statements);
@@ -68,12 +71,30 @@ public final class FilterQuestion {
 	}
 
 	/**
-	 * Takes the questions from a filter.
+	 * Takes the questions from a filter that stands alone.
 	 *
 	 * @param parameters
-	 *            of the portfolio that the filter belongs to
+	 *            that its numbers may use
 	 */
 	public static FilterQuestion of(Filter filter, Expression.Names parameters) {
+		return of(filter, parameters, Partners.NONE);
+	}
+
+	/**
+	 * Takes the questions from a filter of a portfolio.
+	 *
+	 * @param parameters
+	 *            of the portfolio
+	 * @param partners
+	 *            the other filters of the portfolio
+	 */
+	public static FilterQuestion of(Filter filter, Expression.Names parameters, Partners partners) {
+		var asked = new TreeMap<String, ExactTaps>();
+		Partners recorder = name -> {
+			ExactTaps shipped = partners.shipped(name);
+			asked.put(name, shipped);
+			return shipped;
+		};
 		var numbers = new Numbers(parameters);
 		var problems = new ArrayList<InputProblem>();
 		Optional<Platform> platform = platform(filter, numbers, problems);
@@ -88,12 +109,17 @@ public final class FilterQuestion {
 				problems.add(new InputProblem(id, "two requirements have this id; rename one"));
 			}
 			try {
-				statements.add(Statement.of(requirement, numbers));
+				statements.add(Statement.of(requirement, numbers, recorder));
 			} catch (InputException e) {
 				problems.add(new InputProblem(id, e.describe()));
 			}
 		}
-		return new FilterQuestion(filter, numbers, platform, subject, statements, problems);
+		return new FilterQuestion(filter, numbers, asked, platform, subject, statements, problems);
+	}
+
+	/** Names of the other filters that the answer depends on. */
+	public Set<String> partners() {
+		return partners;
 	}
 
 	/** Structure and formats; nothing when the filter states none or they make no sense. */
@@ -106,7 +132,10 @@ public final class FilterQuestion {
 		return name;
 	}
 
-	/** SHA-256 of all that the answer depends on, in hexadecimal digits: content of the filter and values of its parameters. */
+	/**
+	 * SHA-256 of all that the answer depends on, in hexadecimal digits: content of the filter, values of its parameters,
+	 * coefficients of its partners.
+	 */
 	public String hash() {
 		return hash;
 	}
@@ -196,12 +225,13 @@ public final class FilterQuestion {
 		}
 	}
 
-	private static String hash(Filter filter, Map<String, Quantity> parameters) {
+	private static String hash(Filter filter, Map<String, Quantity> parameters, Map<String, ExactTaps> partners) {
 		try {
 			MessageDigest digest = MessageDigest.getInstance("SHA-256");
 			digest.update(ModelFiles.toBytes(filter));
 			parameters.forEach((name, value) -> digest
 					.update((name + "=" + value.value() + "\n").getBytes(StandardCharsets.UTF_8)));
+			partners.forEach((name, taps) -> digest.update((name + "=" + taps + "\n").getBytes(StandardCharsets.UTF_8)));
 			return HexFormat.of().formatHex(digest.digest());
 		} catch (NoSuchAlgorithmException e) {
 			throw new IllegalStateException("every Java platform has SHA-256", e);

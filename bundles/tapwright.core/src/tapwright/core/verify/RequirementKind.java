@@ -19,10 +19,12 @@ public interface RequirementKind<T extends Requirement> {
 	/**
 	 * The statement to prove.
 	 *
+	 * @param partners
+	 *            for kinds that speak of two filters
 	 * @throws InputException
 	 *             when a number is missing or makes no sense; names the feature
 	 */
-	tapwright.dsp.verify.Requirement statement(T requirement, Numbers numbers) throws InputException;
+	tapwright.dsp.verify.Requirement statement(T requirement, Numbers numbers, Partners partners) throws InputException;
 
 	/** The statement in a few words, with numbers: 'gain from 8 to 24 kHz at most -80 dB'. */
 	String describe(T requirement, Numbers numbers) throws InputException;

@@ -6,7 +6,9 @@ import java.util.List;
 import java.util.Map;
 
 import tapwright.core.verify.kind.CostKinds;
+import tapwright.core.verify.kind.FrequencyKinds;
 import tapwright.core.verify.kind.GainKind;
+import tapwright.core.verify.kind.PowerComplementaryKind;
 import tapwright.core.verify.kind.TimeKinds;
 import tapwright.model.Requirement;
 
@@ -16,7 +18,8 @@ public final class RequirementKinds {
 	private static final Map<Class<?>, RequirementKind<?>> KINDS = new LinkedHashMap<>();
 
 	static {
-		register(List.of(new GainKind()));
+		register(List.of(new GainKind(), new PowerComplementaryKind()));
+		register(FrequencyKinds.ALL);
 		register(TimeKinds.ALL);
 		register(CostKinds.ALL);
 	}

@@ -47,7 +47,7 @@ public record VerificationRun(List<Result> results) {
 	public static VerificationRun of(List<FilterSource> sources, Effort effort) {
 		List<FilterQuestion> questions = new ArrayList<>(); // model objects stay on this thread
 		for (FilterSource source : sources) {
-			questions.add(source.filter().map(filter -> FilterQuestion.of(filter, source.parameters())).orElse(null));
+			questions.add(source.filter().map(filter -> FilterQuestion.of(filter, source.parameters(), source.partners())).orElse(null));
 		}
 		Progress progress = effort.progress();
 		var done = new AtomicInteger();

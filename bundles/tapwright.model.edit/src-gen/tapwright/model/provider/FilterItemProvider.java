@@ -387,6 +387,36 @@ public class FilterItemProvider
 
 		newChildDescriptors.add
 			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createMovingAverageDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createBinomialDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createMaximallyFlatDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createSavitzkyGolayDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createLagrangeDelayDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createRaisedCosineDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
 				(ModelPackage.Literals.FILTER__COEFFICIENTS,
 				 ModelFactory.eINSTANCE.createRealCoefficients()));
 

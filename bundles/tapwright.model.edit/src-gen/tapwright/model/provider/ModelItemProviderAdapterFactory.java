@@ -902,6 +902,144 @@ public class ModelItemProviderAdapterFactory extends ModelAdapterFactory impleme
 	}
 
 	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.MovingAverageDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected MovingAverageDesignItemProvider movingAverageDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.MovingAverageDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createMovingAverageDesignAdapter() {
+		if (movingAverageDesignItemProvider == null) {
+			movingAverageDesignItemProvider = new MovingAverageDesignItemProvider(this);
+		}
+
+		return movingAverageDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.BinomialDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected BinomialDesignItemProvider binomialDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.BinomialDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createBinomialDesignAdapter() {
+		if (binomialDesignItemProvider == null) {
+			binomialDesignItemProvider = new BinomialDesignItemProvider(this);
+		}
+
+		return binomialDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.MaximallyFlatDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected MaximallyFlatDesignItemProvider maximallyFlatDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.MaximallyFlatDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createMaximallyFlatDesignAdapter() {
+		if (maximallyFlatDesignItemProvider == null) {
+			maximallyFlatDesignItemProvider = new MaximallyFlatDesignItemProvider(this);
+		}
+
+		return maximallyFlatDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.SavitzkyGolayDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected SavitzkyGolayDesignItemProvider savitzkyGolayDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.SavitzkyGolayDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createSavitzkyGolayDesignAdapter() {
+		if (savitzkyGolayDesignItemProvider == null) {
+			savitzkyGolayDesignItemProvider = new SavitzkyGolayDesignItemProvider(this);
+		}
+
+		return savitzkyGolayDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.LagrangeDelayDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected LagrangeDelayDesignItemProvider lagrangeDelayDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.LagrangeDelayDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createLagrangeDelayDesignAdapter() {
+		if (lagrangeDelayDesignItemProvider == null) {
+			lagrangeDelayDesignItemProvider = new LagrangeDelayDesignItemProvider(this);
+		}
+
+		return lagrangeDelayDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.RaisedCosineDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected RaisedCosineDesignItemProvider raisedCosineDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.RaisedCosineDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createRaisedCosineDesignAdapter() {
+		if (raisedCosineDesignItemProvider == null) {
+			raisedCosineDesignItemProvider = new RaisedCosineDesignItemProvider(this);
+		}
+
+		return raisedCosineDesignItemProvider;
+	}
+
+	/**
 	 * This keeps track of the one adapter used for all {@link tapwright.model.RealCoefficients} instances.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -1272,6 +1410,12 @@ public class ModelItemProviderAdapterFactory extends ModelAdapterFactory impleme
 		if (givenDesignItemProvider != null) givenDesignItemProvider.dispose();
 		if (windowDesignItemProvider != null) windowDesignItemProvider.dispose();
 		if (equirippleDesignItemProvider != null) equirippleDesignItemProvider.dispose();
+		if (movingAverageDesignItemProvider != null) movingAverageDesignItemProvider.dispose();
+		if (binomialDesignItemProvider != null) binomialDesignItemProvider.dispose();
+		if (maximallyFlatDesignItemProvider != null) maximallyFlatDesignItemProvider.dispose();
+		if (savitzkyGolayDesignItemProvider != null) savitzkyGolayDesignItemProvider.dispose();
+		if (lagrangeDelayDesignItemProvider != null) lagrangeDelayDesignItemProvider.dispose();
+		if (raisedCosineDesignItemProvider != null) raisedCosineDesignItemProvider.dispose();
 		if (realCoefficientsItemProvider != null) realCoefficientsItemProvider.dispose();
 		if (integerCoefficientsItemProvider != null) integerCoefficientsItemProvider.dispose();
 		if (arithmeticItemProvider != null) arithmeticItemProvider.dispose();

@@ -95,6 +95,12 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 			case ModelPackage.GIVEN_DESIGN: return createGivenDesign();
 			case ModelPackage.WINDOW_DESIGN: return createWindowDesign();
 			case ModelPackage.EQUIRIPPLE_DESIGN: return createEquirippleDesign();
+			case ModelPackage.MOVING_AVERAGE_DESIGN: return createMovingAverageDesign();
+			case ModelPackage.BINOMIAL_DESIGN: return createBinomialDesign();
+			case ModelPackage.MAXIMALLY_FLAT_DESIGN: return createMaximallyFlatDesign();
+			case ModelPackage.SAVITZKY_GOLAY_DESIGN: return createSavitzkyGolayDesign();
+			case ModelPackage.LAGRANGE_DELAY_DESIGN: return createLagrangeDelayDesign();
+			case ModelPackage.RAISED_COSINE_DESIGN: return createRaisedCosineDesign();
 			case ModelPackage.REAL_COEFFICIENTS: return createRealCoefficients();
 			case ModelPackage.INTEGER_COEFFICIENTS: return createIntegerCoefficients();
 			case ModelPackage.ARITHMETIC: return createArithmetic();
@@ -142,6 +148,8 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 				return createDecisionFromString(eDataType, initialValue);
 			case ModelPackage.WINDOW_KIND:
 				return createWindowKindFromString(eDataType, initialValue);
+			case ModelPackage.PULSE_GAIN:
+				return createPulseGainFromString(eDataType, initialValue);
 			case ModelPackage.QUANTITY:
 				return createQuantityFromString(eDataType, initialValue);
 			default:
@@ -181,6 +189,8 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 				return convertDecisionToString(eDataType, instanceValue);
 			case ModelPackage.WINDOW_KIND:
 				return convertWindowKindToString(eDataType, instanceValue);
+			case ModelPackage.PULSE_GAIN:
+				return convertPulseGainToString(eDataType, instanceValue);
 			case ModelPackage.QUANTITY:
 				return convertQuantityToString(eDataType, instanceValue);
 			default:
@@ -590,6 +600,72 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 	 * @generated
 	 */
 	@Override
+	public MovingAverageDesign createMovingAverageDesign() {
+		MovingAverageDesignImpl movingAverageDesign = new MovingAverageDesignImpl();
+		return movingAverageDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public BinomialDesign createBinomialDesign() {
+		BinomialDesignImpl binomialDesign = new BinomialDesignImpl();
+		return binomialDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public MaximallyFlatDesign createMaximallyFlatDesign() {
+		MaximallyFlatDesignImpl maximallyFlatDesign = new MaximallyFlatDesignImpl();
+		return maximallyFlatDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public SavitzkyGolayDesign createSavitzkyGolayDesign() {
+		SavitzkyGolayDesignImpl savitzkyGolayDesign = new SavitzkyGolayDesignImpl();
+		return savitzkyGolayDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public LagrangeDelayDesign createLagrangeDelayDesign() {
+		LagrangeDelayDesignImpl lagrangeDelayDesign = new LagrangeDelayDesignImpl();
+		return lagrangeDelayDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public RaisedCosineDesign createRaisedCosineDesign() {
+		RaisedCosineDesignImpl raisedCosineDesign = new RaisedCosineDesignImpl();
+		return raisedCosineDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public RealCoefficients createRealCoefficients() {
 		RealCoefficientsImpl realCoefficients = new RealCoefficientsImpl();
 		return realCoefficients;
@@ -931,6 +1007,26 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 	 * @generated
 	 */
 	public String convertWindowKindToString(EDataType eDataType, Object instanceValue) {
+		return instanceValue == null ? null : instanceValue.toString();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public PulseGain createPulseGainFromString(EDataType eDataType, String initialValue) {
+		PulseGain result = PulseGain.get(initialValue);
+		if (result == null) throw new IllegalArgumentException("The value '" + initialValue + "' is not a valid enumerator of '" + eDataType.getName() + "'");
+		return result;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public String convertPulseGainToString(EDataType eDataType, Object instanceValue) {
 		return instanceValue == null ? null : instanceValue.toString();
 	}
 

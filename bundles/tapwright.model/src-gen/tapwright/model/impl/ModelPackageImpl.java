@@ -19,6 +19,7 @@ import tapwright.model.Arithmetic;
 import tapwright.model.BandDesign;
 import tapwright.model.Baseline;
 import tapwright.model.BaselineEntry;
+import tapwright.model.BinomialDesign;
 import tapwright.model.BulkDelayRequirement;
 import tapwright.model.CoefficientWordRequirement;
 import tapwright.model.Coefficients;
@@ -42,11 +43,14 @@ import tapwright.model.ImpulseTailRequirement;
 import tapwright.model.InputClass;
 import tapwright.model.IntegerCoefficients;
 import tapwright.model.Interpolation;
+import tapwright.model.LagrangeDelayDesign;
 import tapwright.model.LimitPoint;
 import tapwright.model.LinearPhaseRequirement;
+import tapwright.model.MaximallyFlatDesign;
 import tapwright.model.MemoryRequirement;
 import tapwright.model.ModelFactory;
 import tapwright.model.ModelPackage;
+import tapwright.model.MovingAverageDesign;
 import tapwright.model.MultipliesRequirement;
 import tapwright.model.MultiplyRateRequirement;
 import tapwright.model.NoOverflowRequirement;
@@ -59,11 +63,14 @@ import tapwright.model.PhaseType;
 import tapwright.model.Portfolio;
 import tapwright.model.PowerComplementaryRequirement;
 import tapwright.model.Processor;
+import tapwright.model.PulseGain;
+import tapwright.model.RaisedCosineDesign;
 import tapwright.model.RealCoefficients;
 import tapwright.model.Requirement;
 import tapwright.model.Result;
 import tapwright.model.Revision;
 import tapwright.model.Rounding;
+import tapwright.model.SavitzkyGolayDesign;
 import tapwright.model.Severity;
 import tapwright.model.Side;
 import tapwright.model.SignOff;
@@ -371,6 +378,48 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * <!-- end-user-doc -->
 	 * @generated
 	 */
+	private EClass movingAverageDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass binomialDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass maximallyFlatDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass savitzkyGolayDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass lagrangeDelayDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass raisedCosineDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
 	private EClass coefficientsEClass = null;
 
 	/**
@@ -526,6 +575,13 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	private EEnum windowKindEEnum = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EEnum pulseGainEEnum = null;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -2000,6 +2056,226 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
+	public EClass getMovingAverageDesign() {
+		return movingAverageDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMovingAverageDesign_Taps() {
+		return (EAttribute)movingAverageDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMovingAverageDesign_Sections() {
+		return (EAttribute)movingAverageDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getBinomialDesign() {
+		return binomialDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getBinomialDesign_Order() {
+		return (EAttribute)binomialDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getMaximallyFlatDesign() {
+		return maximallyFlatDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMaximallyFlatDesign_Flatness() {
+		return (EAttribute)maximallyFlatDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getMaximallyFlatDesign_Zeros() {
+		return (EAttribute)maximallyFlatDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getSavitzkyGolayDesign() {
+		return savitzkyGolayDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSavitzkyGolayDesign_Points() {
+		return (EAttribute)savitzkyGolayDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSavitzkyGolayDesign_Degree() {
+		return (EAttribute)savitzkyGolayDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSavitzkyGolayDesign_Derivative() {
+		return (EAttribute)savitzkyGolayDesignEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getSavitzkyGolayDesign_Position() {
+		return (EAttribute)savitzkyGolayDesignEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getLagrangeDelayDesign() {
+		return lagrangeDelayDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getLagrangeDelayDesign_Order() {
+		return (EAttribute)lagrangeDelayDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getLagrangeDelayDesign_Delay() {
+		return (EAttribute)lagrangeDelayDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getRaisedCosineDesign() {
+		return raisedCosineDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getRaisedCosineDesign_RollOff() {
+		return (EAttribute)raisedCosineDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getRaisedCosineDesign_SamplesPerSymbol() {
+		return (EAttribute)raisedCosineDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getRaisedCosineDesign_Symbols() {
+		return (EAttribute)raisedCosineDesignEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getRaisedCosineDesign_Root() {
+		return (EAttribute)raisedCosineDesignEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getRaisedCosineDesign_Gain() {
+		return (EAttribute)raisedCosineDesignEClass.getEStructuralFeatures().get(4);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EClass getCoefficients() {
 		return coefficientsEClass;
 	}
@@ -2750,6 +3026,16 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
+	public EEnum getPulseGain() {
+		return pulseGainEEnum;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EDataType getQuantity() {
 		return quantityEDataType;
 	}
@@ -2963,6 +3249,34 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		createEAttribute(equirippleDesignEClass, EQUIRIPPLE_DESIGN__TYPE);
 		createEAttribute(equirippleDesignEClass, EQUIRIPPLE_DESIGN__TOLERANCE);
 
+		movingAverageDesignEClass = createEClass(MOVING_AVERAGE_DESIGN);
+		createEAttribute(movingAverageDesignEClass, MOVING_AVERAGE_DESIGN__TAPS);
+		createEAttribute(movingAverageDesignEClass, MOVING_AVERAGE_DESIGN__SECTIONS);
+
+		binomialDesignEClass = createEClass(BINOMIAL_DESIGN);
+		createEAttribute(binomialDesignEClass, BINOMIAL_DESIGN__ORDER);
+
+		maximallyFlatDesignEClass = createEClass(MAXIMALLY_FLAT_DESIGN);
+		createEAttribute(maximallyFlatDesignEClass, MAXIMALLY_FLAT_DESIGN__FLATNESS);
+		createEAttribute(maximallyFlatDesignEClass, MAXIMALLY_FLAT_DESIGN__ZEROS);
+
+		savitzkyGolayDesignEClass = createEClass(SAVITZKY_GOLAY_DESIGN);
+		createEAttribute(savitzkyGolayDesignEClass, SAVITZKY_GOLAY_DESIGN__POINTS);
+		createEAttribute(savitzkyGolayDesignEClass, SAVITZKY_GOLAY_DESIGN__DEGREE);
+		createEAttribute(savitzkyGolayDesignEClass, SAVITZKY_GOLAY_DESIGN__DERIVATIVE);
+		createEAttribute(savitzkyGolayDesignEClass, SAVITZKY_GOLAY_DESIGN__POSITION);
+
+		lagrangeDelayDesignEClass = createEClass(LAGRANGE_DELAY_DESIGN);
+		createEAttribute(lagrangeDelayDesignEClass, LAGRANGE_DELAY_DESIGN__ORDER);
+		createEAttribute(lagrangeDelayDesignEClass, LAGRANGE_DELAY_DESIGN__DELAY);
+
+		raisedCosineDesignEClass = createEClass(RAISED_COSINE_DESIGN);
+		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__ROLL_OFF);
+		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__SAMPLES_PER_SYMBOL);
+		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__SYMBOLS);
+		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__ROOT);
+		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__GAIN);
+
 		coefficientsEClass = createEClass(COEFFICIENTS);
 		createEAttribute(coefficientsEClass, COEFFICIENTS__DESIGN_HASH);
 
@@ -3050,6 +3364,7 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		verdictEEnum = createEEnum(VERDICT);
 		decisionEEnum = createEEnum(DECISION);
 		windowKindEEnum = createEEnum(WINDOW_KIND);
+		pulseGainEEnum = createEEnum(PULSE_GAIN);
 
 		// Create data types
 		quantityEDataType = createEDataType(QUANTITY);
@@ -3112,6 +3427,12 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		givenDesignEClass.getESuperTypes().add(this.getDesign());
 		windowDesignEClass.getESuperTypes().add(this.getBandDesign());
 		equirippleDesignEClass.getESuperTypes().add(this.getBandDesign());
+		movingAverageDesignEClass.getESuperTypes().add(this.getDesign());
+		binomialDesignEClass.getESuperTypes().add(this.getDesign());
+		maximallyFlatDesignEClass.getESuperTypes().add(this.getDesign());
+		savitzkyGolayDesignEClass.getESuperTypes().add(this.getDesign());
+		lagrangeDelayDesignEClass.getESuperTypes().add(this.getDesign());
+		raisedCosineDesignEClass.getESuperTypes().add(this.getDesign());
 		realCoefficientsEClass.getESuperTypes().add(this.getCoefficients());
 		integerCoefficientsEClass.getESuperTypes().add(this.getCoefficients());
 
@@ -3296,6 +3617,34 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		initEAttribute(getEquirippleDesign_Type(), this.getPhaseType(), "type", null, 0, 1, EquirippleDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getEquirippleDesign_Tolerance(), this.getQuantity(), "tolerance", null, 0, 1, EquirippleDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
+		initEClass(movingAverageDesignEClass, MovingAverageDesign.class, "MovingAverageDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getMovingAverageDesign_Taps(), this.getQuantity(), "taps", null, 0, 1, MovingAverageDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getMovingAverageDesign_Sections(), this.getQuantity(), "sections", null, 0, 1, MovingAverageDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(binomialDesignEClass, BinomialDesign.class, "BinomialDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getBinomialDesign_Order(), this.getQuantity(), "order", null, 0, 1, BinomialDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(maximallyFlatDesignEClass, MaximallyFlatDesign.class, "MaximallyFlatDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getMaximallyFlatDesign_Flatness(), this.getQuantity(), "flatness", null, 0, 1, MaximallyFlatDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getMaximallyFlatDesign_Zeros(), this.getQuantity(), "zeros", null, 0, 1, MaximallyFlatDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(savitzkyGolayDesignEClass, SavitzkyGolayDesign.class, "SavitzkyGolayDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getSavitzkyGolayDesign_Points(), this.getQuantity(), "points", null, 0, 1, SavitzkyGolayDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSavitzkyGolayDesign_Degree(), this.getQuantity(), "degree", null, 0, 1, SavitzkyGolayDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSavitzkyGolayDesign_Derivative(), this.getQuantity(), "derivative", null, 0, 1, SavitzkyGolayDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getSavitzkyGolayDesign_Position(), this.getQuantity(), "position", null, 0, 1, SavitzkyGolayDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(lagrangeDelayDesignEClass, LagrangeDelayDesign.class, "LagrangeDelayDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getLagrangeDelayDesign_Order(), this.getQuantity(), "order", null, 0, 1, LagrangeDelayDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getLagrangeDelayDesign_Delay(), this.getQuantity(), "delay", null, 0, 1, LagrangeDelayDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(raisedCosineDesignEClass, RaisedCosineDesign.class, "RaisedCosineDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getRaisedCosineDesign_RollOff(), this.getQuantity(), "rollOff", null, 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getRaisedCosineDesign_SamplesPerSymbol(), this.getQuantity(), "samplesPerSymbol", null, 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getRaisedCosineDesign_Symbols(), this.getQuantity(), "symbols", null, 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getRaisedCosineDesign_Root(), ecorePackage.getEBoolean(), "root", "true", 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getRaisedCosineDesign_Gain(), this.getPulseGain(), "gain", null, 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
 		initEClass(coefficientsEClass, Coefficients.class, "Coefficients", IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getCoefficients_DesignHash(), ecorePackage.getEString(), "designHash", null, 0, 1, Coefficients.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
@@ -3448,6 +3797,11 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		addEEnumLiteral(windowKindEEnum, WindowKind.KAISER);
 		addEEnumLiteral(windowKindEEnum, WindowKind.DOLPH_CHEBYSHEV);
 		addEEnumLiteral(windowKindEEnum, WindowKind.DISCRETE_PROLATE);
+
+		initEEnum(pulseGainEEnum, PulseGain.class, "PulseGain");
+		addEEnumLiteral(pulseGainEEnum, PulseGain.UNITY_AT_ZERO);
+		addEEnumLiteral(pulseGainEEnum, PulseGain.UNIT_ENERGY);
+		addEEnumLiteral(pulseGainEEnum, PulseGain.CLOSED_FORM);
 
 		// Initialize data types
 		initEDataType(quantityEDataType, String.class, "Quantity", IS_SERIALIZABLE, !IS_GENERATED_INSTANCE_CLASS);
@@ -4719,6 +5073,162 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 			   "documentation", "Relative distance from the optimum at which the exchange stops; 0.0001 when empty."
 		   });
 		addAnnotation
+		  (movingAverageDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "The mean of the last samples, once or several times one after the other."
+		   });
+		addAnnotation
+		  (getMovingAverageDesign_Taps(),
+		   source,
+		   new String[] {
+			   "documentation", "Samples of one mean."
+		   });
+		addAnnotation
+		  (getMovingAverageDesign_Sections(),
+		   source,
+		   new String[] {
+			   "documentation", "How many means follow each other; 1 when empty."
+		   });
+		addAnnotation
+		  (binomialDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "The mean of two samples, many times one after the other: neither ripple nor overshoot."
+		   });
+		addAnnotation
+		  (getBinomialDesign_Order(),
+		   source,
+		   new String[] {
+			   "documentation", "Number of coefficients less one."
+		   });
+		addAnnotation
+		  (maximallyFlatDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "As flat as possible at 0 Hz and at half the sample rate (Herrmann, 1971); equal orders give a half-band filter."
+		   });
+		addAnnotation
+		  (getMaximallyFlatDesign_Flatness(),
+		   source,
+		   new String[] {
+			   "documentation", "Order of contact at 0 Hz."
+		   });
+		addAnnotation
+		  (getMaximallyFlatDesign_Zeros(),
+		   source,
+		   new String[] {
+			   "documentation", "Order of the zero at half the sample rate."
+		   });
+		addAnnotation
+		  (savitzkyGolayDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Smoothing or differentiation by a polynomial that is fitted to the last samples (Savitzky and Golay, 1964)."
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Points(),
+		   source,
+		   new String[] {
+			   "documentation", "Number of samples, odd."
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Degree(),
+		   source,
+		   new String[] {
+			   "documentation", "Degree of the polynomial."
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Derivative(),
+		   source,
+		   new String[] {
+			   "documentation", "Which derivative, per sample; 0 smooths, also when empty."
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Position(),
+		   source,
+		   new String[] {
+			   "documentation", "Where the polynomial is evaluated, in samples from the middle; positive is toward the newest."
+		   });
+		addAnnotation
+		  (lagrangeDelayDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "A delay by any number of samples, maximally flat at 0 Hz."
+		   });
+		addAnnotation
+		  (getLagrangeDelayDesign_Order(),
+		   source,
+		   new String[] {
+			   "documentation", "Number of coefficients less one."
+		   });
+		addAnnotation
+		  (getLagrangeDelayDesign_Delay(),
+		   source,
+		   new String[] {
+			   "documentation", "Delay in seconds."
+		   });
+		addAnnotation
+		  (pulseGainEEnum,
+		   source,
+		   new String[] {
+			   "documentation", "What a pulse is scaled to."
+		   });
+		addAnnotation
+		  (pulseGainEEnum.getELiterals().get(0),
+		   source,
+		   new String[] {
+			   "documentation", "The coefficients add up to 1."
+		   });
+		addAnnotation
+		  (pulseGainEEnum.getELiterals().get(1),
+		   source,
+		   new String[] {
+			   "documentation", "The squares of the coefficients add up to 1."
+		   });
+		addAnnotation
+		  (pulseGainEEnum.getELiterals().get(2),
+		   source,
+		   new String[] {
+			   "documentation", "The closed form for symbols of duration 1, unscaled."
+		   });
+		addAnnotation
+		  (raisedCosineDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Pulse of a data transmission: the raised cosine or its square root, sampled and cut."
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_RollOff(),
+		   source,
+		   new String[] {
+			   "documentation", "Part of the band that rolls off, 0 to 1."
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_SamplesPerSymbol(),
+		   source,
+		   new String[] {
+			   "documentation", "Samples per symbol."
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_Symbols(),
+		   source,
+		   new String[] {
+			   "documentation", "Length in symbols."
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_Root(),
+		   source,
+		   new String[] {
+			   "documentation", "The square root, otherwise the raised cosine itself."
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_Gain(),
+		   source,
+		   new String[] {
+			   "documentation", "What the pulse is scaled to."
+		   });
+		addAnnotation
 		  (coefficientsEClass,
 		   source,
 		   new String[] {
@@ -5649,6 +6159,132 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		   });
 		addAnnotation
 		  (getEquirippleDesign_Tolerance(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (movingAverageDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "moving-average",
+			   "label", "Moving average"
+		   });
+		addAnnotation
+		  (getMovingAverageDesign_Taps(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getMovingAverageDesign_Sections(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (binomialDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "binomial",
+			   "label", "Binomial"
+		   });
+		addAnnotation
+		  (getBinomialDesign_Order(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (maximallyFlatDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "maximally-flat",
+			   "label", "Maximally flat"
+		   });
+		addAnnotation
+		  (getMaximallyFlatDesign_Flatness(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getMaximallyFlatDesign_Zeros(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (savitzkyGolayDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "savitzky-golay",
+			   "label", "Savitzky-Golay"
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Points(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Degree(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Derivative(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getSavitzkyGolayDesign_Position(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (lagrangeDelayDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "lagrange-delay",
+			   "label", "Lagrange fractional delay"
+		   });
+		addAnnotation
+		  (getLagrangeDelayDesign_Order(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getLagrangeDelayDesign_Delay(),
+		   source,
+		   new String[] {
+			   "unit", "s"
+		   });
+		addAnnotation
+		  (raisedCosineDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "raised-cosine",
+			   "label", "Raised cosine pulse"
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_RollOff(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_SamplesPerSymbol(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getRaisedCosineDesign_Symbols(),
 		   source,
 		   new String[] {
 			   "unit", "1"

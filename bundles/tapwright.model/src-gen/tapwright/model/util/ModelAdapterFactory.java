@@ -230,6 +230,30 @@ public class ModelAdapterFactory extends AdapterFactoryImpl {
 				return createEquirippleDesignAdapter();
 			}
 			@Override
+			public Adapter caseMovingAverageDesign(MovingAverageDesign object) {
+				return createMovingAverageDesignAdapter();
+			}
+			@Override
+			public Adapter caseBinomialDesign(BinomialDesign object) {
+				return createBinomialDesignAdapter();
+			}
+			@Override
+			public Adapter caseMaximallyFlatDesign(MaximallyFlatDesign object) {
+				return createMaximallyFlatDesignAdapter();
+			}
+			@Override
+			public Adapter caseSavitzkyGolayDesign(SavitzkyGolayDesign object) {
+				return createSavitzkyGolayDesignAdapter();
+			}
+			@Override
+			public Adapter caseLagrangeDelayDesign(LagrangeDelayDesign object) {
+				return createLagrangeDelayDesignAdapter();
+			}
+			@Override
+			public Adapter caseRaisedCosineDesign(RaisedCosineDesign object) {
+				return createRaisedCosineDesignAdapter();
+			}
+			@Override
 			public Adapter caseCoefficients(Coefficients object) {
 				return createCoefficientsAdapter();
 			}
@@ -850,6 +874,90 @@ public class ModelAdapterFactory extends AdapterFactoryImpl {
 	 * @generated
 	 */
 	public Adapter createEquirippleDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.MovingAverageDesign <em>Moving Average Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.MovingAverageDesign
+	 * @generated
+	 */
+	public Adapter createMovingAverageDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.BinomialDesign <em>Binomial Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.BinomialDesign
+	 * @generated
+	 */
+	public Adapter createBinomialDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.MaximallyFlatDesign <em>Maximally Flat Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.MaximallyFlatDesign
+	 * @generated
+	 */
+	public Adapter createMaximallyFlatDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.SavitzkyGolayDesign <em>Savitzky Golay Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.SavitzkyGolayDesign
+	 * @generated
+	 */
+	public Adapter createSavitzkyGolayDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.LagrangeDelayDesign <em>Lagrange Delay Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.LagrangeDelayDesign
+	 * @generated
+	 */
+	public Adapter createLagrangeDelayDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.RaisedCosineDesign <em>Raised Cosine Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.RaisedCosineDesign
+	 * @generated
+	 */
+	public Adapter createRaisedCosineDesignAdapter() {
 		return null;
 	}
 

@@ -339,6 +339,48 @@ public class ModelSwitch<T> extends Switch<T> {
 				if (result == null) result = defaultCase(theEObject);
 				return result;
 			}
+			case ModelPackage.MOVING_AVERAGE_DESIGN: {
+				MovingAverageDesign movingAverageDesign = (MovingAverageDesign)theEObject;
+				T result = caseMovingAverageDesign(movingAverageDesign);
+				if (result == null) result = caseDesign(movingAverageDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.BINOMIAL_DESIGN: {
+				BinomialDesign binomialDesign = (BinomialDesign)theEObject;
+				T result = caseBinomialDesign(binomialDesign);
+				if (result == null) result = caseDesign(binomialDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.MAXIMALLY_FLAT_DESIGN: {
+				MaximallyFlatDesign maximallyFlatDesign = (MaximallyFlatDesign)theEObject;
+				T result = caseMaximallyFlatDesign(maximallyFlatDesign);
+				if (result == null) result = caseDesign(maximallyFlatDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.SAVITZKY_GOLAY_DESIGN: {
+				SavitzkyGolayDesign savitzkyGolayDesign = (SavitzkyGolayDesign)theEObject;
+				T result = caseSavitzkyGolayDesign(savitzkyGolayDesign);
+				if (result == null) result = caseDesign(savitzkyGolayDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.LAGRANGE_DELAY_DESIGN: {
+				LagrangeDelayDesign lagrangeDelayDesign = (LagrangeDelayDesign)theEObject;
+				T result = caseLagrangeDelayDesign(lagrangeDelayDesign);
+				if (result == null) result = caseDesign(lagrangeDelayDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.RAISED_COSINE_DESIGN: {
+				RaisedCosineDesign raisedCosineDesign = (RaisedCosineDesign)theEObject;
+				T result = caseRaisedCosineDesign(raisedCosineDesign);
+				if (result == null) result = caseDesign(raisedCosineDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
 			case ModelPackage.COEFFICIENTS: {
 				Coefficients coefficients = (Coefficients)theEObject;
 				T result = caseCoefficients(coefficients);
@@ -1008,6 +1050,96 @@ public class ModelSwitch<T> extends Switch<T> {
 	 * @generated
 	 */
 	public T caseEquirippleDesign(EquirippleDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Moving Average Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Moving Average Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseMovingAverageDesign(MovingAverageDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Binomial Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Binomial Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseBinomialDesign(BinomialDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Maximally Flat Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Maximally Flat Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseMaximallyFlatDesign(MaximallyFlatDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Savitzky Golay Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Savitzky Golay Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseSavitzkyGolayDesign(SavitzkyGolayDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Lagrange Delay Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Lagrange Delay Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseLagrangeDelayDesign(LagrangeDelayDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Raised Cosine Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Raised Cosine Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseRaisedCosineDesign(RaisedCosineDesign object) {
 		return null;
 	}
 

@@ -8,6 +8,7 @@ import java.util.OptionalDouble;
 import tapwright.core.InputException;
 import tapwright.core.quantity.Numbers;
 import tapwright.core.quantity.Words;
+import tapwright.core.verify.Partners;
 import tapwright.core.verify.RequirementKind;
 import tapwright.dsp.verify.GainLimit;
 import tapwright.dsp.verify.GainLimit.Breakpoint;
@@ -30,7 +31,11 @@ public final class GainKind implements RequirementKind<GainRequirement> {
 	}
 
 	@Override
-	public GainLimit statement(GainRequirement gain, Numbers numbers) throws InputException {
+	public GainLimit statement(GainRequirement gain, Numbers numbers, Partners partners) throws InputException {
+		return limit(gain, numbers);
+	}
+
+	private static GainLimit limit(GainRequirement gain, Numbers numbers) throws InputException {
 		GainReference reference = reference(gain, numbers);
 		if (gain.getPoints().isEmpty()) {
 			double min = numbers.get(gain, Literals.GAIN_REQUIREMENT__MIN, NO_LOWER);
@@ -59,7 +64,7 @@ public final class GainKind implements RequirementKind<GainRequirement> {
 
 	@Override
 	public String describe(GainRequirement gain, Numbers numbers) throws InputException {
-		List<Breakpoint> points = statement(gain, numbers).breakpoints();
+		List<Breakpoint> points = limit(gain, numbers).breakpoints();
 		Breakpoint first = points.getFirst();
 		Breakpoint last = points.getLast();
 		String band = first.frequency() == last.frequency() ? "at " + Words.exactly(first.frequency(), "Hz")

@@ -3,6 +3,7 @@ package tapwright.core.verify.kind;
 
 import tapwright.core.InputException;
 import tapwright.core.quantity.Numbers;
+import tapwright.core.verify.Partners;
 import tapwright.core.verify.RequirementKind;
 import tapwright.model.Requirement;
 
@@ -31,7 +32,8 @@ record PlainKind<T extends Requirement>(Class<T> type, String valueUnit, String 
 	}
 
 	@Override
-	public tapwright.dsp.verify.Requirement statement(T requirement, Numbers numbers) throws InputException {
+	public tapwright.dsp.verify.Requirement statement(T requirement, Numbers numbers, Partners partners)
+			throws InputException {
 		return claim.of(requirement, numbers);
 	}
 
