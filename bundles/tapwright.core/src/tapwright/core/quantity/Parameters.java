@@ -22,6 +22,9 @@ public final class Parameters implements Expression.Names {
 	/** No parameters. */
 	public static final Parameters NONE = new Parameters(List.of());
 
+	/** A person builds on a few others; this keeps a hostile file from exhausting the stack. */
+	private static final int LONGEST_CHAIN = 100;
+
 	private record Definition(String text, String unit) {
 	}
 
@@ -74,6 +77,9 @@ public final class Parameters implements Expression.Names {
 			Quantity value = Expression.evaluate(definition.text(), other -> {
 				if (open.contains(other)) {
 					throw new InputException("", "goes round in a circle: " + String.join(" -> ", open) + " -> " + other);
+				}
+				if (open.size() > LONGEST_CHAIN) {
+					throw new InputException("", "refers to more than " + LONGEST_CHAIN + " parameters one behind the other");
 				}
 				if (definitions.containsKey(other)) {
 					evaluate(other, open);

@@ -78,13 +78,15 @@ class ParametersTest {
 	}
 
 	@Test
-	void survivesAThousandParametersInAChain() throws InputException {
+	void boundTheLengthOfAChain() throws InputException {
 		var chain = new ArrayList<Parameter>();
 		chain.add(parameter("p0", "1", Unit.PLAIN));
 		for (int k = 1; k < 1000; k++) {
 			chain.add(parameter("p" + k, "p" + (k - 1) + " + 1", Unit.PLAIN));
 		}
-		assertEquals(1000, new Parameters(chain.reversed()).value("p999").value().intValue());
+		assertEquals(1000, new Parameters(chain).value("p999").value().intValue());
+		var backward = new Parameters(chain.reversed());
+		assertTrue(backward.problems().get("p999").getMessage().contains("more than 100"), backward.problems().toString());
 	}
 
 	private static Parameter parameter(String name, String value, Unit unit) {
