@@ -133,11 +133,7 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 		double peak = peakOutside(error);
 		double excess = upper / lower - 1;
 		if (!(excess <= USELESS)) {
-			throw new DesignException(peak > UNBEARABLE * wanted
-					? String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands, and coefficients in double"
-							+ " precision cannot carry it; make the transitions more equal in width or reduce the taps", peak)
-					: String.format(Locale.ROOT, "the best weighted error is near what double precision resolves (errors up to %.3g, best"
-							+ " possible %.3g); reduce the taps or narrow the transitions", upper, lower));
+			throw useless(lower, upper, peak, wanted);
 		}
 		List<String> notes = new ArrayList<>();
 		if (peak > HIGH_PEAK * wanted) {
@@ -148,6 +144,18 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 					+ " relatively; double precision gives no better proof.", excess));
 		}
 		return new EquirippleSolution(h, lower, upper, extremes, peak, List.copyOf(notes));
+	}
+
+	private static DesignException useless(double lower, double upper, double peak, double wanted) {
+		if (peak > UNBEARABLE * wanted) {
+			return new DesignException(String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands, and"
+					+ " coefficients in double precision cannot carry it; make the transitions more equal in width or reduce the taps",
+					peak));
+		}
+		return new DesignException(Double.isFinite(upper)
+				? String.format(Locale.ROOT, "the best weighted error is near what double precision resolves (errors up to %.3g, best"
+						+ " possible %.3g); reduce the taps or narrow the transitions", upper, lower)
+				: "rounding errors leave no usable coefficients; reduce the taps or widen very narrow bands");
 	}
 
 	private double peakOutside(WeightedError error) {

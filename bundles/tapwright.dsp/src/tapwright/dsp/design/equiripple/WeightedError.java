@@ -18,6 +18,8 @@ final class WeightedError {
 	private static final double U = 0x1p-53;
 	private static final int TERMS = TaylorCells.TERMS + 1;
 	private static final int HALVINGS = 40;
+	/** After so many parts the bound is left as coarse as it is; this takes some tenths of a second. */
+	private static final int MOST_PARTS = 1_000_000;
 
 	private final TaylorCells cells = new TaylorCells();
 	private final List<Band> bands;
@@ -146,6 +148,7 @@ final class WeightedError {
 		private final double tolerance;
 		private final double[][] parts = new double[HALVINGS + 1][TERMS];
 		private double slack;
+		private int visits;
 		/** No error is larger. */
 		private double bound;
 		/** Some error is at least as large. */
@@ -175,11 +178,16 @@ final class WeightedError {
 				}
 			}
 			double above = range + rest + slack;
+			visits++;
 			if (above <= bound) {
 				return;
 			}
+			if (!(above < Double.POSITIVE_INFINITY)) {
+				bound = Double.POSITIVE_INFINITY;
+				return;
+			}
 			reached = Math.max(reached, Math.abs(value(p, at)) - slack);
-			if (above <= reached * (1 + tolerance) || rest <= slack / 4 || depth == HALVINGS) {
+			if (above <= reached * (1 + tolerance) || rest <= slack / 4 || depth == HALVINGS || visits > MOST_PARTS) {
 				bound = above;
 				return;
 			}

@@ -6,8 +6,10 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Random;
 import java.util.concurrent.CancellationException;
 
 import org.junit.jupiter.api.Test;
@@ -91,7 +93,7 @@ class EquirippleTest {
 	void noPerturbedFilterBeatsTheLowerBound() throws DesignException {
 		List<Band> bands = bands(0, .1, 1, 1, .15, .5, 0, 10);
 		EquirippleSolution solution = new Equiripple(25, Symmetry.EVEN, bands, 1e-6).solve(Progress.NONE);
-		var random = new java.util.Random(1);
+		var random = new Random(1);
 		for (int trial = 0; trial < 50; trial++) {
 			double[] h = solution.taps().clone();
 			for (int k = 0; k <= 12; k++) {
@@ -168,6 +170,36 @@ class EquirippleTest {
 	}
 
 	@Test
+	void anythingAtAllIsSolvedWithinItsBoundsOrRefused() {
+		var random = new Random(3);
+		int solved = 0;
+		for (int trial = 0; trial < Integer.getInteger("tapwright.trials", 300); trial++) {
+			int count = 1 + random.nextInt(6);
+			double[] edges = random.doubles(2 * count, 0, 0.5).sorted().toArray();
+			Symmetry symmetry = random.nextInt(3) == 0 ? Symmetry.ODD : Symmetry.EVEN;
+			var bands = new ArrayList<Band>();
+			for (int b = 0; b < count; b++) {
+				double weight = Math.pow(10, 6 * random.nextDouble() - 3);
+				double desired = random.nextInt(3) == 0 ? random.nextGaussian() : random.nextInt(2);
+				bands.add(new Band(edges[2 * b], edges[2 * b + 1], desired, random.nextBoolean() ? desired : random.nextGaussian(), weight,
+						random.nextBoolean() ? weight : 1));
+			}
+			int taps = 3 + random.nextInt(100);
+			try {
+				EquirippleSolution solution = new Equiripple(taps, symmetry, bands).solve(Progress.NONE);
+				double worst = worst(solution.taps(), symmetry, bands);
+				assertTrue(worst <= solution.upperBound(), () -> taps + " taps, " + symmetry + ", " + bands);
+				assertTrue(solution.lowerBound() <= solution.upperBound());
+				assertTrue(solution.excess() <= Equiripple.STANDARD || !solution.notes().isEmpty());
+				solved++;
+			} catch (DesignException refusal) {
+				assertTrue(refusal.getMessage().contains("reduce the taps"), refusal::getMessage);
+			}
+		}
+		assertTrue(solved > 100, "only " + solved);
+	}
+
+	@Test
 	void impossibleRequestsAreRefusedInWords() {
 		assertMessage("type II", () -> new Equiripple(20, Symmetry.EVEN, bands(0, .1, 0, 1, .2, .5, 1, 1)));
 		assertMessage("type III", () -> new Equiripple(21, Symmetry.ODD, bands(.1, .5, 1, 1)));
@@ -231,7 +263,7 @@ class EquirippleTest {
 
 	/** From, to, desired, weight for each band. */
 	static List<Band> bands(double... numbers) {
-		var bands = new java.util.ArrayList<Band>();
+		var bands = new ArrayList<Band>();
 		for (int k = 0; k < numbers.length; k += 4) {
 			bands.add(new Band(numbers[k], numbers[k + 1], numbers[k + 2], numbers[k + 3]));
 		}
