@@ -90,10 +90,11 @@ final class TapwrightActionBarAdvisor extends ActionBarAdvisor {
 		var tools = new ToolBarManager(bar.getStyle());
 		tools.add(action(ActionFactory.NEW));
 		tools.add(action(ActionFactory.SAVE));
-		tools.add(new Separator());
-		tools.add(command(IWorkbenchCommandConstants.EDIT_UNDO, ISharedImages.IMG_TOOL_UNDO));
-		tools.add(command(IWorkbenchCommandConstants.EDIT_REDO, ISharedImages.IMG_TOOL_REDO));
 		bar.add(new ToolBarContributionItem(tools, IWorkbenchActionConstants.TOOLBAR_FILE));
+		var edits = new ToolBarManager(bar.getStyle());
+		edits.add(command(IWorkbenchCommandConstants.EDIT_UNDO, ISharedImages.IMG_TOOL_UNDO));
+		edits.add(command(IWorkbenchCommandConstants.EDIT_REDO, ISharedImages.IMG_TOOL_REDO));
+		bar.add(new ToolBarContributionItem(edits, IWorkbenchActionConstants.M_EDIT));
 		bar.add(new GroupMarker(IWorkbenchActionConstants.MB_ADDITIONS));
 	}
 

@@ -10,6 +10,7 @@ import tapwright.core.InputException;
 import tapwright.core.quantity.Expression;
 import tapwright.core.quantity.Numbers;
 import tapwright.core.verify.FilterQuestion;
+import tapwright.core.verify.Partners;
 import tapwright.core.verify.RequirementKind;
 import tapwright.core.verify.RequirementKinds;
 import tapwright.dsp.verify.Subject;
@@ -50,7 +51,7 @@ public record FilterSnapshot(FilterQuestion question, Map<String, tapwright.dsp.
 	private static <T extends Requirement> Optional<tapwright.dsp.verify.Requirement> statement(T requirement, Numbers numbers) {
 		try {
 			RequirementKind<T> kind = RequirementKinds.of(requirement);
-			return Optional.of(kind.statement(requirement, numbers));
+			return Optional.of(kind.statement(requirement, numbers, Partners.NONE));
 		} catch (InputException | IllegalArgumentException e) {
 			return Optional.empty();
 		}
