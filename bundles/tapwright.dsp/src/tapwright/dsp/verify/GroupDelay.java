@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.dsp.verify;
 
+import java.util.Optional;
+
 import org.apache.commons.math3.fraction.BigFraction;
 
 import tapwright.dsp.exact.Enclosure;
@@ -19,7 +21,7 @@ import tapwright.dsp.exact.Rationals;
  * @param max
  *            longest delay in seconds, infinity for none
  */
-public record GroupDelay(double from, double to, double min, double max) implements Requirement {
+public record GroupDelay(double from, double to, double min, double max) implements Requirement, ClockRange.Aware {
 
 	/** Checks the numbers. */
 	public GroupDelay {
@@ -47,6 +49,20 @@ public record GroupDelay(double from, double to, double min, double max) impleme
 			low = new Proof(low.verdict(), low.worst(), low.value().negate(), min, low.margin(), low.note());
 		}
 		return high == null ? low : low == null ? high : Proofs.worse(high, low);
+	}
+
+	// Sufficient, not necessary: the widest band, and the limits in samples that are the strictest of any clock.
+	@Override
+	public Optional<Proof> prove(Subject subject, Effort effort, ClockRange clocks) {
+		double shortest = min / clocks.nominal() * (min > 0 ? clocks.fastest() : clocks.slowest());
+		double longest = max / clocks.nominal() * (max > 0 ? clocks.slowest() : clocks.fastest());
+		if (!clocks.outward() || shortest > longest) {
+			return Optional.empty();
+		}
+		Proof proof = new GroupDelay(clocks.lowest(from), clocks.highest(to), shortest, longest).prove(subject, effort);
+		return proof.verdict() != Verdict.MET ? Optional.empty()
+				: Optional.of(new Proof(Verdict.MET, proof.worst(), proof.value(), proof.limit(), proof.margin(),
+						"The limit is the strictest of all clocks, in seconds of the nominal one."));
 	}
 
 	// The largest delay, or the largest negative delay, against its limit.

@@ -54,8 +54,8 @@ final class QuickGain {
 				factors[k] = StrictMath.pow(10, level + shift) * unit;
 			} else {
 				limitDoubt = Math.max(limitDoubt, LocalSlope.doubt(line));
-				factors[k] = unit;
-				possible &= exponent == 0 && isComfortable(StrictMath.pow(10, level))
+				factors[k] = Math.scalb(unit, exponent);
+				possible &= isComfortable(StrictMath.pow(10, level))
 						&& isComfortable(StrictMath.pow(10, -line.toDb() / 20));
 			}
 			possible &= isComfortable(factors[k]);
