@@ -27,7 +27,8 @@ public final class Bands {
 			Band before = copy.get(k - 1);
 			Band band = copy.get(k);
 			if (band.from() < before.to()) {
-				throw new IllegalArgumentException("band " + (k + 1) + " starts at " + band.from() + ", before band " + k + " ends at "
+				throw new IllegalArgumentException("band " + (k + 1) + " starts at " + band.from() + ", before band "
+						+ k + " ends at "
 						+ before.to() + " (cycles per sample); bands must rise and not overlap");
 			}
 			if (!touching && band.from() == before.to()) {

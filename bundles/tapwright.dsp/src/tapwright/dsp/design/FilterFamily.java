@@ -33,8 +33,8 @@ public interface FilterFamily {
 	}
 
 	/**
-	 * Whether it is proven that no filter with this many coefficients meets the requirements, nor a shorter one whose number of
-	 * coefficients is even or odd alike, whatever the method.
+	 * Whether it is proven that no filter with this many coefficients meets the requirements, nor a shorter one whose
+	 * number of coefficients is even or odd alike, whatever the method.
 	 */
 	default boolean excludes(int taps, Progress progress) {
 		return false;

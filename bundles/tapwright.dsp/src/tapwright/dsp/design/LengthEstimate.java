@@ -4,8 +4,8 @@ package tapwright.dsp.design;
 import java.util.List;
 
 /**
- * Estimates of the number of coefficients that a low-pass needs. Estimates only: start a search from them. Deviations are linear,
- * transitions in cycles per sample; the results are not whole numbers.
+ * Estimates of the number of coefficients that a low-pass needs. Estimates only: start a search from them. Deviations
+ * are linear, transitions in cycles per sample; the results are not whole numbers.
  */
 public final class LengthEstimate {
 
@@ -13,8 +13,8 @@ public final class LengthEstimate {
 	}
 
 	/**
-	 * For equiripple designs (J. F. Kaiser, Nonrecursive digital filter design using the I0-sinh window function, Proceedings of the
-	 * IEEE International Symposium on Circuits and Systems, 1974).
+	 * For equiripple designs (J. F. Kaiser, Nonrecursive digital filter design using the I0-sinh window function,
+	 * Proceedings of the IEEE International Symposium on Circuits and Systems, 1974).
 	 */
 	public static double kaiser(double passDeviation, double stopDeviation, double transition) {
 		check(passDeviation, stopDeviation, transition);
@@ -22,9 +22,10 @@ public final class LengthEstimate {
 	}
 
 	/**
-	 * For equiripple designs, more accurate (O. Herrmann, L. R. Rabiner, D. S. K. Chan, Practical design rules for optimum finite
-	 * impulse response low-pass digital filters, Bell System Technical Journal 52(6), 1973; constants from memory). The formula is
-	 * meant for a stop-band deviation that is not the larger one, so deviations are swapped when needed.
+	 * For equiripple designs, more accurate (O. Herrmann, L. R. Rabiner, D. S. K. Chan, Practical design rules for
+	 * optimum finite impulse response low-pass digital filters, Bell System Technical Journal 52(6), 1973; constants
+	 * from memory). The formula is meant for a stop-band deviation that is not the larger one, so deviations are
+	 * swapped when needed.
 	 */
 	public static double herrmann(double passDeviation, double stopDeviation, double transition) {
 		check(passDeviation, stopDeviation, transition);
@@ -43,7 +44,8 @@ public final class LengthEstimate {
 	}
 
 	/**
-	 * Herrmann's estimate for bands whose weights are one over the allowed deviation: the largest over all transitions; at least 3.
+	 * Herrmann's estimate for bands whose weights are one over the allowed deviation: the largest over all transitions;
+	 * at least 3.
 	 */
 	public static int forBands(List<Band> bands) {
 		double most = 3;

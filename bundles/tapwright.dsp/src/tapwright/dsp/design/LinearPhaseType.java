@@ -6,13 +6,13 @@ import java.util.List;
 import tapwright.dsp.exact.Symmetry;
 
 /**
- * The four types of linear-phase filter. With c = (N-1)/2 the response is H(f) = exp(-2 pi i f c) A(f) for even symmetry and
- * H(f) = i exp(-2 pi i f c) A(f) for odd symmetry, where the real <i>amplitude</i> A is a sum of cosines or sines. Every amplitude
- * can be written A = Q P with a fixed factor Q, positive between 0 and half the sample rate, and a free sum of cosines
- * P(f) = p[0] + p[1] cos(2 pi f) + ... + p[L-1] cos(2 pi f (L-1)).
+ * The four types of linear-phase filter. With c = (N-1)/2 the response is H(f) = exp(-2 pi i f c) A(f) for even
+ * symmetry and H(f) = i exp(-2 pi i f c) A(f) for odd symmetry, where the real <i>amplitude</i> A is a sum of cosines
+ * or sines. Every amplitude can be written A = Q P with a fixed factor Q, positive between 0 and half the sample rate,
+ * and a free sum of cosines P(f) = p[0] + p[1] cos(2 pi f) + ... + p[L-1] cos(2 pi f (L-1)).
  * <p>
- * Source: J. H. McClellan and T. W. Parks, A unified approach to the design of optimum FIR linear-phase digital filters, IEEE
- * Transactions on Circuit Theory 20(6), 1973.
+ * Source: J. H. McClellan and T. W. Parks, A unified approach to the design of optimum FIR linear-phase digital
+ * filters, IEEE Transactions on Circuit Theory 20(6), 1973.
  */
 public enum LinearPhaseType {
 
@@ -47,7 +47,8 @@ public enum LinearPhaseType {
 		LinearPhaseType type = symmetry == Symmetry.EVEN ? odd ? I : II : odd ? III : IV;
 		if (taps < 1 || type.unknowns(taps) < 1) {
 			throw new IllegalArgumentException(taps + " coefficients with " + symmetry.name().toLowerCase()
-					+ " symmetry leave nothing to design; ask for at least " + (type == III ? 3 : symmetry == Symmetry.EVEN ? 1 : 2));
+					+ " symmetry leave nothing to design; ask for at least "
+					+ (type == III ? 3 : symmetry == Symmetry.EVEN ? 1 : 2));
 		}
 		return type;
 	}
@@ -87,7 +88,8 @@ public enum LinearPhaseType {
 			case I -> 1;
 			// Sines of the distance to the zero keep full accuracy there.
 			case II -> Math.sin(Math.PI * (0.5 - frequency));
-			case III -> frequency <= 0.25 ? Math.sin(2 * Math.PI * frequency) : Math.sin(2 * Math.PI * (0.5 - frequency));
+			case III -> frequency <= 0.25 ? Math.sin(2 * Math.PI * frequency)
+					: Math.sin(2 * Math.PI * (0.5 - frequency));
 			case IV -> Math.sin(Math.PI * frequency);
 		};
 	}
@@ -106,7 +108,8 @@ public enum LinearPhaseType {
 		if (this == III) {
 			h[n / 2] = 0;
 		}
-		// Product formulas: 2 cos a cos b = cos(a+b) + cos(a-b) and 2 sin a cos b = sin(a+b) + sin(a-b); p at index -k is p at k.
+		// Product formulas: 2 cos a cos b = cos(a+b) + cos(a-b) and 2 sin a cos b = sin(a+b) + sin(a-b); p at index -k
+		// is p at k.
 		for (int k = 0; k < n / 2 + (this == I ? 1 : 0); k++) {
 			double value = switch (this) {
 				case I -> k == 0 ? p[0] : p[k] / 2;
@@ -122,8 +125,8 @@ public enum LinearPhaseType {
 	}
 
 	/**
-	 * The coefficients a[k] of the amplitude A(f) = sum of a[k] cos(2 pi f v[k]) or sin(2 pi f v[k]), with v[k] = k for type I,
-	 * k + 1 for type III, and k + 1/2 for types II and IV.
+	 * The coefficients a[k] of the amplitude A(f) = sum of a[k] cos(2 pi f v[k]) or sin(2 pi f v[k]), with v[k] = k for
+	 * type I, k + 1 for type III, and k + 1/2 for types II and IV.
 	 *
 	 * @param taps
 	 *            h[0..N-1]; only its first half is read
@@ -165,10 +168,13 @@ public enum LinearPhaseType {
 	}
 
 	private IllegalArgumentException impossible(Band band, String place, double desired) {
-		return new IllegalArgumentException("a filter with " + (oddLength ? "an odd" : "an even") + " number of coefficients and "
-				+ symmetry.name().toLowerCase() + " symmetry (type " + this + ") has gain 0 at " + place + ", but the band from "
+		return new IllegalArgumentException("a filter with " + (oddLength ? "an odd" : "an even")
+				+ " number of coefficients and "
+				+ symmetry.name().toLowerCase() + " symmetry (type " + this + ") has gain 0 at " + place
+				+ ", but the band from "
 				+ band.from() + " to " + band.to() + " asks for " + desired + " there; use "
-				+ (this == II ? "an odd number of coefficients" : this == III ? "another number of coefficients or end the band earlier"
+				+ (this == II ? "an odd number of coefficients" : this == III
+				? "another number of coefficients or end the band earlier"
 						: "even symmetry or start the band later"));
 	}
 

@@ -13,10 +13,10 @@ import tapwright.dsp.design.ShortestFilter.Trial;
 import tapwright.dsp.verify.Verdict;
 
 /**
- * Searches the smallest number of coefficients that are <i>proven</i> to meet all requirements: from an estimate up or down with
- * growing steps until the answer is bracketed, then by halving, for odd and even numbers apart. Nothing guarantees that a longer
- * filter is better (rounding to a coefficient format, window designs), so some lengths below the answer are tried too, and the
- * notes say what was tried and what is proven.
+ * Searches the smallest number of coefficients that are <i>proven</i> to meet all requirements: from an estimate up or
+ * down with growing steps until the answer is bracketed, then by halving, for odd and even numbers apart. Nothing
+ * guarantees that a longer filter is better (rounding to a coefficient format, window designs), so some lengths below
+ * the answer are tried too, and the notes say what was tried and what is proven.
  */
 public final class ShortestSearch {
 
@@ -33,8 +33,8 @@ public final class ShortestSearch {
 	public interface Acceptance {
 
 		/**
-		 * The verdict over all requirements: met when each is proven to be met, missed when one is proven to be missed. The
-		 * coefficients may be rounded to a format first; then the verdict is on the rounded ones.
+		 * The verdict over all requirements: met when each is proven to be met, missed when one is proven to be missed.
+		 * The coefficients may be rounded to a format first; then the verdict is on the rounded ones.
 		 */
 		Verdict judge(double[] taps);
 	}
@@ -47,7 +47,8 @@ public final class ShortestSearch {
 	 */
 	public ShortestSearch(Acceptance acceptance, int longest, Progress progress) {
 		if (longest < 1) {
-			throw new IllegalArgumentException("the greatest number of coefficients is " + longest + "; it must be at least 1");
+			throw new IllegalArgumentException("the greatest number of coefficients is " + longest
+					+ "; it must be at least 1");
 		}
 		this.acceptance = acceptance;
 		this.longest = longest;
@@ -111,11 +112,13 @@ public final class ShortestSearch {
 				if (acceptance.judge(result.taps()) == Verdict.MET) {
 					boolean proven = excluded(taps - 1) && excluded(taps - 2);
 					notes.add(proven ? "It is proven that no shorter filter of this symmetry meets every requirement."
-							: "Shorter lengths that were tried do not meet every requirement, but nothing proves that none does.");
-					return new ShortestFilter(family.name(), Optional.of(new Found(taps, design, result, proven)), List.copyOf(trials),
+							: "The shorter lengths that were tried do not meet every requirement; no proof excludes others.");
+					return new ShortestFilter(family.name(), Optional.of(new Found(taps, design, result, proven)),
+							List.copyOf(trials),
 							List.copyOf(notes));
 				}
-				record(new Trial(taps, Verdict.UNPROVEN, "designed again from its length alone it no longer meets every requirement"));
+				record(new Trial(taps, Verdict.UNPROVEN,
+						"designed again from its length alone it no longer meets every requirement"));
 			} catch (DesignException e) {
 				record(new Trial(taps, Verdict.UNPROVEN, e.getMessage()));
 			}
@@ -221,7 +224,8 @@ public final class ShortestSearch {
 					break;
 				}
 				if (meets(met - 2 * guard)) {
-					notes.add("The answers are not monotone: " + missed + " coefficients do not meet every requirement, though "
+					notes.add("The answers are not monotone: " + missed
+							+ " coefficients do not meet every requirement, though "
 							+ (met - 2 * guard) + " do.");
 					return descend(met - 2 * guard);
 				}

@@ -18,8 +18,8 @@ import tapwright.dsp.exact.Symmetry;
 import tapwright.dsp.verify.Verdict;
 
 /**
- * Times the designs beside scipy in one run, when python3 with scipy is installed: best of many runs, warm, one thread. Every time of
- * ours includes the proof. Not a test; start main.
+ * Times the designs beside scipy in one run, when python3 with scipy is installed: best of many runs, warm, one thread.
+ * Every time of ours includes the proof. Not a test; start main.
  */
 public final class DesignBenchmark {
 
@@ -63,8 +63,10 @@ public final class DesignBenchmark {
 		}
 	}
 
-	private static void equiripple(Map<String, String[]> reference, int taps, double stop, double weight) throws DesignException {
-		var design = new Equiripple(taps, Symmetry.EVEN, List.of(new Band(0, 0.2, 1, 1), new Band(stop, 0.5, 0, weight)));
+	private static void equiripple(Map<String, String[]> reference, int taps, double stop,
+			double weight) throws DesignException {
+		var design = new Equiripple(taps, Symmetry.EVEN, List.of(new Band(0, 0.2, 1, 1),
+				new Band(stop, 0.5, 0, weight)));
 		line(reference, "equiripple " + taps + " " + (weight == 1 ? stop : ""), 
 				() -> Double.toString(design.solve(Progress.NONE).upperBound()));
 	}
@@ -80,7 +82,8 @@ public final class DesignBenchmark {
 		} while (System.nanoTime() < end);
 		String[] other = reference.getOrDefault(name.trim(), new String[] { "", "NaN", "not run" });
 		double seconds = Double.parseDouble(other[1].equals("nan") ? "NaN" : other[1]);
-		System.out.printf(Locale.ROOT, "%-22s %8.3f  %8.3f  %5.2f  %-21s  %s%n", name, least / 1e6, seconds * 1e3, least / 1e9 / seconds,
+		System.out.printf(Locale.ROOT, "%-22s %8.3f  %8.3f  %5.2f  %-21s  %s%n", name, least / 1e6, seconds * 1e3,
+				least / 1e9 / seconds,
 				error, other[2]);
 	}
 
@@ -101,7 +104,9 @@ public final class DesignBenchmark {
 			}
 			best = Math.min(best, System.nanoTime() - start);
 		}
-		System.out.printf(Locale.ROOT, "shortest filter, both parities, a coarse grid instead of the proof: %.2f ms each%n", best / 1e6 / count);
+		System.out.printf(Locale.ROOT,
+				"shortest filter, both parities, a coarse grid instead of the proof: %.2f ms each%n",
+				best / 1e6 / count);
 	}
 
 	private static boolean meets(double[] taps, List<Band> bands) {

@@ -66,7 +66,8 @@ class ShortestSearchTest {
 		// A little more attenuation than needed, since the formula for beta is an approximation.
 		KaiserEstimate estimate = KaiserEstimate.ofRipple(0.9e-3, 0.05);
 		List<ShortestFilter> answers = new ShortestSearch(taps -> judge(taps, bands), 500, Progress.NONE)
-				.searchAll(List.of(new EquirippleFamily(Symmetry.EVEN, bands, true), FilterFamily.of("Kaiser window", estimate.taps(),
+				.searchAll(List.of(new EquirippleFamily(Symmetry.EVEN, bands, true),
+				FilterFamily.of("Kaiser window", estimate.taps(),
 						taps -> new WindowDesign(taps, Symmetry.EVEN, bands, estimate.window()))));
 		int equiripple = answers.get(0).found().orElseThrow().taps();
 		int window = answers.get(1).found().orElseThrow().taps();
@@ -110,7 +111,8 @@ class ShortestSearchTest {
 			}
 		};
 		var search = new ShortestSearch(taps -> Verdict.MET, 100, cancelled);
-		assertThrows(CancellationException.class, () -> search.search(FilterFamily.of("any", 9, n -> p -> new DesignResult(1))));
+		assertThrows(CancellationException.class, () -> search.search(FilterFamily.of("any", 9, n -> p ->
+				new DesignResult(1))));
 	}
 
 	@Test
@@ -122,7 +124,8 @@ class ShortestSearchTest {
 				messages.add(message);
 			}
 		};
-		new ShortestSearch(taps -> Verdict.MET, 100, progress).search(FilterFamily.of("any", 9, n -> p -> new DesignResult(1)));
+		new ShortestSearch(taps -> Verdict.MET, 100, progress)
+				.search(FilterFamily.of("any", 9, n -> p -> new DesignResult(1)));
 		assertEquals("any: trying 9 coefficients", messages.get(0));
 	}
 
@@ -151,7 +154,8 @@ class ShortestSearchTest {
 		}
 	}
 
-	// A dense grid stands in for the proof: the margin of an equiripple filter of whole length is far larger than its error.
+	// A dense grid stands in for the proof: the margin of an equiripple filter of whole length is far larger than its
+	// error.
 	private static Verdict judge(double[] taps, List<Band> bands) {
 		for (Band band : bands) {
 			for (int i = 0; i <= 3000; i++) {

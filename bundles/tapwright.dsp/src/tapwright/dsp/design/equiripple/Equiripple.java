@@ -15,10 +15,11 @@ import tapwright.dsp.design.LinearPhaseType;
 import tapwright.dsp.exact.Symmetry;
 
 /**
- * Linear-phase design with the least largest weighted error over all bands; between bands the response is free (T. W. Parks and
- * J. H. McClellan, Chebyshev approximation for nonrecursive digital filters with linear phase, IEEE Transactions on Circuit Theory
- * 19(2), 1972; all four types: J. H. McClellan and T. W. Parks, A unified approach to the design of optimum FIR linear-phase digital
- * filters, IEEE Transactions on Circuit Theory 20(6), 1973). Every answer is checked by a proof before it is given.
+ * Linear-phase design with the least largest weighted error over all bands; between bands the response is free (T. W.
+ * Parks and J. H. McClellan, Chebyshev approximation for nonrecursive digital filters with linear phase, IEEE
+ * Transactions on Circuit Theory 19(2), 1972; all four types: J. H. McClellan and T. W. Parks, A unified approach to
+ * the design of optimum FIR linear-phase digital filters, IEEE Transactions on Circuit Theory 20(6), 1973). Every
+ * answer is checked by a proof before it is given.
  *
  * @param taps
  *            number of coefficients, at most {@link #LONGEST}
@@ -50,7 +51,8 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	/** Checks the parameters. */
 	public Equiripple {
 		if (taps < 1 || taps > LONGEST) {
-			throw new IllegalArgumentException("an equiripple design of " + taps + " coefficients was asked for; ask for 1 to " + LONGEST);
+			throw new IllegalArgumentException("an equiripple design of " + taps
+					+ " coefficients was asked for; ask for 1 to " + LONGEST);
 		}
 		if (!(tolerance >= 1e-10 && tolerance <= 0.1)) {
 			throw new IllegalArgumentException("the tolerance is " + tolerance + "; it must be between 1e-10 and 0.1");
@@ -63,8 +65,10 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 			Band before = bands.get(k - 1);
 			Band band = bands.get(k);
 			if (before.to() == band.from() && before.desiredTo() != band.desiredFrom()) {
-				throw new IllegalArgumentException("the desired amplitude jumps from " + before.desiredTo() + " to " + band.desiredFrom()
-						+ " at " + band.from() + " cycles per sample; no filter can follow: leave a transition between the bands");
+				throw new IllegalArgumentException("the desired amplitude jumps from " + before.desiredTo() + " to "
+						+ band.desiredFrom()
+						+ " at " + band.from()
+						+ " cycles per sample; no filter can follow: leave a transition between the bands");
 			}
 		}
 		LinearPhaseType.of(taps, symmetry).refuseImpossible(bands);
@@ -98,8 +102,8 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	}
 
 	/**
-	 * The same from the reference of another length, or from the usual start when there is none. Should the proof find a larger error
-	 * than the exchange did, an extremum was missed; then it is done once more with a denser search.
+	 * The same from the reference of another length, or from the usual start when there is none. Should the proof find
+	 * a larger error than the exchange did, an extremum was missed; then it is done once more with a denser search.
 	 */
 	Solved solve(Progress progress, Reference warm) throws DesignException {
 		Solved solved = attempt(progress, warm, false);
@@ -119,7 +123,8 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 		double[] h = type.taps(Recovery.coefficients(outcome.approximation(), unknowns));
 		progress.checkCancelled();
 		Reference reference = outcome.reference();
-		return new Solved(proven(h, reference.frequencies(new Target(type, bands, unknowns)), reference.band()), reference);
+		return new Solved(proven(h, reference.frequencies(new Target(type, bands, unknowns)), reference.band()),
+				reference);
 	}
 
 	private EquirippleSolution proven(double[] h, double[] extremes, int[] band) throws DesignException {
@@ -140,7 +145,8 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 			notes.add(String.format(Locale.ROOT, "Between the bands the gain rises to about %.4g.", peak));
 		}
 		if (excess > tolerance) {
-			notes.add(String.format(Locale.ROOT, "The largest weighted error is proven to be within %.2g of the best possible one,"
+			notes.add(String.format(Locale.ROOT,
+					"The largest weighted error is proven to be within %.2g of the best possible one,"
 					+ " relatively; double precision gives no better proof.", excess));
 		}
 		return new EquirippleSolution(h, lower, upper, extremes, peak, List.copyOf(notes));
@@ -148,12 +154,13 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 
 	private static DesignException useless(double lower, double upper, double peak, double wanted) {
 		if (peak > UNBEARABLE * wanted) {
-			return new DesignException(String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands, and"
-					+ " coefficients in double precision cannot carry it; make the transitions more equal in width or reduce the taps",
-					peak));
+			return new DesignException(String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands,"
+					+ " and coefficients in double precision cannot carry it; make the transitions more equal in width or"
+					+ " reduce the taps", peak));
 		}
 		return new DesignException(Double.isFinite(upper)
-				? String.format(Locale.ROOT, "the best weighted error is near what double precision resolves (errors up to %.3g, best"
+				? String.format(Locale.ROOT,
+				"the best weighted error is near what double precision resolves (errors up to %.3g, best"
 						+ " possible %.3g); reduce the taps or narrow the transitions", upper, lower)
 				: "rounding errors leave no usable coefficients; reduce the taps or widen very narrow bands");
 	}

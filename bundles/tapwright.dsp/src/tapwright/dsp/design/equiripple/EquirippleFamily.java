@@ -15,8 +15,8 @@ import tapwright.dsp.design.LengthEstimate;
 import tapwright.dsp.exact.Symmetry;
 
 /**
- * Equiripple designs for the same bands with any number of coefficients. Each trial starts from where the error of an earlier one
- * alternates. Not thread-safe.
+ * Equiripple designs for the same bands with any number of coefficients. Each trial starts from where the error of an
+ * earlier one alternates. Not thread-safe.
  */
 public final class EquirippleFamily implements FilterFamily {
 
@@ -30,8 +30,9 @@ public final class EquirippleFamily implements FilterFamily {
 	 * A family.
 	 *
 	 * @param weightsAreLimits
-	 *            whether the requirements allow the amplitude, sign included, everywhere in the bands at most the deviation
-	 *            1 / weight from what is desired; then a length whose least weighted error is above 1 is proven to be too short
+	 *            whether the requirements allow the amplitude, sign included, everywhere in the bands at most the
+	 *            deviation 1 / weight from what is desired; then a length whose least weighted error is above 1 is
+	 *            proven to be too short
 	 */
 	public EquirippleFamily(Symmetry symmetry, List<Band> bands, boolean weightsAreLimits) {
 		this.symmetry = symmetry;

@@ -13,13 +13,15 @@ import java.util.List;
  * @param upperBound
  *            proven: these very coefficients have no larger weighted error in any band
  * @param extremes
- *            the frequencies, in cycles per sample, at which the error alternates between its extremes; do not change the array
+ *            the frequencies, in cycles per sample, at which the error alternates between its extremes; do not change
+ *            the array
  * @param peakOutside
  *            about the largest amplitude between bands; 0 when there is nothing between them
  * @param notes
  *            what a person should know, in whole sentences
  */
-public record EquirippleSolution(double[] taps, double lowerBound, double upperBound, double[] extremes, double peakOutside,
+public record EquirippleSolution(double[] taps, double lowerBound, double upperBound, double[] extremes,
+		double peakOutside,
 		List<String> notes) {
 
 	/** How far the largest weighted error can at most be above that of the best filter, relatively. */

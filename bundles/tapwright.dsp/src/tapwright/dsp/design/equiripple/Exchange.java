@@ -10,8 +10,8 @@ import tapwright.dsp.design.DesignException;
 import tapwright.dsp.design.LinearPhaseType;
 
 /**
- * The exchange for one number of unknowns (E. Ya. Remez, 1934; T. W. Parks and J. H. McClellan, Chebyshev approximation for
- * nonrecursive digital filters with linear phase, IEEE Transactions on Circuit Theory 19(2), 1972).
+ * The exchange for one number of unknowns (E. Ya. Remez, 1934; T. W. Parks and J. H. McClellan, Chebyshev approximation
+ * for nonrecursive digital filters with linear phase, IEEE Transactions on Circuit Theory 19(2), 1972).
  */
 final class Exchange {
 
@@ -64,8 +64,8 @@ final class Exchange {
 	}
 
 	/**
-	 * Solves for {@code unknowns} coefficients until the largest error found exceeds the levelled one by at most the tolerance,
-	 * relatively. A larger problem starts from the rough solution of one half as large.
+	 * Solves for {@code unknowns} coefficients until the largest error found exceeds the levelled one by at most the
+	 * tolerance, relatively. A larger problem starts from the rough solution of one half as large.
 	 */
 	Outcome solve(int unknowns, double tolerance) throws DesignException {
 		if (unknowns > SMALL) {
@@ -147,10 +147,13 @@ final class Exchange {
 					Math.abs(band.desiredTo()) * band.weightTo()));
 		}
 		if (best == null || best.level < RESOLUTION * scale) {
-			return new DesignException("the best weighted error is smaller than double precision resolves (" + RESOLUTION * scale
+			return new DesignException("the best weighted error is smaller than double precision resolves ("
+					+ RESOLUTION * scale
 					+ " here); reduce the taps or narrow the transitions");
 		}
-		return new DesignException(String.format(Locale.ROOT, "the exchange did not settle: errors stay between %.3g and %.3g; reduce the"
-				+ " taps, widen very narrow bands or make the transitions more equal in width", best.level, best.largest));
+		return new DesignException(String.format(Locale.ROOT,
+				"the exchange did not settle: errors stay between %.3g and %.3g; reduce the"
+				+ " taps, widen very narrow bands or make the transitions more equal in width", best.level,
+				best.largest));
 	}
 }

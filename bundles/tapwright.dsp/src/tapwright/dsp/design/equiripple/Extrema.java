@@ -4,15 +4,18 @@ package tapwright.dsp.design.equiripple;
 import java.util.Arrays;
 
 /**
- * Local extrema of the weighted error in all bands: samples between the points of the reference, then a parabola in angle through
- * each sample that sticks out. The points of the reference are samples themselves, so the error alternates at least as often as it
- * does there.
+ * Local extrema of the weighted error in all bands: samples between the points of the reference, then a parabola in
+ * angle through each sample that sticks out. The points of the reference are samples themselves, so the error
+ * alternates at least as often as it does there.
  */
 final class Extrema {
 
 	/** A refined parabola is this part as wide as the one before. */
 	private static final double NARROWING = 1.0 / 16;
-	/** Parts of a step at which samples near a band's edges lie too: a sloped target can have an extremum just beside its edge. */
+	/**
+	 * Parts of a step at which samples near a band's edges lie too: a sloped target can have an extremum just beside
+	 * its edge.
+	 */
 	private static final double[] NEAR_EDGE = { 0x1p-12, 0x1p-8, 0x1p-4 };
 
 	private final Target target;
@@ -99,7 +102,8 @@ final class Extrema {
 			double[] rightError = errors(right, peaks.band, n);
 			for (int i = 0; i < n; i++) {
 				vertex[i] = reach[i] == 0 ? at[i]
-						: vertex(at[i] - reach[i], leftError[i], at[i], peaks.error[i], at[i] + reach[i], rightError[i]);
+						: vertex(at[i] - reach[i], leftError[i], at[i], peaks.error[i], at[i] + reach[i],
+						rightError[i]);
 			}
 			accept(peaks, at, vertex);
 		}

@@ -4,8 +4,8 @@ package tapwright.dsp.design.equiripple;
 import java.util.Arrays;
 
 /**
- * The sum of L cosines that takes given values at L + 1 points x = cos(2 pi f), in barycentric form (J.-P. Berrut and L. N. Trefethen,
- * Barycentric Lagrange interpolation, SIAM Review 46(3), 2004).
+ * The sum of L cosines that takes given values at L + 1 points x = cos(2 pi f), in barycentric form (J.-P. Berrut and
+ * L. N. Trefethen, Barycentric Lagrange interpolation, SIAM Review 46(3), 2004).
  */
 final class Interpolant {
 
@@ -45,7 +45,8 @@ final class Interpolant {
 	}
 
 	/**
-	 * The sum of L cosines whose weighted error from the desired values has one size at all L + 1 points, with alternating signs.
+	 * The sum of L cosines whose weighted error from the desired values has one size at all L + 1 points, with
+	 * alternating signs.
 	 *
 	 * @param x
 	 *            the points, falling
@@ -111,8 +112,8 @@ final class Interpolant {
 	}
 
 	/**
-	 * 1 / product of 2 (x[i] - x[j]), all times one power of two. The factor 2 is one over the capacity of [-1, 1]; mantissas and
-	 * exponents are collected apart since the products leave the range of doubles for long filters.
+	 * 1 / product of 2 (x[i] - x[j]), all times one power of two. The factor 2 is one over the capacity of [-1, 1];
+	 * mantissas and exponents are collected apart since the products leave the range of doubles for long filters.
 	 */
 	private static double[] weights(double[] x) {
 		int n = x.length;

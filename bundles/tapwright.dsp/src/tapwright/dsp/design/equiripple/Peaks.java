@@ -46,8 +46,8 @@ final class Peaks {
 	}
 
 	/**
-	 * Drops the least of alternating peaks until {@code points} are left, which alternate too: an end alone, a peak inside together
-	 * with its smaller neighbour.
+	 * Drops the least of alternating peaks until {@code points} are left, which alternate too: an end alone, a peak
+	 * inside together with its smaller neighbour.
 	 */
 	Reference best(int points) {
 		while (count > points) {

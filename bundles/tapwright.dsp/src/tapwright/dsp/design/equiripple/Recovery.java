@@ -2,10 +2,10 @@
 package tapwright.dsp.design.equiripple;
 
 /**
- * Coefficients of the sum of cosines that an {@link Interpolant} stands for. Its values at L Chebyshev points go through a cosine
- * transform; but inside wide transitions these values are extrapolated and inaccurate, which the transform would spread over all
- * bands. So the sum that came out is evaluated at the reference, and what is missing there is interpolated and transformed again,
- * until nothing more is gained (iterative refinement).
+ * Coefficients of the sum of cosines that an {@link Interpolant} stands for. Its values at L Chebyshev points go
+ * through a cosine transform; but inside wide transitions these values are extrapolated and inaccurate, which the
+ * transform would spread over all bands. So the sum that came out is evaluated at the reference, and what is missing
+ * there is interpolated and transformed again, until nothing more is gained (iterative refinement).
  */
 final class Recovery {
 
@@ -73,7 +73,8 @@ final class Recovery {
 		return p;
 	}
 
-	// Wanted values minus the sum of cosines, which is restarted from exact cosines so that its rounding errors do not grow.
+	// Wanted values minus the sum of cosines, which is restarted from exact cosines so that its rounding errors do not
+	// grow.
 	private static double[] missing(double[] p, double[] angle, double[] wanted) {
 		int points = angle.length;
 		double[] rest = wanted.clone();

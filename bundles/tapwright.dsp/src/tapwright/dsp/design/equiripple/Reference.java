@@ -14,9 +14,10 @@ import java.util.Arrays;
 record Reference(double[] x, int[] band) {
 
 	/**
-	 * Places of points in a band as angles: the middle of the band plus its half width times the cosine. Points that belong to best
-	 * approximations become denser towards both ends of a band, about evenly in this angle. The middle one is moved a little, as a
-	 * start that mirrors at a quarter of the sample rate would make a mirrored problem's levelled error zero.
+	 * Places of points in a band as angles: the middle of the band plus its half width times the cosine. Points that
+	 * belong to best approximations become denser towards both ends of a band, about evenly in this angle. The middle
+	 * one is moved a little, as a start that mirrors at a quarter of the sample rate would make a mirrored problem's
+	 * levelled error zero.
 	 */
 	private static final double[] EVEN = { 0, 0.52 * Math.PI, Math.PI };
 
@@ -37,9 +38,9 @@ record Reference(double[] x, int[] band) {
 	}
 
 	/**
-	 * A start from the solution of a problem with the same bands and another number of coefficients: the density of the points is
-	 * kept (S.-I. Filip, A robust and scalable implementation of the Parks-McClellan algorithm for designing FIR filters, ACM
-	 * Transactions on Mathematical Software 43(1), 2016, calls this reference scaling).
+	 * A start from the solution of a problem with the same bands and another number of coefficients: the density of the
+	 * points is kept (S.-I. Filip, A robust and scalable implementation of the Parks-McClellan algorithm for designing
+	 * FIR filters, ACM Transactions on Mathematical Software 43(1), 2016, calls this reference scaling).
 	 */
 	Reference scaled(Target target, int points) {
 		int[] old = new int[target.bands()];
@@ -50,7 +51,8 @@ record Reference(double[] x, int[] band) {
 		double[][] angles = new double[old.length][];
 		int next = 0;
 		for (int b = 0; b < old.length; b++) {
-			// Of L + 1 points a band has its share of L and half a point for an end of the whole axis; so a single band has all.
+			// Of L + 1 points a band has its share of L and half a point for an end of the whole axis; so a single band
+			// has all.
 			double ends = (b == 0 ? 0.5 : 0) + (b == old.length - 1 ? 0.5 : 0);
 			share[b] = (old[b] - ends) * (points - 1) / (x.length - 1) + ends;
 			double[] own = new double[old[b]];

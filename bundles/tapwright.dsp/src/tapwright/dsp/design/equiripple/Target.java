@@ -7,8 +7,9 @@ import tapwright.dsp.design.Band;
 import tapwright.dsp.design.LinearPhaseType;
 
 /**
- * The approximation problem in x = cos(2 pi f): A - D = Q P - D = Q (P - D/Q), so P shall follow D/Q with weight W Q. Band edges at
- * a zero of Q are moved inward a little, where the weight would vanish; the proof covers the whole band again.
+ * The approximation problem in x = cos(2 pi f): A - D = Q P - D = Q (P - D/Q), so P shall follow D/Q with weight W Q.
+ * Band edges at a zero of Q are moved inward a little, where the weight would vanish; the proof covers the whole band
+ * again.
  */
 final class Target {
 

@@ -9,9 +9,10 @@ import tapwright.dsp.exact.Symmetry;
 import tapwright.dsp.verify.TaylorCells;
 
 /**
- * Proven statements on the weighted error W (A - D) of exact coefficients in bands. In a cell the error is a polynomial in s, the
- * product of straight lines and the amplitude's. Its range over a part of the cell is bounded by the range of its first three terms
- * plus the magnitudes of the others; parts where this is too coarse are halved, which makes the rest eight times smaller.
+ * Proven statements on the weighted error W (A - D) of exact coefficients in bands. In a cell the error is a polynomial
+ * in s, the product of straight lines and the amplitude's. Its range over a part of the cell is bounded by the range of
+ * its first three terms plus the magnitudes of the others; parts where this is too coarse are halved, which makes the
+ * rest eight times smaller.
  */
 final class WeightedError {
 
@@ -59,8 +60,8 @@ final class WeightedError {
 	}
 
 	/**
-	 * The smallest magnitude of the weighted error at the given points, 0 when it cannot be proven that its sign changes from each
-	 * point to the next.
+	 * The smallest magnitude of the weighted error at the given points, 0 when it cannot be proven that its sign
+	 * changes from each point to the next.
 	 *
 	 * @param frequency
 	 *            rising
@@ -126,8 +127,9 @@ final class WeightedError {
 			e[m] = w0 * p + w1 * before;
 			before = p;
 		}
-		// Lines beyond a narrow band's ends are computed from large slopes; 1 + stretch covers that. 64u per unit of size covers the
-		// products and at most two additions per term in shifting a polynomial of 13 terms to a part of its cell.
+		// Lines beyond a narrow band's ends are computed from large slopes; 1 + stretch covers that. 64u per unit of
+		// size covers the products and at most two additions per term in shifting a polynomial of 13 terms to a part of
+		// its cell.
 		double weight = Math.abs(w0) + Math.abs(w1) + 16 * U * (1 + stretch) * (band.weightFrom() + band.weightTo());
 		double lines = Math.abs(band.desiredFrom()) + Math.abs(band.desiredTo());
 		return weight * (cells.error() + 128 * U * size + 16 * U * (1 + stretch) * lines) * (1 + 1e-9)

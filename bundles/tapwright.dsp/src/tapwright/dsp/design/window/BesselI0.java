@@ -11,9 +11,9 @@ final class BesselI0 {
 	}
 
 	/**
-	 * I0(x) = sum over k of ((x/2)^k / k!)^2, summed as it stands: every term is positive, so nothing cancels. The term with the
-	 * most weight is near k = x/2 and has collected three roundings per step, hence the relative error is below
-	 * (2 |x| + 10) 2^-53.
+	 * I0(x) = sum over k of ((x/2)^k / k!)^2, summed as it stands: every term is positive, so nothing cancels. The term
+	 * with the most weight is near k = x/2 and has collected three roundings per step, hence the relative error is
+	 * below (2 |x| + 10) 2^-53.
 	 *
 	 * @param x
 	 *            at most {@link #LARGEST} in magnitude

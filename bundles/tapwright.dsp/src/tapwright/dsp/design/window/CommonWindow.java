@@ -2,14 +2,17 @@
 package tapwright.dsp.design.window;
 
 /**
- * Windows without a parameter. Unless said otherwise the coefficients are those of F. J. Harris, On the use of windows for
- * harmonic analysis with the discrete Fourier transform, Proceedings of the IEEE 66(1), 1978.
+ * Windows without a parameter. Unless said otherwise the coefficients are those of F. J. Harris, On the use of windows
+ * for harmonic analysis with the discrete Fourier transform, Proceedings of the IEEE 66(1), 1978.
  */
 public enum CommonWindow implements Window {
 
 	/** All ones. */
 	RECTANGULAR(1),
-	/** A triangle that is zero at both ends (M. S. Bartlett, Periodogram analysis and continuous spectra, Biometrika 37, 1950). */
+	/**
+	 * A triangle that is zero at both ends (M. S. Bartlett, Periodogram analysis and continuous spectra, Biometrika 37,
+	 * 1950).
+	 */
 	BARTLETT,
 	/** One period of a raised cosine; zero at both ends. */
 	HANN(0.5, 0.5),
@@ -29,8 +32,8 @@ public enum CommonWindow implements Window {
 	 */
 	NUTTALL(0.3635819, 0.4891775, 0.1365995, 0.0106411),
 	/**
-	 * Five-term flat top: scalloping loss near 0.01 dB; negative near its ends (G. D'Antona and A. Ferrero, Digital signal
-	 * processing for measurement systems, 2006).
+	 * Five-term flat top: scalloping loss near 0.01 dB; negative near its ends (G. D'Antona and A. Ferrero, Digital
+	 * signal processing for measurement systems, 2006).
 	 */
 	FLAT_TOP(0.21557895, 0.41663158, 0.277263158, 0.083578947, 0.006947368);
 

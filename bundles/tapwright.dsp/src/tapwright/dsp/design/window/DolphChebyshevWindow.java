@@ -2,9 +2,10 @@
 package tapwright.dsp.design.window;
 
 /**
- * The Dolph-Chebyshev window: the narrowest main lobe for side lobes that are all equally high (C. L. Dolph, A current distribution
- * for broadside arrays which optimizes the relationship between beam width and side-lobe level, Proceedings of the IRE 34(6),
- * 1946). Scaled so that its largest sample is 1, which may be the first and last one at low attenuation.
+ * The Dolph-Chebyshev window: the narrowest main lobe for side lobes that are all equally high (C. L. Dolph, A current
+ * distribution for broadside arrays which optimizes the relationship between beam width and side-lobe level,
+ * Proceedings of the IRE 34(6), 1946). Scaled so that its largest sample is 1, which may be the first and last one at
+ * low attenuation.
  *
  * @param attenuation
  *            of the side lobes below the main lobe in dB, above 0, at most 300
@@ -14,7 +15,8 @@ public record DolphChebyshevWindow(double attenuation) implements Window {
 	/** Checks the parameter. */
 	public DolphChebyshevWindow {
 		if (!(attenuation > 0 && attenuation <= 300)) {
-			throw new IllegalArgumentException("the side-lobe attenuation of the Dolph-Chebyshev window is " + attenuation
+			throw new IllegalArgumentException("the side-lobe attenuation of the Dolph-Chebyshev window is "
+					+ attenuation
 					+ " dB; it must be above 0 and at most 300 dB");
 		}
 	}

@@ -2,8 +2,8 @@
 package tapwright.dsp.design.window;
 
 /**
- * The Gaussian window exp(-(alpha t)^2 / 2) with t from -1 to 1 over the window (F. J. Harris, On the use of windows for harmonic
- * analysis with the discrete Fourier transform, Proceedings of the IEEE 66(1), 1978).
+ * The Gaussian window exp(-(alpha t)^2 / 2) with t from -1 to 1 over the window (F. J. Harris, On the use of windows
+ * for harmonic analysis with the discrete Fourier transform, Proceedings of the IEEE 66(1), 1978).
  *
  * @param alpha
  *            half the window's length in standard deviations, positive
@@ -13,7 +13,8 @@ public record GaussianWindow(double alpha) implements Window {
 	/** Checks the parameter. */
 	public GaussianWindow {
 		if (!(alpha > 0) || Double.isInfinite(alpha)) {
-			throw new IllegalArgumentException("alpha of the Gaussian window is " + alpha + "; it must be a positive number");
+			throw new IllegalArgumentException("alpha of the Gaussian window is " + alpha
+					+ "; it must be a positive number");
 		}
 	}
 

@@ -34,7 +34,8 @@ final class IdealResponse {
 		return (line.to() - line.from()) * (line.desiredFrom() + line.desiredTo()) / 2;
 	}
 
-	// Integration by parts over the middle of the line and its half width: both terms keep their accuracy for short lines.
+	// Integration by parts over the middle of the line and its half width: both terms keep their accuracy for short
+	// lines.
 	private static double transform(Band line, Symmetry symmetry, double m) {
 		double middle = (line.from() + line.to()) / 2;
 		double half = (line.to() - line.from()) / 2;

@@ -2,9 +2,9 @@
 package tapwright.dsp.design.window;
 
 /**
- * Kaiser's formulas for a windowed design from its requirements (J. F. Kaiser, Nonrecursive digital filter design using the I0-sinh
- * window function, Proceedings of the IEEE International Symposium on Circuits and Systems, 1974). An estimate, not a proof: check
- * the design, and add a few coefficients where it misses.
+ * Kaiser's formulas for a windowed design from its requirements (J. F. Kaiser, Nonrecursive digital filter design using
+ * the I0-sinh window function, Proceedings of the IEEE International Symposium on Circuits and Systems, 1974). An
+ * estimate, not a proof: check the design, and add a few coefficients where it misses.
  *
  * @param beta
  *            parameter of the Kaiser window
@@ -25,7 +25,8 @@ public record KaiserEstimate(double beta, double order) {
 	 */
 	public static KaiserEstimate ofAttenuation(double attenuation, double transition) {
 		if (!(attenuation > 0) || attenuation > 1000) {
-			throw new IllegalArgumentException("the attenuation is " + attenuation + " dB; it must be above 0 and at most 1000 dB");
+			throw new IllegalArgumentException("the attenuation is " + attenuation
+					+ " dB; it must be above 0 and at most 1000 dB");
 		}
 		if (!(transition > 0 && transition < 0.5)) {
 			throw new IllegalArgumentException("the transition is " + transition
@@ -75,7 +76,8 @@ public record KaiserEstimate(double beta, double order) {
 	public int taps() {
 		if (order + 1 > Window.LONGEST) {
 			throw new IllegalArgumentException("this transition needs about " + Math.round(order + 1)
-					+ " coefficients; widen it or lower the sample rate (at most " + Window.LONGEST + " can be designed)");
+					+ " coefficients; widen it or lower the sample rate (at most " + Window.LONGEST
+					+ " can be designed)");
 		}
 		return (int) Math.ceil(order) + 1;
 	}

@@ -2,8 +2,9 @@
 package tapwright.dsp.design.window;
 
 /**
- * The Kaiser window I0(beta sqrt(1 - t^2)) / I0(beta) with t from -1 to 1 over the window (J. F. Kaiser, Nonrecursive digital
- * filter design using the I0-sinh window function, Proceedings of the IEEE International Symposium on Circuits and Systems, 1974).
+ * The Kaiser window I0(beta sqrt(1 - t^2)) / I0(beta) with t from -1 to 1 over the window (J. F. Kaiser, Nonrecursive
+ * digital filter design using the I0-sinh window function, Proceedings of the IEEE International Symposium on Circuits
+ * and Systems, 1974).
  *
  * @param beta
  *            0 (rectangular) to 700; larger means lower side lobes and a wider main lobe

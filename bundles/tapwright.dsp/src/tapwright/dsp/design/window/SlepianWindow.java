@@ -2,10 +2,10 @@
 package tapwright.dsp.design.window;
 
 /**
- * The discrete prolate spheroidal window of order zero: of all windows of its length the one with the greatest share of its energy
- * between -W and W (D. Slepian, Prolate spheroidal wave functions, Fourier analysis, and uncertainty V: the discrete case, Bell
- * System Technical Journal 57(5), 1978). It is the eigenvector, for the largest eigenvalue, of a symmetric tridiagonal matrix that
- * commutes with the concentration matrix. Scaled so that its largest sample is 1.
+ * The discrete prolate spheroidal window of order zero: of all windows of its length the one with the greatest share of
+ * its energy between -W and W (D. Slepian, Prolate spheroidal wave functions, Fourier analysis, and uncertainty V: the
+ * discrete case, Bell System Technical Journal 57(5), 1978). It is the eigenvector, for the largest eigenvalue, of a
+ * symmetric tridiagonal matrix that commutes with the concentration matrix. Scaled so that its largest sample is 1.
  *
  * @param timeBandwidth
  *            N W, length times half bandwidth in cycles per sample; positive, below half the length

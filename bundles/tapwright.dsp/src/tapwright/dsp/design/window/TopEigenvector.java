@@ -10,8 +10,8 @@ final class TopEigenvector {
 	}
 
 	/**
-	 * Bisection by Sturm counts for the eigenvalue, then inverse iteration just above it, where the shifted matrix is definite and
-	 * needs no pivoting (J. H. Wilkinson, The Algebraic Eigenvalue Problem, 1965, chapter 5).
+	 * Bisection by Sturm counts for the eigenvalue, then inverse iteration just above it, where the shifted matrix is
+	 * definite and needs no pivoting (J. H. Wilkinson, The Algebraic Eigenvalue Problem, 1965, chapter 5).
 	 *
 	 * @param diagonal
 	 *            d[0..n-1]

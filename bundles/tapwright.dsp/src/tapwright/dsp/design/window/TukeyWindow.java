@@ -2,8 +2,8 @@
 package tapwright.dsp.design.window;
 
 /**
- * The Tukey window: flat with cosine tapers at both ends (J. W. Tukey, An introduction to the calculations of numerical spectrum
- * analysis, in Spectral Analysis of Time Series, 1967).
+ * The Tukey window: flat with cosine tapers at both ends (J. W. Tukey, An introduction to the calculations of numerical
+ * spectrum analysis, in Spectral Analysis of Time Series, 1967).
  *
  * @param taper
  *            share of the window that is tapered, 0 (rectangular) to 1 (Hann)
@@ -13,7 +13,8 @@ public record TukeyWindow(double taper) implements Window {
 	/** Checks the parameter. */
 	public TukeyWindow {
 		if (!(taper >= 0 && taper <= 1)) {
-			throw new IllegalArgumentException("the tapered share of the Tukey window is " + taper + "; it must be between 0 and 1");
+			throw new IllegalArgumentException("the tapered share of the Tukey window is " + taper
+					+ "; it must be between 0 and 1");
 		}
 	}
 

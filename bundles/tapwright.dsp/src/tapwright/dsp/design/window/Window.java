@@ -4,8 +4,9 @@ package tapwright.dsp.design.window;
 import java.util.Arrays;
 
 /**
- * A window function. Symmetric windows serve filter design; periodic ones, a symmetric window one sample longer without its last
- * sample, serve spectral analysis. Windows are scaled to 1 at the middle, except where a window says otherwise. Immutable.
+ * A window function. Symmetric windows serve filter design; periodic ones, a symmetric window one sample longer without
+ * its last sample, serve spectral analysis. Windows are scaled to 1 at the middle, except where a window says
+ * otherwise. Immutable.
  */
 public sealed interface Window
 		permits CommonWindow, GaussianWindow, TukeyWindow, KaiserWindow, DolphChebyshevWindow, SlepianWindow {
@@ -21,7 +22,8 @@ public sealed interface Window
 	 */
 	default double[] symmetric(int length) {
 		if (length < 1 || length > LONGEST) {
-			throw new IllegalArgumentException("a window of " + length + " samples was asked for; the length must be between 1 and "
+			throw new IllegalArgumentException("a window of " + length
+					+ " samples was asked for; the length must be between 1 and "
 					+ LONGEST);
 		}
 		double[] window = new double[length];

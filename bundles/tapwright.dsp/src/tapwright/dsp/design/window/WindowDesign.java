@@ -16,23 +16,26 @@ import tapwright.dsp.design.LinearPhaseType;
 import tapwright.dsp.exact.Symmetry;
 
 /**
- * Linear-phase design by a window: the impulse response of the ideal target, truncated and multiplied by a window. The target is
- * piecewise linear, so its inverse transform is in closed form. Weights of the bands are not used.
+ * Linear-phase design by a window: the impulse response of the ideal target, truncated and multiplied by a window. The
+ * target is piecewise linear, so its inverse transform is in closed form. Weights of the bands are not used.
  *
  * @param taps
  *            number of coefficients, 1 to {@link Window#LONGEST}
  * @param symmetry
  *            even, or odd for differentiators and Hilbert transformers
  * @param bands
- *            desired amplitude in rising bands; they may touch. The target stays constant below the first and above the last band
+ *            desired amplitude in rising bands; they may touch. The target stays constant below the first and above the
+ *            last band
  * @param gaps
  *            what the target does between bands
  * @param window
  *            the window
  * @param unityAt
- *            frequency in cycles per sample at which the gain is scaled to exactly the desired amplitude there, up to rounding
+ *            frequency in cycles per sample at which the gain is scaled to exactly the desired amplitude there, up to
+ *            rounding
  */
-public record WindowDesign(int taps, Symmetry symmetry, List<Band> bands, Gaps gaps, Window window, OptionalDouble unityAt)
+public record WindowDesign(int taps, Symmetry symmetry, List<Band> bands, Gaps gaps, Window window,
+		OptionalDouble unityAt)
 		implements Design {
 
 	/** What the target does between two bands. */
@@ -46,7 +49,8 @@ public record WindowDesign(int taps, Symmetry symmetry, List<Band> bands, Gaps g
 	/** Checks the parameters. */
 	public WindowDesign {
 		if (taps < 1 || taps > Window.LONGEST) {
-			throw new IllegalArgumentException("a design of " + taps + " coefficients was asked for; ask for 1 to " + Window.LONGEST);
+			throw new IllegalArgumentException("a design of " + taps + " coefficients was asked for; ask for 1 to "
+					+ Window.LONGEST);
 		}
 		Objects.requireNonNull(gaps);
 		Objects.requireNonNull(window);
@@ -68,20 +72,27 @@ public record WindowDesign(int taps, Symmetry symmetry, List<Band> bands, Gaps g
 		return scaled(taps, List.of(new Band(0, cutoff, 1, 1), new Band(cutoff, 0.5, 0, 1)), window, 0);
 	}
 
-	/** High-pass with the step at {@code cutoff}, scaled to gain 1 at half the sample rate; needs an odd number of coefficients. */
+	/**
+	 * High-pass with the step at {@code cutoff}, scaled to gain 1 at half the sample rate; needs an odd number of
+	 * coefficients.
+	 */
 	public static WindowDesign highPass(int taps, double cutoff, Window window) {
 		return scaled(taps, List.of(new Band(0, cutoff, 0, 1), new Band(cutoff, 0.5, 1, 1)), window, 0.5);
 	}
 
 	/** Band-pass from {@code low} to {@code high}, scaled to gain 1 in the middle of the band. */
 	public static WindowDesign bandPass(int taps, double low, double high, Window window) {
-		return scaled(taps, List.of(new Band(0, low, 0, 1), new Band(low, high, 1, 1), new Band(high, 0.5, 0, 1)), window,
+		return scaled(taps, List.of(new Band(0, low, 0, 1), new Band(low, high, 1, 1), new Band(high, 0.5, 0, 1)),
+				window,
 				(low + high) / 2);
 	}
 
-	/** Band-stop from {@code low} to {@code high}, scaled to gain 1 at frequency 0; needs an odd number of coefficients. */
+	/**
+	 * Band-stop from {@code low} to {@code high}, scaled to gain 1 at frequency 0; needs an odd number of coefficients.
+	 */
 	public static WindowDesign bandStop(int taps, double low, double high, Window window) {
-		return scaled(taps, List.of(new Band(0, low, 1, 1), new Band(low, high, 0, 1), new Band(high, 0.5, 1, 1)), window, 0);
+		return scaled(taps, List.of(new Band(0, low, 1, 1), new Band(low, high, 0, 1), new Band(high, 0.5, 1, 1)),
+				window, 0);
 	}
 
 	private static WindowDesign scaled(int taps, List<Band> bands, Window window, double unityAt) {
@@ -121,7 +132,8 @@ public record WindowDesign(int taps, Symmetry symmetry, List<Band> bands, Gaps g
 		}
 		if (!(Math.abs(gain) > 1e-3 * Math.abs(wanted))) {
 			throw new DesignException("the gain of the unscaled design is only " + gain + " at " + at
-					+ " cycles per sample, too little to scale it to " + wanted + "; use more coefficients or another frequency");
+					+ " cycles per sample, too little to scale it to " + wanted
+					+ "; use more coefficients or another frequency");
 		}
 		for (int k = 0; k < taps; k++) {
 			h[k] *= wanted / gain;

@@ -17,7 +17,9 @@ import tapwright.dsp.design.Band;
 import tapwright.dsp.design.DesignException;
 import tapwright.dsp.exact.Symmetry;
 
-/** Random problems solved with scipy 1.17.1; make_equiripple_values.py beside made the values and says what they mean. */
+/**
+ * Random problems solved with scipy 1.17.1; make_equiripple_values.py beside made the values and says what they mean.
+ */
 class EquirippleReferenceTest {
 
 	private record Row(String method, int taps, Symmetry symmetry, List<Band> bands, double error) {
@@ -47,7 +49,8 @@ class EquirippleReferenceTest {
 		for (Row row : rows("linprog")) {
 			EquirippleSolution solution = new Equiripple(row.taps(), row.symmetry(), row.bands()).solve(Progress.NONE);
 			assertTrue(solution.excess() <= 1e-4, () -> row + " " + solution);
-			// The optimum on a grid is not above the optimum, but for the solver's own tolerance, and only a little below.
+			// The optimum on a grid is not above the optimum, but for the solver's own tolerance, and only a little
+			// below.
 			assertTrue(solution.upperBound() >= row.error() - 1e-7, row::toString);
 			assertEquals(row.error(), solution.lowerBound(), 2e-3 * row.error(), row::toString);
 			compared++;
@@ -70,6 +73,7 @@ class EquirippleReferenceTest {
 			double[] v = Arrays.stream(text.split(",")).mapToDouble(Double::parseDouble).toArray();
 			return new Band(v[0], v[1], v[2], v[3], v[4], v[5]);
 		}).toList();
-		return new Row(cells[0], Integer.parseInt(cells[1]), Symmetry.valueOf(cells[2]), bands, Double.parseDouble(cells[4]));
+		return new Row(cells[0], Integer.parseInt(cells[1]), Symmetry.valueOf(cells[2]), bands,
+				Double.parseDouble(cells[4]));
 	}
 }

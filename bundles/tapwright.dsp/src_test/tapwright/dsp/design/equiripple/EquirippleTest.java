@@ -25,9 +25,10 @@ class EquirippleTest {
 	private static final double U = 0x1p-53;
 
 	/**
-	 * J. H. McClellan, T. W. Parks, L. R. Rabiner, A computer program for designing optimum FIR linear phase digital filters, IEEE
-	 * Trans. Audio Electroacoustics 21(6), 1973: example specifications from memory. Error and coefficients computed with scipy
-	 * 1.17.1 remez on a dense grid; the error of 0.01243 often printed for the first is limited by a coarse grid.
+	 * J. H. McClellan, T. W. Parks, L. R. Rabiner, A computer program for designing optimum FIR linear phase digital
+	 * filters, IEEE Trans. Audio Electroacoustics 21(6), 1973: example specifications from memory. Error and
+	 * coefficients computed with scipy 1.17.1 remez on a dense grid; the error of 0.01243 often printed for the first
+	 * is limited by a coarse grid.
 	 */
 	@Test
 	void classicExamplesOfTheExchange() throws DesignException {
@@ -40,10 +41,13 @@ class EquirippleTest {
 	/** Computed with scipy 1.17.1 remez on a dense grid. */
 	@Test
 	void minimaxDesignsOfTheReferenceLibrary() throws DesignException {
-		assertExample(55, Symmetry.EVEN, bands(0, .1, 1, 1, .15, .5, 0, 10), 0.010091703220170669, 0.0007005685526699415,
+		assertExample(55, Symmetry.EVEN, bands(0, .1, 1, 1, .15, .5, 0, 10), 0.010091703220170669,
+				0.0007005685526699415,
 				6.599102887646343e-05, -0.0009945165358212448, -0.002576354025097995);
-		assertExample(31, Symmetry.ODD, bands(.05, .45, 1, 1), 0.0027077627810132565, 0.004214249994604479, 0, 0.00929587946559653, 0);
-		assertExample(20, Symmetry.ODD, bands(.05, .5, 1, 1), 0.020580500647389588, 0.016017338116352003, 0.014167764167831262,
+		assertExample(31, Symmetry.ODD, bands(.05, .45, 1, 1), 0.0027077627810132565, 0.004214249994604479, 0,
+				0.00929587946559653, 0);
+		assertExample(20, Symmetry.ODD, bands(.05, .5, 1, 1), 0.020580500647389588, 0.016017338116352003,
+				0.014167764167831262,
 				0.020446677663152876, 0.02873059247801929);
 	}
 
@@ -58,7 +62,8 @@ class EquirippleTest {
 	/** Closed form: the constant nearest to a straight line is its middle. */
 	@Test
 	void bestConstantForALineIsItsMiddle() throws DesignException {
-		EquirippleSolution solution = new Equiripple(1, Symmetry.EVEN, List.of(new Band(0, 0.5, 0, 1, 1, 1))).solve(Progress.NONE);
+		EquirippleSolution solution = new Equiripple(1, Symmetry.EVEN, List.of(new Band(0, 0.5, 0, 1, 1, 1)))
+				.solve(Progress.NONE);
 		assertEquals(0.5, solution.taps()[0], 1e-9);
 		assertEquals(0.5, solution.upperBound(), 1e-9);
 	}
@@ -66,17 +71,20 @@ class EquirippleTest {
 	/** Closed form: the constant nearest to two values is half-way between them. */
 	@Test
 	void levelOfTwoBandsWithOneCoefficientIsHalfTheirDifference() throws DesignException {
-		EquirippleSolution solution = new Equiripple(1, Symmetry.EVEN, bands(0, .1, 3, 1, .2, .5, 1, 1)).solve(Progress.NONE);
+		EquirippleSolution solution = new Equiripple(1, Symmetry.EVEN, bands(0, .1, 3, 1, .2, .5, 1, 1))
+				.solve(Progress.NONE);
 		assertEquals(2, solution.taps()[0], 1e-12);
 		assertEquals(1, solution.lowerBound(), 1e-9);
 	}
 
 	@Test
 	void boundsEncloseTheErrorOfTheGivenCoefficientsOnADenseGrid() throws DesignException {
-		List<Band> sloped = List.of(new Band(0, .1, 1, 0.5, 1, 3), new Band(.1, .2, 0.5, 2, 3, 1), new Band(.25, .45, 0, 0, 20, 5));
+		List<Band> sloped = List.of(new Band(0, .1, 1, 0.5, 1, 3), new Band(.1, .2, 0.5, 2, 3, 1),
+				new Band(.25, .45, 0, 0, 20, 5));
 		for (int taps : new int[] { 30, 31, 62, 63 }) {
 			for (Symmetry symmetry : new Symmetry[] { Symmetry.EVEN, Symmetry.ODD }) {
-				List<Band> bands = symmetry == Symmetry.EVEN ? sloped : List.of(new Band(.02, .1, .1, .5, 1, 1), new Band(.16, .3, 0, 4),
+				List<Band> bands = symmetry == Symmetry.EVEN ? sloped
+						: List.of(new Band(.02, .1, .1, .5, 1, 1), new Band(.16, .3, 0, 4),
 						new Band(.36, .45, 2, 1, 3, 1));
 				EquirippleSolution solution = new Equiripple(taps, symmetry, bands).solve(Progress.NONE);
 				double worst = worst(solution.taps(), symmetry, bands);
@@ -106,14 +114,16 @@ class EquirippleTest {
 
 	@Test
 	void toleranceOfOneInABillionIsMetAndProven() throws DesignException {
-		EquirippleSolution solution = new Equiripple(55, Symmetry.EVEN, bands(0, .1, 1, 1, .15, .5, 0, 10), 1e-9).solve(Progress.NONE);
+		EquirippleSolution solution = new Equiripple(55, Symmetry.EVEN, bands(0, .1, 1, 1, .15, .5, 0, 10), 1e-9)
+				.solve(Progress.NONE);
 		assertTrue(solution.excess() <= 1e-9, () -> "excess " + solution.excess());
 		assertTrue(solution.notes().isEmpty());
 	}
 
 	@Test
 	void thousandsOfCoefficientsConverge() throws DesignException {
-		EquirippleSolution solution = new Equiripple(4001, Symmetry.EVEN, bands(0, .2, 1, 1, .2025, .5, 0, 1)).solve(Progress.NONE);
+		EquirippleSolution solution = new Equiripple(4001, Symmetry.EVEN, bands(0, .2, 1, 1, .2025, .5, 0, 1))
+				.solve(Progress.NONE);
 		assertTrue(solution.excess() <= 1e-4);
 		assertTrue(solution.upperBound() < 1.5e-8);
 	}
@@ -142,7 +152,8 @@ class EquirippleTest {
 
 	@Test
 	void peaksBetweenBandsAreReported() throws DesignException {
-		EquirippleSolution solution = new Equiripple(61, Symmetry.EVEN, bands(0, .1, 0, 1, .115, .2, 1, 1, .3, .5, 0, 1))
+		EquirippleSolution solution = new Equiripple(61, Symmetry.EVEN, bands(0, .1, 0, 1, .115, .2, 1, 1, .3, .5, 0,
+				1))
 				.solve(Progress.NONE);
 		assertTrue(solution.peakOutside() > 1.2);
 		assertTrue(solution.notes().toString().contains("Between the bands"));
@@ -151,7 +162,8 @@ class EquirippleTest {
 	@Test
 	void forcedZerosAreExact() throws DesignException {
 		double[] two = new Equiripple(20, Symmetry.EVEN, bands(0, .1, 1, 1, .2, .5, 0, 1)).solve(Progress.NONE).taps();
-		double[] four = new Equiripple(20, Symmetry.ODD, List.of(new Band(0, .5, 0, Math.PI, 1, 1))).solve(Progress.NONE).taps();
+		double[] four = new Equiripple(20, Symmetry.ODD, List.of(new Band(0, .5, 0, Math.PI, 1, 1)))
+				.solve(Progress.NONE).taps();
 		double alternating = 0;
 		double sum = 0;
 		for (int k = 0; k < 20; k++) {
@@ -165,7 +177,8 @@ class EquirippleTest {
 	@Test
 	void scalingTheTargetScalesTheFilter() throws DesignException {
 		double[] one = new Equiripple(31, Symmetry.EVEN, bands(0, .1, 1, 1, .2, .5, 0, 1)).solve(Progress.NONE).taps();
-		double[] eight = new Equiripple(31, Symmetry.EVEN, bands(0, .1, 8, 1, .2, .5, 0, 1)).solve(Progress.NONE).taps();
+		double[] eight = new Equiripple(31, Symmetry.EVEN, bands(0, .1, 8, 1, .2, .5, 0, 1)).solve(Progress.NONE)
+				.taps();
 		assertArrayEquals(one, Arrays.stream(eight).map(tap -> tap / 8).toArray());
 	}
 
@@ -181,7 +194,8 @@ class EquirippleTest {
 			for (int b = 0; b < count; b++) {
 				double weight = Math.pow(10, 6 * random.nextDouble() - 3);
 				double desired = random.nextInt(3) == 0 ? random.nextGaussian() : random.nextInt(2);
-				bands.add(new Band(edges[2 * b], edges[2 * b + 1], desired, random.nextBoolean() ? desired : random.nextGaussian(), weight,
+				bands.add(new Band(edges[2 * b], edges[2 * b + 1], desired, random.nextBoolean() ? desired
+						: random.nextGaussian(), weight,
 						random.nextBoolean() ? weight : 1));
 			}
 			int taps = 3 + random.nextInt(100);
@@ -246,7 +260,8 @@ class EquirippleTest {
 	}
 
 	private static void assertRefused(String part, int taps, List<Band> bands) {
-		var refusal = assertThrows(DesignException.class, () -> new Equiripple(taps, Symmetry.EVEN, bands).compute(Progress.NONE));
+		var refusal = assertThrows(DesignException.class, () -> new Equiripple(taps, Symmetry.EVEN, bands)
+				.compute(Progress.NONE));
 		assertTrue(refusal.getMessage().contains(part), refusal::getMessage);
 	}
 

@@ -61,7 +61,8 @@ class WindowDesignTest {
 		for (double attenuation : new double[] { 30, 45, 60, 80, 100 }) {
 			KaiserEstimate estimate = KaiserEstimate.ofAttenuation(attenuation, 0.04);
 			double[] h = new WindowDesign(estimate.taps(), Symmetry.EVEN,
-					List.of(new Band(0, 0.18, 1, 1), new Band(0.22, 0.5, 0, 1)), estimate.window()).compute(Progress.NONE).taps();
+					List.of(new Band(0, 0.18, 1, 1), new Band(0.22, 0.5, 0, 1)), estimate.window())
+							.compute(Progress.NONE).taps();
 			double worst = 0;
 			for (double f = 0; f <= 0.5; f += 1e-4) {
 				if (f <= 0.18 || f >= 0.22) {
@@ -95,7 +96,8 @@ class WindowDesignTest {
 
 	@Test
 	void longDesignApproachesAMultiBandTargetWithSlopesAndGaps() throws DesignException {
-		List<Band> bands = List.of(new Band(0.02, 0.1, 0, 1, 1, 1), new Band(0.15, 0.2, 0.5, 1), new Band(0.25, 0.45, 2, 0, 1, 1));
+		List<Band> bands = List.of(new Band(0.02, 0.1, 0, 1, 1, 1), new Band(0.15, 0.2, 0.5, 1),
+				new Band(0.25, 0.45, 2, 0, 1, 1));
 		for (int taps : new int[] { 400, 401 }) {
 			for (Symmetry symmetry : new Symmetry[] { Symmetry.EVEN, Symmetry.ODD }) {
 				double[] h = new WindowDesign(taps, symmetry, bands, WindowDesign.Gaps.LINE, new KaiserWindow(6),
@@ -115,7 +117,8 @@ class WindowDesignTest {
 		for (int taps : new int[] { 40, 41 }) {
 			for (Symmetry symmetry : new Symmetry[] { Symmetry.EVEN, Symmetry.ODD }) {
 				double[] h = new WindowDesign(taps, symmetry,
-						List.of(new Band(0, 0.1, 0, 1), new Band(0.15, 0.3, 1, 1), new Band(0.4, 0.5, 0, 1)), CommonWindow.HANN)
+						List.of(new Band(0, 0.1, 0, 1), new Band(0.15, 0.3, 1, 1), new Band(0.4, 0.5, 0, 1)),
+								CommonWindow.HANN)
 						.compute(Progress.NONE).taps();
 				double energy = 0;
 				for (double tap : h) {
@@ -150,7 +153,8 @@ class WindowDesignTest {
 		assertMessage("between 0 and 0.5", () -> WindowDesign.lowPass(63, Double.NaN, CommonWindow.HANN));
 		assertMessage("1000000", () -> WindowDesign.lowPass(1_000_000, 0.1, CommonWindow.HANN));
 		assertMessage("ask for 1", () -> WindowDesign.lowPass(0, 0.1, CommonWindow.HANN));
-		assertMessage("overlap", () -> new WindowDesign(9, Symmetry.EVEN, List.of(new Band(0, 0.2, 1, 1), new Band(0.1, 0.5, 0, 1)),
+		assertMessage("overlap", () -> new WindowDesign(9, Symmetry.EVEN, List.of(new Band(0, 0.2, 1, 1),
+				new Band(0.1, 0.5, 0, 1)),
 				CommonWindow.HANN));
 		assertMessage("at least one band", () -> new WindowDesign(9, Symmetry.EVEN, List.of(), CommonWindow.HANN));
 		assertMessage("transition", () -> KaiserEstimate.ofAttenuation(60, 0));

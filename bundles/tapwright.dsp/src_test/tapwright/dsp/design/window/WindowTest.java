@@ -14,10 +14,14 @@ class WindowTest {
 
 	private static final List<Window> ALL = List.of(CommonWindow.RECTANGULAR, CommonWindow.BARTLETT, CommonWindow.HANN,
 			CommonWindow.HAMMING, CommonWindow.HAMMING_EXACT, CommonWindow.BLACKMAN, CommonWindow.BLACKMAN_EXACT,
-			CommonWindow.BLACKMAN_HARRIS, CommonWindow.NUTTALL, CommonWindow.FLAT_TOP, new GaussianWindow(2.5), new TukeyWindow(0.5),
+			CommonWindow.BLACKMAN_HARRIS, CommonWindow.NUTTALL, CommonWindow.FLAT_TOP, new GaussianWindow(2.5),
+					new TukeyWindow(0.5),
 			new KaiserWindow(8), new DolphChebyshevWindow(60), new SlepianWindow(3));
 
-	/** Printed in F. J. Harris, On the use of windows..., Proc. IEEE 66(1), 1978, Table I; more digits computed with numpy 2. */
+	/**
+	 * Printed in F. J. Harris, On the use of windows..., Proc. IEEE 66(1), 1978, Table I; more digits computed with
+	 * numpy 2.
+	 */
 	@Test
 	void figuresOfTheClassicWindowTable() {
 		assertFigures(CommonWindow.RECTANGULAR, 1.0, 1.0, 3.9223941341458946, -13.261446942402086);
@@ -26,8 +30,10 @@ class WindowTest {
 		// The table prints 1.78 dB scalloping loss for this window; its definition gives 1.751 dB.
 		assertFigures(CommonWindow.HAMMING, 0.54, 1.3628257887517146, 1.7514317822407943, -42.67424539388507);
 		assertFigures(CommonWindow.BLACKMAN, 0.42, 1.726757369614512, 1.0988788310193716, -58.10884368817952);
-		assertFigures(CommonWindow.BLACKMAN_EXACT, 0.42659071367153917, 1.6936989496768255, 1.1500459056561336, -68.23195278001826);
-		assertFigures(CommonWindow.BLACKMAN_HARRIS, 0.35875, 2.0043529382170475, 0.8255722316625009, -92.00981773415583);
+		assertFigures(CommonWindow.BLACKMAN_EXACT, 0.42659071367153917, 1.6936989496768255, 1.1500459056561336,
+				-68.23195278001826);
+		assertFigures(CommonWindow.BLACKMAN_HARRIS, 0.35875, 2.0043529382170475, 0.8255722316625009,
+				-92.00981773415583);
 		assertFigures(new KaiserWindow(2.0 * Math.PI), 0.48919349877179163, 1.4963424399996006, 1.4527116460358236,
 				-45.852469125243765);
 		assertFigures(new KaiserWindow(2.5 * Math.PI), 0.4396307514308874, 1.6519206738842571, 1.2010123416303768,
@@ -42,7 +48,8 @@ class WindowTest {
 	@Test
 	void kaiserSamples() {
 		double[] window = new KaiserWindow(8).symmetric(11);
-		double[] expected = { 0.0023388305127333264257, 0.053310549587693972323, 0.22677684133642733605, 0.5365334610606300105,
+		double[] expected = { 0.0023388305127333264257, 0.053310549587693972323, 0.22677684133642733605,
+				0.5365334610606300105,
 				0.85980208177296700948, 1.0 };
 		for (int k = 0; k < expected.length; k++) {
 			assertEquals(expected[k], window[k], 1e-15);
@@ -157,7 +164,8 @@ class WindowTest {
 		assertEquals(-attenuation, peakSideLobe(window, 1 << 14), 1e-4);
 	}
 
-	private static void assertFigures(Window window, double gain, double bandwidth, double scalloping, double sideLobe) {
+	private static void assertFigures(Window window, double gain, double bandwidth, double scalloping,
+			double sideLobe) {
 		double[] w = window.periodic(1024);
 		double sum = 0;
 		double energy = 0;
@@ -185,7 +193,8 @@ class WindowTest {
 		double before = 1;
 		double peak = 0;
 		boolean outside = false;
-		// No side lobe of these windows beyond the 16th bin is the highest, but for the Dolph-Chebyshev window, where all are.
+		// No side lobe of these windows beyond the 16th bin is the highest, but for the Dolph-Chebyshev window, where
+		// all are.
 		int last = Math.min(points / 2, 16 * points / w.length);
 		for (int k = 1; k <= last; k++) {
 			double re = 0;
