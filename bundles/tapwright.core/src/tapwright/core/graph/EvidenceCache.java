@@ -1,15 +1,18 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.core.graph;
 
+import java.io.IOException;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.atomic.AtomicLong;
+import java.util.concurrent.atomic.AtomicReference;
 
 import tapwright.core.verify.FilterEvidence;
 import tapwright.core.verify.FilterQuestion;
 import tapwright.dsp.verify.Effort;
+import tapwright.dsp.verify.Verdict;
 
 /**
  * Remembers answers by the hash of their questions, in memory and in a store that outlives the session. Thread-safe. Evidence is
@@ -20,6 +23,7 @@ public final class EvidenceCache {
 	private final EvidenceStore store;
 	private final Map<String, FilterEvidence> answers = new ConcurrentHashMap<>();
 	private final AtomicLong computed = new AtomicLong();
+	private final AtomicReference<IOException> failure = new AtomicReference<>();
 
 	/** A cache over a store. */
 	public EvidenceCache(EvidenceStore store) {
@@ -41,7 +45,7 @@ public final class EvidenceCache {
 			known = question.answer(effort);
 			computed.incrementAndGet();
 			if (isFinal(known)) {
-				store.put(known);
+				keep(known);
 			}
 		}
 		// What is wrong with the input may depend on parameters that have no value, which the hash does not cover.
@@ -63,12 +67,29 @@ public final class EvidenceCache {
 
 	/** Removes such answers from the store, too. */
 	void retainStored(Set<String> hashes) {
-		store.retain(hashes);
+		try {
+			store.retain(hashes);
+		} catch (IOException e) {
+			failure.compareAndSet(null, e);
+		}
+	}
+
+	/** The first failure of the store since the last call. Evidence is then not lost, only found again at the next start. */
+	public Optional<IOException> takeFailure() {
+		return Optional.ofNullable(failure.getAndSet(null));
+	}
+
+	private void keep(FilterEvidence evidence) {
+		try {
+			store.put(evidence);
+		} catch (IOException e) {
+			failure.compareAndSet(null, e);
+		}
 	}
 
 	// A faster machine, or more time, may prove what this one could not: so 'unproven' lasts for a session only.
 	private static boolean isFinal(FilterEvidence evidence) {
 		return evidence.problems().isEmpty() && evidence.requirements().stream()
-				.noneMatch(requirement -> requirement.proof().verdict() == tapwright.dsp.verify.Verdict.UNPROVEN);
+				.noneMatch(requirement -> requirement.proof().verdict() == Verdict.UNPROVEN);
 	}
 }

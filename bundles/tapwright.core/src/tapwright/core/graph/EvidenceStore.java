@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.core.graph;
 
+import java.io.IOException;
 import java.util.Optional;
 import java.util.Set;
 
@@ -28,12 +29,22 @@ public interface EvidenceStore {
 		}
 	};
 
-	/** The evidence with the given hash. */
+	/** The evidence with the given hash; nothing when it is not there or damaged. */
 	Optional<FilterEvidence> find(String hash);
 
-	/** Keeps evidence under its hash. */
-	void put(FilterEvidence evidence);
+	/**
+	 * Keeps evidence under its hash.
+	 *
+	 * @throws IOException
+	 *             when it cannot be written
+	 */
+	void put(FilterEvidence evidence) throws IOException;
 
-	/** Removes all evidence with other hashes. */
-	void retain(Set<String> hashes);
+	/**
+	 * Removes all evidence with other hashes.
+	 *
+	 * @throws IOException
+	 *             when something cannot be removed
+	 */
+	void retain(Set<String> hashes) throws IOException;
 }

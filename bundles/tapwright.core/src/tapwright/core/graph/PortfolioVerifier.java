@@ -4,6 +4,7 @@ package tapwright.core.graph;
 import java.io.IOException;
 import java.nio.file.NoSuchFileException;
 import java.util.Collection;
+import java.util.Collections;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -12,8 +13,11 @@ import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.concurrent.atomic.AtomicInteger;
 import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 import tapwright.core.InputException;
+import tapwright.core.portfolio.FilePartners;
+import tapwright.core.portfolio.PortfolioContent;
 import tapwright.core.problem.Problem;
 import tapwright.core.problem.Problems;
 import tapwright.core.quantity.Expression;
@@ -70,12 +74,17 @@ public final class PortfolioVerifier {
 			before.filters().forEach(filter -> filters.put(filter.path(), filter));
 			filters.keySet().removeAll(change.removed());
 		}
-		for (VerifiedFilter filter : verify(affected, root.parameters(), progress)) {
+		for (VerifiedFilter filter : verify(List.copyOf(affected), root.parameters(), progress)) {
 			filters.put(filter.path(), filter);
 		}
 		var after = new VerifiedPortfolio(root.parameters(), root.problems(), filters);
 		forgetUnused(after, change.everything());
 		return after;
+	}
+
+	/** The parameters as the root file has them now. */
+	public Expression.Names readParameters() {
+		return readRoot().parameters();
 	}
 
 	private static boolean touches(Change change, String path) {
@@ -88,18 +97,27 @@ public final class PortfolioVerifier {
 		}
 		var affected = new TreeSet<>(change.changed());
 		affected.remove(ModelFiles.PORTFOLIO_FILE);
-		if (parameters != before.parameters()) {
-			before.filters().stream().filter(filter -> dependsOnDifference(filter, before.parameters(), parameters))
-					.map(VerifiedFilter::path).forEach(affected::add);
+		for (VerifiedFilter filter : before.filters()) {
+			if (lacksSomething(filter) || usesDifference(filter, before.parameters(), parameters)) {
+				affected.add(filter.path());
+			}
 		}
+		Set<String> other = Stream.concat(affected.stream(), change.removed().stream()).map(FilePartners::nameOf)
+				.collect(Collectors.toSet());
+		before.filters().stream().filter(filter -> !Collections.disjoint(filter.partners(), other)).map(VerifiedFilter::path)
+				.forEach(affected::add);
 		affected.removeAll(change.removed());
 		return affected;
 	}
 
-	private static boolean dependsOnDifference(VerifiedFilter filter, Expression.Names before, Expression.Names after) {
-		// A filter with a wrong input may lack a parameter that there is now.
-		return filter.evidence().map(FilterEvidence::problems).filter(problems -> !problems.isEmpty()).isPresent()
-				|| filter.parameters().stream().anyMatch(name -> !value(before, name).equals(value(after, name)));
+	// What was not found, a parameter or a partner, may be there now.
+	private static boolean lacksSomething(VerifiedFilter filter) {
+		return filter.evidence().map(FilterEvidence::problems).filter(problems -> !problems.isEmpty()).isPresent();
+	}
+
+	private static boolean usesDifference(VerifiedFilter filter, Expression.Names before, Expression.Names after) {
+		return before != after
+				&& filter.parameters().stream().anyMatch(name -> !value(before, name).equals(value(after, name)));
 	}
 
 	private static Object value(Expression.Names names, String name) {
@@ -126,7 +144,7 @@ public final class PortfolioVerifier {
 		}
 	}
 
-	private List<VerifiedFilter> verify(Collection<String> paths, Expression.Names parameters, Progress progress) {
+	private List<VerifiedFilter> verify(List<String> paths, Expression.Names parameters, Progress progress) {
 		var effort = new Effort(progress, Effort.STANDARD.timeLimit());
 		var done = new AtomicInteger();
 		return paths.parallelStream().map(path -> {
@@ -144,15 +162,15 @@ public final class PortfolioVerifier {
 		try {
 			filter = ModelFiles.parse(content.read(path), path, Filter.class);
 		} catch (IOException e) {
-			return new VerifiedFilter(path, "", "", Set.of(), Optional.empty(), List.of(unreadable(e)));
+			return new VerifiedFilter(path, "", "", Set.of(), Set.of(), Optional.empty(), List.of(unreadable(e)));
 		}
 		if (filter.getName() == null) {
-			filter.setName(baseName(path));
+			filter.setName(FilePartners.nameOf(path));
 		}
-		FilterQuestion question = FilterQuestion.of(filter, parameters);
+		FilterQuestion question = FilterQuestion.of(filter, parameters, new FilePartners(content, parameters));
 		FilterEvidence evidence = cache.answer(question, effort);
 		return new VerifiedFilter(path, question.name(), filter.getIdentity() == null ? "" : filter.getIdentity(),
-				question.parameters(), Optional.of(evidence), Problems.of(evidence));
+				question.parameters(), question.partners(), Optional.of(evidence), Problems.of(evidence));
 	}
 
 	private void forgetUnused(VerifiedPortfolio state, boolean everything) {
@@ -170,11 +188,5 @@ public final class PortfolioVerifier {
 		case NoSuchFileException gone -> Problems.unreadable("it is gone; refresh the project", 0);
 		default -> Problems.unreadable(e.getMessage(), 0);
 		};
-	}
-
-	private static String baseName(String path) {
-		String name = path.substring(path.lastIndexOf('/') + 1);
-		int dot = name.lastIndexOf('.');
-		return dot > 0 ? name.substring(0, dot) : name;
 	}
 }

@@ -19,17 +19,20 @@ import tapwright.core.verify.FilterEvidence;
  *            of the filter; empty when it has none
  * @param parameters
  *            names of the parameters that it uses
+ * @param partners
+ *            names of the filters that its requirements speak of beside itself
  * @param evidence
  *            nothing when the file cannot be read
  * @param ownProblems
  *            problems that this file alone gives rise to
  */
-public record VerifiedFilter(String path, String name, String identity, Set<String> parameters, Optional<FilterEvidence> evidence,
-		List<Problem> ownProblems) {
+public record VerifiedFilter(String path, String name, String identity, Set<String> parameters, Set<String> partners,
+		Optional<FilterEvidence> evidence, List<Problem> ownProblems) {
 
 	/** Takes copies. */
 	public VerifiedFilter {
 		parameters = Set.copyOf(parameters);
+		partners = Set.copyOf(partners);
 		ownProblems = List.copyOf(ownProblems);
 	}
 }

@@ -86,7 +86,7 @@ public final class Sources {
 			Parameters parameters = parameters(file);
 			Filter filter = load(file);
 			if (filter.getName() == null) {
-				filter.setName(baseName(file));
+				filter.setName(FilePartners.nameOf(file.getFileName().toString()));
 			}
 			sources.add(new FilterSource(file, Optional.of(filter), parameters, partners(file, parameters), ""));
 		} catch (InputException e) {
@@ -123,16 +123,10 @@ public final class Sources {
 	}
 
 	private static Partners partners(Path file, Parameters parameters) {
-		return PortfolioFolder.above(file).map(folder -> (Partners) new FolderPartners(folder, parameters)).orElse(Partners.NONE);
+		return PortfolioFolder.above(file).map(folder -> (Partners) new FilePartners(new FolderContent(folder), parameters)).orElse(Partners.NONE);
 	}
 
 	private static FilterSource unreadable(Path file, String problem) {
 		return new FilterSource(file, Optional.empty(), Parameters.NONE, Partners.NONE, problem);
-	}
-
-	private static String baseName(Path file) {
-		String name = file.getFileName().toString();
-		int dot = name.lastIndexOf('.');
-		return dot > 0 ? name.substring(0, dot) : name;
 	}
 }

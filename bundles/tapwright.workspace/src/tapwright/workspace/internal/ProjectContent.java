@@ -9,7 +9,7 @@ import org.eclipse.core.resources.IProject;
 import org.eclipse.core.runtime.CoreException;
 import org.eclipse.core.runtime.IPath;
 
-import tapwright.core.graph.PortfolioContent;
+import tapwright.core.portfolio.PortfolioContent;
 
 /** The files of a project as they are on disk. */
 record ProjectContent(IProject project) implements PortfolioContent {

@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: EPL-2.0
-package tapwright.core.graph;
+package tapwright.core.portfolio;
 
 import java.io.IOException;
 import java.util.Collection;
