@@ -46,7 +46,7 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	/** Gains between bands above this multiple of the largest desired one are mentioned. */
 	private static final double HIGH_PEAK = 1.2;
 	/** Gains between bands that explain why the proof failed. */
-	private static final double UNBEARABLE = 1e6;
+	private static final double UNBEARABLE = 1e3;
 
 	/** Checks the parameters. */
 	public Equiripple {
@@ -154,9 +154,9 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 
 	private static DesignException useless(double lower, double upper, double peak, double wanted) {
 		if (peak > UNBEARABLE * wanted) {
-			return new DesignException(String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the bands,"
-					+ " and coefficients in double precision cannot carry it; make the transitions more equal in width or"
-					+ " reduce the taps", peak));
+			return new DesignException(String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the"
+					+ " bands, and coefficients in double precision cannot carry it; make the transitions more equal in width"
+					+ " or reduce the taps", peak));
 		}
 		return new DesignException(Double.isFinite(upper)
 				? String.format(Locale.ROOT,
