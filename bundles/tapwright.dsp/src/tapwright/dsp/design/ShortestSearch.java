@@ -112,7 +112,7 @@ public final class ShortestSearch {
 				if (acceptance.judge(result.taps()) == Verdict.MET) {
 					boolean proven = excluded(taps - 1) && excluded(taps - 2);
 					notes.add(proven ? "It is proven that no shorter filter of this symmetry meets every requirement."
-							: "Shorter lengths that were tried do not meet every requirement; no proof excludes others.");
+							: "Shorter lengths that were tried do not meet every requirement; others are not excluded.");
 					return new ShortestFilter(family.name(), Optional.of(new Found(taps, design, result, proven)),
 							List.copyOf(trials),
 							List.copyOf(notes));

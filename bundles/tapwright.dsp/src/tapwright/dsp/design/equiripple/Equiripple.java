@@ -155,8 +155,8 @@ public record Equiripple(int taps, Symmetry symmetry, List<Band> bands, double t
 	private static DesignException useless(double lower, double upper, double peak, double wanted) {
 		if (peak > UNBEARABLE * wanted) {
 			return new DesignException(String.format(Locale.ROOT, "the best filter has a gain of about %.1g between the"
-					+ " bands, and coefficients in double precision cannot carry it; make the transitions more equal in width"
-					+ " or reduce the taps", peak));
+					+ " bands, and coefficients in double precision cannot carry it; make the transitions more equal in"
+					+ " width or reduce the taps", peak));
 		}
 		return new DesignException(Double.isFinite(upper)
 				? String.format(Locale.ROOT,
