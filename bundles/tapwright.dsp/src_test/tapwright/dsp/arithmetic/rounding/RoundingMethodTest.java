@@ -53,7 +53,7 @@ class RoundingMethodTest {
 		assertTrue(peak.lo() <= peak.hi());
 	}
 
-	/** Reference: all roundings within four steps of the nearest, tried one by one. */
+	/** Reference: all roundings within two steps of the nearest, tried one by one. */
 	@Test
 	void exhaustiveSearchFindsTheOptimumOfASmallProblem() {
 		NumberFormat format = new NumberFormat(6, 5);
@@ -66,11 +66,11 @@ class RoundingMethodTest {
 
 	private static double leastOfAll(ExactTaps nearest, Judge judge) {
 		double least = Double.MAX_VALUE;
-		for (int code = 0; code < 9 * 9 * 9 * 9 * 9; code++) {
+		for (int code = 0; code < 5 * 5 * 5 * 5 * 5; code++) {
 			List<BigInteger> integers = new ArrayList<>();
 			for (int k = 0, rest = code; k < 9; k++) {
-				int step = k < 5 ? rest % 9 - 4 : 0;
-				rest /= 9;
+				int step = k < 5 ? rest % 5 - 2 : 0;
+				rest /= 5;
 				integers.add(k < 5 ? nearest.integer(k).add(BigInteger.valueOf(step)) : integers.get(8 - k));
 			}
 			ExactTaps taps = ExactTaps.ofIntegers(integers, nearest.unit());
