@@ -112,10 +112,9 @@ public final class ShortestSearch {
 				if (acceptance.judge(result.taps()) == Verdict.MET) {
 					boolean proven = excluded(taps - 1) && excluded(taps - 2);
 					notes.add(proven ? "It is proven that no shorter filter of this symmetry meets every requirement."
-							: "Shorter lengths that were tried do not meet every requirement; others are not excluded.");
+							: "Shorter lengths that were tried miss some requirement; others are not excluded.");
 					return new ShortestFilter(family.name(), Optional.of(new Found(taps, design, result, proven)),
-							List.copyOf(trials),
-							List.copyOf(notes));
+							List.copyOf(trials), List.copyOf(notes));
 				}
 				record(new Trial(taps, Verdict.UNPROVEN,
 						"designed again from its length alone it no longer meets every requirement"));
@@ -131,10 +130,10 @@ public final class ShortestSearch {
 		}
 
 		private boolean excluded(int taps) {
-			return taps < 1 || isImpossible(taps) || family.excludes(taps, progress);
+			return taps < 1 || family.excludes(taps, progress);
 		}
 
-		// Lengths the method refuses at once, such as an even number for a high-pass, are impossible for every method.
+		// Whether the method refuses the length at once, as it does an even number for a high-pass.
 		private boolean isImpossible(int taps) {
 			try {
 				family.design(taps);

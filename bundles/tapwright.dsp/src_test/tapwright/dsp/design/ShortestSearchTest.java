@@ -95,6 +95,28 @@ class ShortestSearchTest {
 	}
 
 	@Test
+	void shortestOddFilterOfTwoCoefficientsIsFound() {
+		List<Band> bands = List.of(new Band(0.4, 0.5, 1, 3));
+		var found = new ShortestSearch(taps -> taps.length >= 2 ? Verdict.MET : Verdict.MISSED, 100, Progress.NONE)
+				.search(new EquirippleFamily(Symmetry.ODD, bands, true)).found().orElseThrow();
+		assertEquals(2, found.taps());
+	}
+
+	@Test
+	void lengthsThatAMethodRefusesAreNotTakenForProvenImpossible() {
+		FilterFamily threes = FilterFamily.of("threes", 30, n -> {
+			if (n % 3 != 0) {
+				throw new IllegalArgumentException("only multiples of three");
+			}
+			return p -> new DesignResult(new double[n]);
+		});
+		var found = new ShortestSearch(taps -> taps.length >= 12 ? Verdict.MET : Verdict.MISSED, 100, Progress.NONE)
+				.search(threes).found().orElseThrow();
+		assertFalse(found.provenShortest());
+		assertEquals(0, found.taps() % 3);
+	}
+
+	@Test
 	void aSearchWithoutAnAnswerEndsAndSaysSo() {
 		ShortestFilter answer = search(40, n -> false);
 		assertTrue(answer.found().isEmpty());

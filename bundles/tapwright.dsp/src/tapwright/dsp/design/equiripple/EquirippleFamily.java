@@ -12,6 +12,7 @@ import tapwright.dsp.design.DesignException;
 import tapwright.dsp.design.DesignResult;
 import tapwright.dsp.design.FilterFamily;
 import tapwright.dsp.design.LengthEstimate;
+import tapwright.dsp.design.LinearPhaseType;
 import tapwright.dsp.exact.Symmetry;
 
 /**
@@ -19,6 +20,9 @@ import tapwright.dsp.exact.Symmetry;
  * earlier one alternates. Not thread-safe.
  */
 public final class EquirippleFamily implements FilterFamily {
+
+	/** A rounded product above this is above 1. */
+	private static final double ABOVE_ONE = 1 + 0x1p-50;
 
 	private final Symmetry symmetry;
 	private final List<Band> bands;
@@ -77,16 +81,29 @@ public final class EquirippleFamily implements FilterFamily {
 
 	@Override
 	public boolean excludes(int taps, Progress progress) {
-		if (!weightsAreLimits) {
-			return false;
-		}
+		boolean isNothing = symmetry == Symmetry.ODD && taps == 1;
+		return weightsAreLimits && !isNothing && (missesAtForcedZero(taps) || lowerBound(taps, progress) > 1);
+	}
+
+	// Whether the bands ask for more than 0 where every filter of this length has gain 0, beyond what the weight
+	// allows.
+	private boolean missesAtForcedZero(int taps) {
+		LinearPhaseType type = LinearPhaseType.of(taps, symmetry);
+		Band first = bands.get(0);
+		Band last = bands.get(bands.size() - 1);
+		return type.zeroAtZero() && first.from() == 0 && Math.abs(first.desiredFrom()) * first.weightFrom() > ABOVE_ONE
+				|| type.zeroAtHalf() && last.to() == 0.5 && Math.abs(last.desiredTo()) * last.weightTo() > ABOVE_ONE;
+	}
+
+	// 0 when there is none to be had.
+	private double lowerBound(int taps, Progress progress) {
 		if (!lowerBounds.containsKey(taps)) {
 			try {
 				compute(design(taps), progress);
-			} catch (DesignException e) {
-				return false;
+			} catch (DesignException | IllegalArgumentException e) {
+				return 0;
 			}
 		}
-		return lowerBounds.get(taps) > 1;
+		return lowerBounds.get(taps);
 	}
 }
