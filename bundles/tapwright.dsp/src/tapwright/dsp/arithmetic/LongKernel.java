@@ -24,7 +24,7 @@ final class LongKernel {
 	private static final int BLOCK = 4096;
 
 	private final Arithmetic arithmetic;
-	private final List<List<Term>> phases = new ArrayList<>();
+	private final List<Term[]> phases = new ArrayList<>();
 	private final long[] coefficients;
 	/** Per phase the coefficients from the oldest sample to the newest, scaled to the accumulator; empty when not plain. */
 	private final long[][] plain;
@@ -48,7 +48,7 @@ final class LongKernel {
 		output = LongStep.of(path.output(), bounds.sum(arithmetic)).orElseThrow();
 		sumsSaturate = !bounds.sumsFit(arithmetic) && arithmetic.overflow() == Overflow.SATURATE;
 		for (int phase = 0; phase < arithmetic.interpolation(); phase++) {
-			phases.add(arithmetic.terms(taps, phase));
+			phases.add(arithmetic.terms(taps, phase).toArray(Term[]::new));
 		}
 		coefficients = new long[taps.length()];
 		Arrays.setAll(coefficients, k -> taps.integer(k).longValueExact());
@@ -116,10 +116,9 @@ final class LongKernel {
 		return sum.apply(total);
 	}
 
-	private long sum(List<Term> terms, int newest) {
+	private long sum(Term[] terms, int newest) {
 		long total = 0;
-		for (int i = 0; i < terms.size(); i++) {
-			Term term = terms.get(i);
+		for (Term term : terms) {
 			long sample = line[newest - term.delay()];
 			if (term.sign() != 0) {
 				sample += term.sign() * line[newest - term.mirror()];

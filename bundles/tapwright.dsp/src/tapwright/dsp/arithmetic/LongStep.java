@@ -60,7 +60,7 @@ final class LongStep {
 	}
 
 	long apply(long value) {
-		long rounded = shift > 0 ? rounding.shift(value, shift) : value << -shift;
+		long rounded = shift > 0 ? value + bias(value) >> shift : value << -shift;
 		if (!limited) {
 			return rounded;
 		}
@@ -68,5 +68,17 @@ final class LongStep {
 			return Math.min(Math.max(rounded, lowest), highest);
 		}
 		return signed ? rounded << unused >> unused : rounded << unused >>> unused;
+	}
+
+	// What to add before the low bits are dropped, without a branch on the value; numbers are small enough for the sum to fit.
+	private long bias(long value) {
+		long half = 1L << shift - 1;
+		return switch (rounding) {
+		case FLOOR -> 0;
+		case TOWARD_ZERO -> value >> Long.SIZE - 1 & (1L << shift) - 1;
+		case HALF_UP -> half;
+		case HALF_EVEN -> half - 1 + (value >> shift & 1);
+		case HALF_AWAY -> half + (value >> Long.SIZE - 1);
+		};
 	}
 }

@@ -43,22 +43,6 @@ public enum Rounding {
 		return roundsUp(half, numerator.signum() < 0, floor.testBit(0)) ? floor.add(BigInteger.ONE) : floor;
 	}
 
-	/**
-	 * The integer that value / 2^bits is rounded to; the same as {@link #divide} in machine words.
-	 *
-	 * @param bits
-	 *            bits to drop, 0 to 62
-	 */
-	public long shift(long value, int bits) {
-		long floor = value >> bits;
-		long above = value - (floor << bits);
-		if (above == 0) {
-			return floor;
-		}
-		int half = Long.compare(above, 1L << (bits - 1));
-		return roundsUp(half, value < 0, (floor & 1) != 0) ? floor + 1 : floor;
-	}
-
 	// For a number strictly between two steps: 'half' compares its distance from the lower one with half a step.
 	private boolean roundsUp(int half, boolean negative, boolean floorIsOdd) {
 		return switch (this) {

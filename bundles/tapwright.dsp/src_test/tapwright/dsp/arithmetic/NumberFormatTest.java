@@ -70,10 +70,8 @@ class NumberFormatTest {
 			case HALF_AWAY -> value.setScale(0, RoundingMode.HALF_UP);
 			};
 			assertEquals(expected.toBigInteger(), rounding.divide(BigInteger.valueOf(eighths), BigInteger.valueOf(8)));
-			assertEquals(expected.longValue(), rounding.shift(eighths, 3));
 		}
 		assertEquals(BigInteger.valueOf(-1), rounding.divide(BigInteger.valueOf(-3), BigInteger.valueOf(3)));
-		assertEquals(-7, rounding.shift(-7, 0));
 	}
 
 	/** Basic operators mult and mult_r of ITU-T G.191, their semantics recalled from memory. */
