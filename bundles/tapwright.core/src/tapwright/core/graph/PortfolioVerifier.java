@@ -27,7 +27,6 @@ import tapwright.core.verify.FilterQuestion;
 import tapwright.dsp.Progress;
 import tapwright.dsp.verify.Effort;
 import tapwright.model.Filter;
-import tapwright.model.ModelPackage;
 import tapwright.model.Portfolio;
 import tapwright.model.io.ModelFileException;
 import tapwright.model.io.ModelFiles;
@@ -50,7 +49,6 @@ public final class PortfolioVerifier {
 	public PortfolioVerifier(PortfolioContent content, EvidenceCache cache) {
 		this.content = content;
 		this.cache = cache;
-		ModelPackage.eINSTANCE.eClass(); // registers the format before several threads read files
 	}
 
 	/**

@@ -9,6 +9,7 @@ import java.util.Map;
 
 import org.eclipse.emf.common.util.URI;
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EPackage;
 import org.eclipse.emf.ecore.xmi.XMLHelper;
 import org.eclipse.emf.ecore.xmi.XMLLoad;
 import org.eclipse.emf.ecore.xmi.XMLResource;
@@ -16,6 +17,8 @@ import org.eclipse.emf.ecore.xmi.impl.SAXXMIHandler;
 import org.eclipse.emf.ecore.xmi.impl.XMILoadImpl;
 import org.eclipse.emf.ecore.xmi.impl.XMIResourceImpl;
 import org.xml.sax.helpers.DefaultHandler;
+
+import tapwright.model.ModelPackage;
 
 /** A file of the model: the format is fixed here and nowhere else. Confined to one thread like all EMF objects. */
 public final class ModelResource extends XMIResourceImpl {
@@ -97,6 +100,12 @@ public final class ModelResource extends XMIResourceImpl {
 
 		Handler(XMLResource resource, XMLHelper helper, Map<?, ?> options) {
 			super(resource, helper, options);
+		}
+
+		// EMF's global registry depends on the thread outside of OSGi; files are read on many.
+		@Override
+		protected EPackage getPackageForURI(String uri) {
+			return ModelPackage.eNS_URI.equals(uri) ? ModelPackage.eINSTANCE : super.getPackageForURI(uri);
 		}
 
 		@Override
