@@ -1,10 +1,10 @@
 // SPDX-License-Identifier: EPL-2.0
 package tapwright.app;
 
-import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.nio.file.Path;
+import java.util.Arrays;
 
 import org.eclipse.core.resources.IProject;
 import org.eclipse.core.resources.IResource;
@@ -30,9 +30,11 @@ class SamplePortfolioTest {
 		int problems = project.findMarkers(ProblemMarkers.TYPE, true, IResource.DEPTH_INFINITE).length;
 		assertTrue(problems >= 2, problems + " problems");
 		IWorkbenchPage page = PlatformUI.getWorkbench().getActiveWorkbenchWindow().getActivePage();
-		Waiting.until("an editor", () -> page.getActiveEditor() instanceof FilterEditor);
-		var editor = (FilterEditor) page.getActiveEditor();
-		Waiting.until("its proof", () -> editor.proof().latest().isPresent());
-		assertEquals(Verdict.MISSED, editor.proof().latest().orElseThrow().evidence().verdict());
+		Waiting.until("an editor on a filter that misses a requirement", () -> Arrays.stream(page.getEditorReferences())
+				.anyMatch(reference -> reference.getEditor(false) instanceof FilterEditor editor && misses(editor)));
+	}
+
+	private static boolean misses(FilterEditor editor) {
+		return editor.proof().latest().filter(proven -> proven.evidence().verdict() == Verdict.MISSED).isPresent();
 	}
 }

@@ -89,7 +89,6 @@ class ScreensTest {
 		IDE.openEditor(page, PortfolioProject.of(project).orElseThrow().portfolioFile());
 		picture(name + "-portfolio");
 		wizard(project, name);
-		page.closeAllEditors(false);
 	}
 
 	private void wizard(IProject project, String name) throws IOException {

@@ -2,23 +2,16 @@
 package tapwright.app;
 
 import org.eclipse.jface.action.GroupMarker;
-import org.eclipse.jface.action.ICoolBarManager;
 import org.eclipse.jface.action.IMenuManager;
 import org.eclipse.jface.action.MenuManager;
 import org.eclipse.jface.action.Separator;
-import org.eclipse.jface.action.ToolBarContributionItem;
-import org.eclipse.jface.action.ToolBarManager;
-import org.eclipse.ui.ISharedImages;
 import org.eclipse.ui.IWorkbenchActionConstants;
-import org.eclipse.ui.IWorkbenchCommandConstants;
 import org.eclipse.ui.IWorkbenchWindow;
 import org.eclipse.ui.actions.ActionFactory;
 import org.eclipse.ui.actions.ActionFactory.IWorkbenchAction;
 import org.eclipse.ui.actions.ContributionItemFactory;
 import org.eclipse.ui.application.ActionBarAdvisor;
 import org.eclipse.ui.application.IActionBarConfigurer;
-import org.eclipse.ui.menus.CommandContributionItem;
-import org.eclipse.ui.menus.CommandContributionItemParameter;
 
 /** Menu bar and tool bar: what an owner of filters uses, in the places where Eclipse has it. */
 final class TapwrightActionBarAdvisor extends ActionBarAdvisor {
@@ -83,24 +76,5 @@ final class TapwrightActionBarAdvisor extends ActionBarAdvisor {
 
 	private IWorkbenchAction action(ActionFactory factory) {
 		return (IWorkbenchAction) getAction(factory.getId());
-	}
-
-	@Override
-	protected void fillCoolBar(ICoolBarManager bar) {
-		var tools = new ToolBarManager(bar.getStyle());
-		tools.add(action(ActionFactory.NEW));
-		tools.add(action(ActionFactory.SAVE));
-		bar.add(new ToolBarContributionItem(tools, IWorkbenchActionConstants.TOOLBAR_FILE));
-		var edits = new ToolBarManager(bar.getStyle());
-		edits.add(command(IWorkbenchCommandConstants.EDIT_UNDO, ISharedImages.IMG_TOOL_UNDO));
-		edits.add(command(IWorkbenchCommandConstants.EDIT_REDO, ISharedImages.IMG_TOOL_REDO));
-		bar.add(new ToolBarContributionItem(edits, IWorkbenchActionConstants.M_EDIT));
-		bar.add(new GroupMarker(IWorkbenchActionConstants.MB_ADDITIONS));
-	}
-
-	private CommandContributionItem command(String id, String icon) {
-		var parameter = new CommandContributionItemParameter(window, id, id, CommandContributionItem.STYLE_PUSH);
-		parameter.icon = window.getWorkbench().getSharedImages().getImageDescriptor(icon);
-		return new CommandContributionItem(parameter);
 	}
 }

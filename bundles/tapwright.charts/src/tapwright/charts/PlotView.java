@@ -15,6 +15,7 @@ import org.eclipse.swt.accessibility.AccessibleAdapter;
 import org.eclipse.swt.accessibility.AccessibleEvent;
 import org.eclipse.swt.graphics.Color;
 import org.eclipse.swt.graphics.Image;
+import org.eclipse.swt.graphics.Point;
 import org.eclipse.swt.graphics.Rectangle;
 import org.eclipse.swt.widgets.Composite;
 import org.eclipse.swt.widgets.Control;
@@ -79,7 +80,7 @@ public final class PlotView extends Composite {
 		new PlotInput(this, area());
 		new PlotMenu(this, area());
 		describeForScreenReaders();
-		area().addListener(SWT.Resize, event -> drawCurves());
+		area().addListener(SWT.Resize, event -> resized());
 		JFaceResources.getColorRegistry().addListener(themeListener);
 		addDisposeListener(event -> JFaceResources.getColorRegistry().removeListener(themeListener));
 		applyColors();
@@ -263,6 +264,26 @@ public final class PlotView extends Composite {
 		line.setSymbolColor(color);
 	}
 
+	private void resized() {
+		if (plot.sameScale()) {
+			applyWindow();
+		}
+		drawCurves();
+	}
+
+	/** The window, widened where both axes must have the same scale. */
+	private Window shown() {
+		Point size = area().getSize();
+		if (!plot.sameScale() || size.x < 2 || size.y < 2) {
+			return window;
+		}
+		double unit = Math.max(window.width() / size.x, window.height() / size.y);
+		double middleX = (window.left() + window.right()) / 2;
+		double middleY = (window.bottom() + window.top()) / 2;
+		return new Window(middleX - unit * size.x / 2, middleX + unit * size.x / 2, middleY - unit * size.y / 2,
+				middleY + unit * size.y / 2);
+	}
+
 	/** Hands the chart no more points than its pixels can show. */
 	private void drawCurves() {
 		if (isDisposed() || plot.curves().isEmpty()) {
@@ -286,8 +307,9 @@ public final class PlotView extends Composite {
 	private void applyWindow() {
 		boolean suspended = chart.isUpdateSuspended();
 		chart.suspendUpdate(true);
-		apply(xAxis(), plot.x(), window.left(), window.right());
-		apply(yAxis(), plot.y(), window.bottom(), window.top());
+		Window shown = shown();
+		apply(xAxis(), plot.x(), shown.left(), shown.right());
+		apply(yAxis(), plot.y(), shown.bottom(), shown.top());
 		if (!suspended) {
 			chart.suspendUpdate(false);
 		}

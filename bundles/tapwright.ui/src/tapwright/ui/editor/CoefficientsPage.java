@@ -29,22 +29,22 @@ final class CoefficientsPage extends FilterEditorPage {
 	@Override
 	void createBody(Composite body, FormToolkit toolkit) {
 		GridLayoutFactory.swtDefaults().margins(8, 8).applyTo(body);
-		var rows = new SashForm(body, SWT.VERTICAL | SWT.SMOOTH);
-		toolkit.adapt(rows);
-		GridDataFactory.fillDefaults().grab(true, true).hint(500, 330).applyTo(rows);
-		var top = new SashForm(rows, SWT.HORIZONTAL | SWT.SMOOTH);
-		toolkit.adapt(top);
-		Composite left = Sections.pane(toolkit, top);
+		var columns = new SashForm(body, SWT.HORIZONTAL | SWT.SMOOTH);
+		toolkit.adapt(columns);
+		GridDataFactory.fillDefaults().grab(true, true).hint(500, 330).applyTo(columns);
+		Composite left = Sections.pane(toolkit, columns);
 		design = new DesignSection(this, toolkit, Sections.create(toolkit, left, "Where they come from", "", true));
-		Composite right = Sections.pane(toolkit, top);
-		numbers = new CoefficientTable(getEditor(), toolkit, Sections.create(toolkit, right, "The numbers", "", true));
-		top.setWeights(45, 55);
+		var rows = new SashForm(columns, SWT.VERTICAL | SWT.SMOOTH);
+		toolkit.adapt(rows);
+		Composite top = Sections.pane(toolkit, rows);
+		numbers = new CoefficientTable(getEditor(), toolkit, Sections.create(toolkit, top, "The numbers", "", true));
 		Composite bottom = Sections.pane(toolkit, rows);
 		picture = new PicturePane(Sections.create(toolkit, bottom, "Impulse response", "", true));
 		picture.hideTools();
 		picture.setStyle(PictureStyle.USUAL.with(PictureKind.IMPULSE));
-		GridDataFactory.fillDefaults().grab(true, true).hint(400, 90).applyTo(picture);
-		rows.setWeights(62, 38);
+		GridDataFactory.fillDefaults().grab(true, true).hint(300, 90).applyTo(picture);
+		rows.setWeights(52, 48);
+		columns.setWeights(42, 58);
 	}
 
 	@Override

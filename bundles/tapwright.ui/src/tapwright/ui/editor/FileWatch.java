@@ -15,6 +15,7 @@ final class FileWatch implements IResourceChangeListener, IPartListener2 {
 
 	private final ModelEditor<?> editor;
 	private final Display display;
+	private boolean disposed;
 
 	FileWatch(ModelEditor<?> editor) {
 		this.editor = editor;
@@ -31,13 +32,20 @@ final class FileWatch implements IResourceChangeListener, IPartListener2 {
 			return;
 		}
 		if (delta.getKind() == IResourceDelta.REMOVED) {
-			display.asyncExec(() -> editor.close(true));
+			display.asyncExec(() -> {
+				if (!disposed) {
+					editor.close(false); // there is nothing to save to
+				}
+			});
 		} else if ((delta.getFlags() & (IResourceDelta.CONTENT | IResourceDelta.REPLACED)) != 0) {
 			display.asyncExec(this::check);
 		}
 	}
 
 	private void check() {
+		if (disposed) {
+			return;
+		}
 		boolean active = editor.getSite().getPage().getActiveEditor() == editor;
 		if (active || !editor.isDirty()) {
 			editor.fileChangedOutside();
@@ -52,6 +60,7 @@ final class FileWatch implements IResourceChangeListener, IPartListener2 {
 	}
 
 	void dispose() {
+		disposed = true;
 		ResourcesPlugin.getWorkspace().removeResourceChangeListener(this);
 		editor.getSite().getPage().removePartListener(this);
 	}

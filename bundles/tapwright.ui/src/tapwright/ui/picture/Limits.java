@@ -9,6 +9,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 
 import tapwright.charts.Region;
+import tapwright.dsp.response.FrequencyResponse;
 import tapwright.dsp.verify.GainLimit;
 import tapwright.dsp.verify.GainReference;
 import tapwright.dsp.verify.Requirement;
@@ -79,17 +80,13 @@ final class Limits {
 		return switch (reference) {
 		case GainReference.Absolute absolute -> 0;
 		case GainReference.AtFrequency at -> largest(new double[] { at.frequency() });
-		case GainReference.LargestIn in -> largest(Samples.places(in.from(), in.to(), POINTS_OF_A_BAND, false));
+		case GainReference.LargestIn in -> largest(Places.between(in.from(), in.to(), POINTS_OF_A_BAND, false));
 		};
 	}
 
 	private double largest(double[] hertz) {
-		Samples samples = Samples.of(subject, hertz);
-		double largest = 0;
-		for (int k = 0; k < hertz.length; k++) {
-			largest = Math.max(largest, samples.magnitude(k));
-		}
-		return 20 * Math.log10(largest);
+		double[] levels = FrequencyResponse.of(subject.taps().toDoubles(), subject.sampleRate(), hertz).decibels();
+		return Arrays.stream(levels).max().orElseThrow();
 	}
 
 	/** Lowest upper limit; nothing when there is none. */

@@ -12,7 +12,9 @@ public enum PictureKind {
 	/** Coefficients over time. */
 	IMPULSE("Impulse response"),
 	/** Running sum of the coefficients over time. */
-	STEP("Step response");
+	STEP("Step response"),
+	/** Zeros of the transfer function in the z plane. */
+	ZEROS("Zeros");
 
 	private final String label;
 

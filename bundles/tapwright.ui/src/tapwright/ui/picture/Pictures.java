@@ -16,6 +16,8 @@ import tapwright.charts.Plot;
 import tapwright.charts.Region;
 import tapwright.charts.Window;
 import tapwright.core.verify.RequirementEvidence;
+import tapwright.dsp.response.FrequencyResponse;
+import tapwright.dsp.response.StepCurve;
 import tapwright.dsp.verify.Subject;
 import tapwright.dsp.verify.Verdict;
 import tapwright.ui.look.Verdicts;
@@ -47,8 +49,11 @@ public final class Pictures {
 			return Plot.of(title, new Axis("Frequency", "Hz"), new Axis(style.kind().label(), ""), List.of(),
 					new Window(0, 1, 0, 1), "There are no coefficients to draw.");
 		}
-		return style.kind().isOverFrequency() ? overFrequency(drawn, style, title, emphasized, detail)
-				: overTime(drawn, style.kind(), title);
+		return switch (style.kind()) {
+		case MAGNITUDE, PHASE, GROUP_DELAY -> overFrequency(drawn, style, title, emphasized, detail);
+		case IMPULSE, STEP -> overTime(drawn, style.kind(), title);
+		case ZEROS -> ZeroPictures.of(drawn, title);
+		};
 	}
 
 	private static Plot overFrequency(List<Overlay> drawn, PictureStyle style, String title, String emphasized, Window detail) {
@@ -60,7 +65,7 @@ public final class Pictures {
 		for (Overlay overlay : drawn) {
 			Subject subject = overlay.snapshot().subject().orElseThrow();
 			double[] hertz = places(least, subject.sampleRate() / 2, style.logarithmic(), detail);
-			curves.add(new Curve(overlay.snapshot().name(), hertz, values(Samples.of(subject, hertz), style), Curve.Style.LINE));
+			curves.add(new Curve(overlay.snapshot().name(), hertz, values(response(subject, hertz), style), Curve.Style.LINE));
 			if (style.kind() == PictureKind.MAGNITUDE) {
 				regions.addAll(new Limits(subject, style).regions(overlay.snapshot().statements(), emphasized));
 				overlay.evidence().ifPresent(evidence -> evidence.requirements()
@@ -84,43 +89,40 @@ public final class Pictures {
 
 	// The whole range, and more places where a person looks closer.
 	private static double[] places(double least, double half, boolean logarithmic, Window detail) {
-		double[] all = Samples.places(least, half, POINTS, logarithmic);
+		double[] all = Places.between(least, half, POINTS, logarithmic);
 		if (detail == null || detail.left() >= half) {
 			return all;
 		}
-		double[] close = Samples.places(Math.max(least, detail.left()), Math.min(half, detail.right()), POINTS, logarithmic);
+		double[] close = Places.between(Math.max(least, detail.left()), Math.min(half, detail.right()), POINTS, logarithmic);
 		return DoubleStream.concat(Arrays.stream(all), Arrays.stream(close)).sorted()
 				.toArray();
 	}
 
-	private static double[] values(Samples samples, PictureStyle style) {
+	private static FrequencyResponse response(Subject subject, double... hertz) {
+		return FrequencyResponse.of(subject.taps().toDoubles(), subject.sampleRate(), hertz);
+	}
+
+	private static double[] values(FrequencyResponse response, PictureStyle style) {
 		return switch (style.kind()) {
-		case PHASE -> phase(samples);
-		case GROUP_DELAY -> samples.delay();
-		default -> {
-			double[] values = new double[samples.hertz().length];
-			for (int k = 0; k < values.length; k++) {
-				values[k] = level(samples.magnitude(k), style.decibels());
-			}
-			yield values;
-		}
+		case PHASE -> phase(response);
+		case GROUP_DELAY -> response.groupDelay();
+		default -> style.decibels() ? Arrays.stream(response.decibels()).map(level -> Math.max(FLOOR_DB, level)).toArray()
+				: response.magnitude();
 		};
 	}
 
-	private static double level(double magnitude, boolean decibels) {
-		return decibels ? Math.max(FLOOR_DB, 20 * Math.log10(magnitude)) : magnitude;
-	}
-
 	// Degrees, without the straight line that the delay at the strongest frequency makes.
-	private static double[] phase(Samples samples) {
+	private static double[] phase(FrequencyResponse response) {
+		double[] magnitude = response.magnitude();
 		int strongest = 0;
-		for (int k = 0; k < samples.hertz().length; k++) {
-			strongest = samples.magnitude(k) > samples.magnitude(strongest) ? k : strongest;
+		for (int k = 0; k < magnitude.length; k++) {
+			strongest = magnitude[k] > magnitude[strongest] ? k : strongest;
 		}
-		double delay = samples.delay()[strongest];
-		double[] degrees = new double[samples.hertz().length];
+		double delay = response.groupDelay()[strongest];
+		double[] phase = response.phase();
+		double[] degrees = new double[phase.length];
 		for (int k = 0; k < degrees.length; k++) {
-			double turned = Math.atan2(samples.imaginary()[k], samples.real()[k]) + 2 * Math.PI * samples.hertz()[k] * delay;
+			double turned = phase[k] + 2 * Math.PI * response.hertz()[k] * delay;
 			degrees[k] = Math.toDegrees(Math.IEEEremainder(turned, 2 * Math.PI));
 		}
 		return degrees;
@@ -133,7 +135,7 @@ public final class Pictures {
 		if (!found.placeUnit().equals("Hz") || Double.isNaN(place) || !(missed || emphasized)) {
 			return;
 		}
-		double level = level(Samples.of(subject, new double[] { place }).magnitude(0), style.decibels());
+		double level = values(response(subject, place), style)[0];
 		marks.add(new Mark(place, level, found.id() + " " + Verdicts.margin(found), missed));
 	}
 
@@ -160,13 +162,10 @@ public final class Pictures {
 			double[] taps = overlay.snapshot().subject().orElseThrow().taps().toDoubles();
 			double rate = rate(overlay);
 			double[] x = new double[taps.length];
-			double[] y = new double[taps.length];
-			double sum = 0;
 			for (int n = 0; n < taps.length; n++) {
-				sum += taps[n];
 				x[n] = n / rate;
-				y[n] = kind == PictureKind.STEP ? sum : taps[n];
 			}
+			double[] y = kind == PictureKind.STEP ? StepCurve.of(taps) : taps;
 			end = Math.max(end, taps.length / rate);
 			curves.add(new Curve(overlay.snapshot().name(), x, y,
 					kind == PictureKind.STEP ? Curve.Style.LINE : Curve.Style.STEMS));

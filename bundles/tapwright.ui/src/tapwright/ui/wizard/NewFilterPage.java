@@ -25,7 +25,6 @@ import tapwright.core.quantity.Numbers;
 import tapwright.core.quantity.Words;
 import tapwright.model.ModelPackage;
 import tapwright.model.io.ModelFiles;
-import tapwright.ui.look.Icons;
 import tapwright.workspace.PortfolioProject;
 
 /** Asks for portfolio, name, sample rate and purpose of a new filter. */
@@ -46,7 +45,6 @@ final class NewFilterPage extends WizardPage {
 		this.selection = selection;
 		setTitle("Filter");
 		setDescription("Name the filter and say at which rate it runs. Requirements and coefficients follow in its editor.");
-		setImageDescriptor(Icons.descriptor(Icons.FILTER));
 	}
 
 	@Override

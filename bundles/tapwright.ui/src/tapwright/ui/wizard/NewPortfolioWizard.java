@@ -20,7 +20,6 @@ import tapwright.model.ModelFactory;
 import tapwright.model.Portfolio;
 import tapwright.model.io.ModelFiles;
 import tapwright.ui.Tasks;
-import tapwright.ui.look.Icons;
 import tapwright.workspace.PortfolioNature;
 
 /** Starts a portfolio: a project with an empty root file. */
@@ -41,7 +40,6 @@ public final class NewPortfolioWizard extends Wizard implements INewWizard {
 		page = new WizardNewProjectCreationPage("portfolio");
 		page.setTitle("Portfolio");
 		page.setDescription("A portfolio holds all filters of one product. Its folder can be kept in version control.");
-		page.setImageDescriptor(Icons.descriptor(Icons.PORTFOLIO));
 		addPage(page);
 	}
 
