@@ -8,9 +8,9 @@ import java.util.List;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /**
- * The coefficients h[0..N-1] of a finite impulse response as exact rationals: integers times one common positive unit. This is
- * what every proof speaks of. Immutable and thread-safe; integers are made from doubles only when they are asked for, since most
- * proofs end without them.
+ * The coefficients h[0..N-1] of a finite impulse response as exact rationals: integers times one common positive
+ * unit. This is what every proof speaks of. Immutable and thread-safe; integers are made from doubles only when they
+ * are asked for, since most proofs end without them.
  */
 public final class ExactTaps {
 
@@ -32,8 +32,8 @@ public final class ExactTaps {
 	 * Doubles near the coefficients.
 	 *
 	 * @param values
-	 *            coefficient k over 2^exponent, off by at most 2^-53 of itself plus 2^-1074; the largest absolute value lies
-	 *            between 2^-61 and 2^61 unless all are zero; do not change the array
+	 *            coefficient k over 2^exponent, off by at most 2^-53 of itself plus 2^-1074; the largest absolute
+	 *            value lies between 2^-61 and 2^61 unless all are zero; do not change the array
 	 * @param exponent
 	 *            of the common factor
 	 */
@@ -67,7 +67,8 @@ public final class ExactTaps {
 	public static ExactTaps ofDoubles(double... taps) {
 		for (int k = 0; k < taps.length; k++) {
 			if (!Double.isFinite(taps[k])) {
-				throw new IllegalArgumentException("coefficient " + k + " is " + taps[k] + "; it must be a finite number");
+				throw new IllegalArgumentException("coefficient " + k + " is " + taps[k]
+						+ "; it must be a finite number");
 			}
 		}
 		return new ExactTaps(taps.clone());
@@ -83,7 +84,8 @@ public final class ExactTaps {
 	 */
 	public static ExactTaps ofIntegers(List<BigInteger> integers, BigFraction unit) {
 		if (unit.compareTo(BigFraction.ZERO) <= 0) {
-			throw new IllegalArgumentException("the scale of integer coefficients is " + unit + "; it must be positive");
+			throw new IllegalArgumentException("the scale of integer coefficients is " + unit
+					+ "; it must be positive");
 		}
 		return new ExactTaps(integers.toArray(BigInteger[]::new), unit);
 	}
@@ -146,7 +148,8 @@ public final class ExactTaps {
 			return new Scaled(doubles, 0);
 		}
 		// In two steps: a single factor of 2^1074 would overflow.
-		return new Scaled(Arrays.stream(doubles).map(tap -> Math.scalb(Math.scalb(tap, -exponent / 2), -exponent + exponent / 2))
+		return new Scaled(Arrays.stream(doubles).map(tap -> Math.scalb(Math.scalb(tap, -exponent / 2), -exponent
+				+ exponent / 2))
 				.toArray(), exponent);
 	}
 

@@ -6,9 +6,9 @@ import java.math.BigInteger;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /**
- * Interval arithmetic on multiples of 2^-bits, of any size. Every operation rounds its lower end down and its upper end up, so an
- * enclosure of the operands gives an enclosure of the result; series are cut with a bound on the rest added. Immutable apart from
- * cached constants; thread-safe.
+ * Interval arithmetic on multiples of 2^-bits, of any size. Every operation rounds its lower end down and its upper
+ * end up, so an enclosure of the operands gives an enclosure of the result; series are cut with a bound on the rest
+ * added. Immutable apart from cached constants; thread-safe.
  */
 public final class FixedPoint {
 
@@ -121,7 +121,8 @@ public final class FixedPoint {
 	/** The number pi, by J. Machin's formula of 1706: pi/4 = 4 atan(1/5) - atan(1/239). */
 	public Interval pi() {
 		if (pi == null) {
-			pi = inverseArc(5, -1).multiply(BigInteger.valueOf(16)).subtract(inverseArc(239, -1).multiply(BigInteger.valueOf(4)));
+			pi = inverseArc(5, -1).multiply(BigInteger.valueOf(16)).subtract(inverseArc(239, -1)
+					.multiply(BigInteger.valueOf(4)));
 		}
 		return pi;
 	}
@@ -148,7 +149,8 @@ public final class FixedPoint {
 		BigInteger eighth = floor(rest.multiply(8).add(BigFraction.ONE)).shiftRight(1).and(BigInteger.valueOf(3));
 		// Quarter turns are exact; what remains lies within an eighth of a turn of zero.
 		int quarter = eighth.intValue();
-		BigFraction small = rest.subtract(new BigFraction(floor(rest.multiply(8).add(BigFraction.ONE)).shiftRight(1)).divide(4));
+		BigFraction small = rest.subtract(new BigFraction(floor(rest.multiply(8).add(BigFraction.ONE)).shiftRight(1))
+				.divide(4));
 		Interval angle = multiply(of(small.multiply(2)), pi());
 		Interval cosine = series(angle, 0);
 		Interval sine = series(angle, 1);
@@ -220,7 +222,8 @@ public final class FixedPoint {
 	private Interval expEnd(Interval x) {
 		BigInteger n = x.lo().divide(ln2().lo());
 		Interval rest = x.subtract(ln2().multiply(n));
-		// |rest| < 0.7 + n 2^-bits: each term is less than 0.8 of the one before, the rest of the series below four terms.
+		// |rest| < 0.7 + n 2^-bits: each term is less than 0.8 of the one before, the rest of the series below four
+		// terms.
 		Interval term = exact(one);
 		Interval sum = term;
 		for (int i = 1; term.magnitude().bitLength() > 1; i++) {
@@ -242,7 +245,8 @@ public final class FixedPoint {
 			power = multiply(power, square);
 			sum = sum.add(divide(power, 2 * i + 1));
 		}
-		return sum.widen(BigInteger.TWO).multiply(BigInteger.TWO).negate().add(ln2().multiply(BigInteger.valueOf(exponent)));
+		return sum.widen(BigInteger.TWO).multiply(BigInteger.TWO).negate().add(ln2()
+				.multiply(BigInteger.valueOf(exponent)));
 	}
 
 	private static Interval quotient(BigInteger numerator, BigInteger divisor) {

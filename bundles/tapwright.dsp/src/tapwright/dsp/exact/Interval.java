@@ -4,8 +4,8 @@ package tapwright.dsp.exact;
 import java.math.BigInteger;
 
 /**
- * A closed interval of multiples of a power of two; which power, its {@link FixedPoint} knows. It always contains the true value
- * that it stands for.
+ * A closed interval of multiples of a power of two; which power, its {@link FixedPoint} knows. It always contains the
+ * true value that it stands for.
  *
  * @param lo
  *            lower end

@@ -24,7 +24,8 @@ public final class Rationals {
 		if (numerator.signum() == 0) {
 			return 0;
 		}
-		// 64 quotient bits and a sticky bit leave the one rounding to BigDecimal.doubleValue, which is correctly rounded.
+		// 64 quotient bits and a sticky bit leave the one rounding to BigDecimal.doubleValue, which is correctly
+		// rounded.
 		BigInteger magnitude = numerator.abs();
 		int shift = 66 - (magnitude.bitLength() - denominator.bitLength());
 		BigInteger scaled = shift >= 0 ? magnitude.shiftLeft(shift) : magnitude;

@@ -5,19 +5,20 @@ import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.ConcurrentMap;
 
 /**
- * The discrete Fourier transform X[f] = sum of x[k] exp(-2 pi i f k / size) for sizes that are powers of two, with a proven error
- * bound. Immutable and thread-safe; one instance per size is kept.
+ * The discrete Fourier transform X[f] = sum of x[k] exp(-2 pi i f k / size) for sizes that are powers of two, with a
+ * proven error bound. Immutable and thread-safe; one instance per size is kept.
  * <p>
- * Method: decimation in frequency with radix 4 and one last stage of radix 2 when needed, after W. M. Gentleman and G. Sande, Fast
- * Fourier transforms for fun and profit, AFIPS Fall Joint Computer Conference, 1966.
+ * Method: decimation in frequency with radix 4 and one last stage of radix 2 when needed, after W. M. Gentleman and
+ * G. Sande, Fast Fourier transforms for fun and profit, AFIPS Fall Joint Computer Conference, 1966.
  * <p>
- * Error bound, with u = 2^-53. A stage of radix 4 makes each of its outputs from four inputs by two additions (relative error u
- * each, against the sum of moduli) and one product with a table entry. Entries are off by at most 3u: the angle, at most pi/4
- * after exact reduction, is off by 1.6u of itself, and {@link StrictMath} errs by at most one unit in the last place, that is u
- * below 1. The product adds at most sqrt(5) u (R. Brent, C. Percival, P. Zimmermann, Error bounds on complex floating-point
- * multiplication, Mathematics of Computation 76, 2007). Altogether a stage errs by less than 9u times the sum of the moduli of
- * the inputs that reach an output, the last stage by less than 2u, and since every output is reached by every input once with a factor of modulus
- * 1, after all stages an output errs by at most {@link #errorFactor()} times the sum of the moduli of all inputs.
+ * Error bound, with u = 2^-53. A stage of radix 4 makes each of its outputs from four inputs by two additions
+ * (relative error u each, against the sum of moduli) and one product with a table entry. Entries are off by at most
+ * 3u: the angle, at most pi/4 after exact reduction, is off by 1.6u of itself, and {@link StrictMath} errs by at most
+ * one unit in the last place, that is u below 1. The product adds at most sqrt(5) u (R. Brent, C. Percival, P.
+ * Zimmermann, Error bounds on complex floating-point multiplication, Mathematics of Computation 76, 2007). Altogether
+ * a stage errs by less than 9u times the sum of the moduli of the inputs that reach an output, the last stage by less
+ * than 2u, and since every output is reached by every input once with a factor of modulus 1, after all stages an
+ * output errs by at most {@link #errorFactor()} times the sum of the moduli of all inputs.
  */
 public final class Fft {
 
@@ -58,7 +59,8 @@ public final class Fft {
 	 */
 	public static Fft ofSize(int size) {
 		if (size < 4 || size > LARGEST || Integer.bitCount(size) != 1) {
-			throw new IllegalArgumentException("a transform of size " + size + "; the size must be a power of two from 4 to 2^26");
+			throw new IllegalArgumentException("a transform of size " + size
+					+ "; the size must be a power of two from 4 to 2^26");
 		}
 		return INSTANCES.computeIfAbsent(size, Fft::new);
 	}

@@ -2,8 +2,8 @@
 package tapwright.dsp.response;
 
 /**
- * The frequency response H(f) = sum of h[k] exp(-2 pi i f k / rate) at some frequencies, in double precision: for pictures, not
- * for verdicts. The arrays belong to the record; do not change them.
+ * The frequency response H(f) = sum of h[k] exp(-2 pi i f k / rate) at some frequencies, in double precision: for
+ * pictures, not for verdicts. The arrays belong to the record; do not change them.
  *
  * @param hertz
  *            frequencies
@@ -28,7 +28,8 @@ public record FrequencyResponse(double[] hertz, double[] real, double[] imaginar
 	 */
 	public static FrequencyResponse of(double[] taps, double sampleRate, double[] hertz) {
 		int count = hertz.length;
-		FrequencyResponse response = new FrequencyResponse(hertz.clone(), new double[count], new double[count], new double[count]);
+		FrequencyResponse response = new FrequencyResponse(hertz.clone(), new double[count], new double[count],
+				new double[count]);
 		for (int k = 0; k < count; k++) {
 			response.evaluate(k, taps, sampleRate);
 		}
@@ -77,8 +78,8 @@ public record FrequencyResponse(double[] hertz, double[] real, double[] imaginar
 	}
 
 	/**
-	 * Phases in radians; a new array. Neighbours never differ by more than pi, so the curve is smooth where frequencies are dense
-	 * enough; it starts between -pi and pi.
+	 * Phases in radians; a new array. Neighbours never differ by more than pi, so the curve is smooth where
+	 * frequencies are dense enough; it starts between -pi and pi.
 	 */
 	public double[] phase() {
 		double[] phase = new double[hertz.length];

@@ -7,7 +7,8 @@ public final class StepCurve {
 	private StepCurve() {
 	}
 
-	/** Running sums of the coefficients: what a filter answers to 0, 0, 1, 1, 1, ... from the first 1 on; a new array. */
+	/** Running sums of the coefficients: what a filter answers to 0, 0, 1, 1, 1,
+			... from the first 1 on; a new array. */
 	public static double[] of(double[] taps) {
 		double[] step = taps.clone();
 		for (int k = 1; k < step.length; k++) {

@@ -9,10 +9,11 @@ import org.apache.commons.math3.complex.Complex;
 /**
  * The zeros of the transfer function sum of h[k] z^-k, in double precision.
  * <p>
- * Method: simultaneous iteration of L. W. Ehrlich, A modified Newton method for polynomials, Communications of the ACM 10(2), 1967,
- * and O. Aberth, Iteration methods for finding all zeros of a polynomial simultaneously, Mathematics of Computation 27, 1973. No zero
- * is divided out, so errors do not pile up. It starts on circles that the convex hull of the logarithms of the coefficients gives (D. A. Bini,
- * Numerical computation of polynomial zeros by means of Aberth's method, Numerical Algorithms 13, 1996).
+ * Method: simultaneous iteration of L. W. Ehrlich, A modified Newton method for polynomials, Communications of the
+ * ACM 10(2), 1967, and O. Aberth, Iteration methods for finding all zeros of a polynomial simultaneously, Mathematics
+ * of Computation 27, 1973. No zero is divided out, so errors do not pile up. It starts on circles that the convex
+ * hull of the logarithms of the coefficients gives (D. A. Bini, Numerical computation of polynomial zeros by means of
+ * Aberth's method, Numerical Algorithms 13, 1996).
  */
 public final class Zeros {
 

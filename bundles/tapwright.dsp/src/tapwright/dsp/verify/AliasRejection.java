@@ -10,9 +10,9 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * When one sample in so many is kept, what folds into the kept band is attenuated by at least this much: the gain is at most -min dB
- * within {@code to} of every multiple of the new sample rate but 0. The proof's value is the rejection in dB, its place a frequency
- * in hertz before the rate change.
+ * When one sample in so many is kept, what folds into the kept band is attenuated by at least this much: the gain is
+ * at most -min dB within {@code to} of every multiple of the new sample rate but 0. The proof's value is the
+ * rejection in dB, its place a frequency in hertz before the rate change.
  *
  * @param factor
  *            how many samples become one, at least 2
@@ -26,7 +26,8 @@ public record AliasRejection(int factor, double to, double min) implements Requi
 	/** Checks the numbers. */
 	public AliasRejection {
 		if (factor < 2) {
-			throw new IllegalArgumentException("a rate change by " + factor + " folds nothing; the factor must be at least 2");
+			throw new IllegalArgumentException("a rate change by " + factor
+					+ " folds nothing; the factor must be at least 2");
 		}
 		Frequencies.check("the upper edge of the kept band", to);
 		if (!Double.isFinite(min)) {
@@ -52,7 +53,8 @@ public record AliasRejection(int factor, double to, double min) implements Requi
 	// Multiples of the new rate move with the clock, so only the reach of the bands changes.
 	@Override
 	public Optional<Proof> prove(Subject subject, Effort effort, ClockRange clocks) {
-		return Optional.of(new AliasRejection(factor, Math.min(clocks.highest(to), subject.sampleRate() / factor / 2), min)
+		return Optional.of(new AliasRejection(factor, Math.min(clocks.highest(to), subject.sampleRate() / factor / 2),
+				min)
 				.prove(subject, effort));
 	}
 

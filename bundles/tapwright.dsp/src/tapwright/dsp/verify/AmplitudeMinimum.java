@@ -2,6 +2,7 @@
 package tapwright.dsp.verify;
 
 import java.math.BigInteger;
+import java.util.Arrays;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -52,7 +53,8 @@ record AmplitudeMinimum(Verdict verdict, Enclosure least, BigFraction place) {
 		return direction < 0 ? Math.nextDown(scaled) : Math.nextUp(scaled);
 	}
 
-	private static AmplitudeMinimum exact(ExactTaps taps, List<BigFraction[]> stretches, BigFraction from, BigFraction to,
+	private static AmplitudeMinimum exact(ExactTaps taps, List<BigFraction[]> stretches, BigFraction from,
+			BigFraction to,
 			Patience patience) {
 		ZeroAtRest zeros = new ZeroAtRest(taps);
 		// Beside a zero of high order the amplitude is very small.
@@ -99,9 +101,11 @@ record AmplitudeMinimum(Verdict verdict, Enclosure least, BigFraction place) {
 			least = least == null ? BigInteger.ZERO : least.min(BigInteger.ZERO);
 			lowest = lowest == null ? BigInteger.ZERO : lowest.min(BigInteger.ZERO);
 		}
-		Verdict verdict = negative || least.signum() < 0 ? Verdict.MISSED : lowest.signum() >= 0 ? Verdict.MET : Verdict.UNPROVEN;
+		Verdict verdict = negative || least.signum() < 0 ? Verdict.MISSED : lowest.signum() >= 0 ? Verdict.MET
+				: Verdict.UNPROVEN;
 		BigFraction unit = taps.unit().multiply(ExactTaps.powerOfTwo(split.sizeBits()));
-		return new AmplitudeMinimum(verdict, new Enclosure(Rationals.below(fix.rational(lowest.min(least)).multiply(unit)),
+		return new AmplitudeMinimum(verdict, new Enclosure(Rationals.below(fix.rational(lowest.min(least))
+				.multiply(unit)),
 				Rationals.above(fix.rational(least).multiply(unit))), place);
 	}
 
@@ -122,7 +126,7 @@ record AmplitudeMinimum(Verdict verdict, Enclosure least, BigFraction place) {
 			// With an even number of coefficients the amplitude is a sum over integer multiples of half the angle.
 			int halves = n % 2 == 0 ? 2 : 1;
 			BigInteger[] r = new BigInteger[n];
-			java.util.Arrays.fill(r, BigInteger.ZERO);
+			Arrays.fill(r, BigInteger.ZERO);
 			for (int after = n / 2; after < n; after++) {
 				r[halves * (2 * after - n + 1) / 2] = sines ? taps.integer(n - 1 - after) : taps.integer(after);
 			}

@@ -9,8 +9,9 @@ import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.exact.Symmetry;
 
 /**
- * The delay of the filter as a whole stays within limits: (N-1)/2 samples for symmetric or antisymmetric coefficients, otherwise the
- * group delay at 0 Hz, sum of k h[k] over sum of h[k]. In seconds; the proof has no place.
+ * The delay of the filter as a whole stays within limits: (N-1)/2 samples for symmetric or antisymmetric
+ * coefficients, otherwise the group delay at 0 Hz, sum of k h[k] over sum of h[k]. In seconds; the proof has no
+ * place.
  *
  * @param min
  *            shortest delay in seconds, negative infinity for none
@@ -22,13 +23,15 @@ public record BulkDelay(double min, double max) implements Requirement {
 	/** Checks the limits. */
 	public BulkDelay {
 		if (!(min <= max)) {
-			throw new IllegalArgumentException("the delay limits " + min + " and " + max + " s leave nothing between them");
+			throw new IllegalArgumentException("the delay limits " + min + " and " + max
+					+ " s leave nothing between them");
 		}
 	}
 
 	@Override
 	public Proof prove(Subject subject, Effort effort) {
-		return Exactly.between(Exactly.seconds(samples(subject.taps()), subject.sampleRate()), min, max, Double.NaN, "");
+		return Exactly.between(Exactly.seconds(samples(subject.taps()), subject.sampleRate()), min, max, Double.NaN,
+				"");
 	}
 
 	private static BigFraction samples(ExactTaps taps) {

@@ -2,8 +2,8 @@
 package tapwright.dsp.verify;
 
 /**
- * Bounds on the largest value of a polynomial on -1 to 1, in double precision. Rounding is not counted here except in the slope's
- * contribution; callers add it (see the package's theorem 3). Work space of one thread.
+ * Bounds on the largest value of a polynomial on -1 to 1, in double precision. Rounding is not counted here except in
+ * the slope's contribution; callers add it (see the package's theorem 3). Work space of one thread.
  */
 final class CellMaximum {
 

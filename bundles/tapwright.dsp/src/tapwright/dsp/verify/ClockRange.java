@@ -2,8 +2,8 @@
 package tapwright.dsp.verify;
 
 /**
- * All sample clocks near a nominal one, and what frequencies become, per nominal sample, when the clock is any of them. Results are
- * rounded so that a statement made from them is stronger (outward) or weaker than the exact one.
+ * All sample clocks near a nominal one, and what frequencies become, per nominal sample, when the clock is any of
+ * them. Results are rounded so that a statement made from them is stronger (outward) or weaker than the exact one.
  *
  * @param nominal
  *            nominal sample rate in hertz
@@ -29,7 +29,8 @@ record ClockRange(double nominal, double deviation, boolean outward) {
 		return Math.min(hertz / (1 + deviation) * (1 - rounding()), nominal / 2);
 	}
 
-	/** Highest frequency that a frequency becomes, at the slowest clock; beyond half the sample rate there is nothing new. */
+	/** Highest frequency that a frequency becomes,
+			at the slowest clock; beyond half the sample rate there is nothing new. */
 	double highest(double hertz) {
 		return Math.min(hertz / (1 - deviation) * (1 + rounding()), nominal / 2);
 	}

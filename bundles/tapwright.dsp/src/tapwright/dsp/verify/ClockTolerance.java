@@ -7,10 +7,10 @@ import java.util.Optional;
 /**
  * A statement holds at every sample clock that is off by up to some parts per million.
  * <p>
- * A frequency in hertz, seen at all clocks, is a stretch of frequencies per sample. So gain limits and alias rejection become one
- * statement at the nominal clock, with edges rounded outward to prove it and inward to disprove it. Other statements depend on the clock,
- * if at all, through one value that rises or falls with it, and are proven at both ends of the range; where that is not enough the
- * answer is unproven.
+ * A frequency in hertz, seen at all clocks, is a stretch of frequencies per sample. So gain limits and alias
+ * rejection become one statement at the nominal clock, with edges rounded outward to prove it and inward to disprove
+ * it. Other statements depend on the clock, if at all, through one value that rises or falls with it, and are proven
+ * at both ends of the range; where that is not enough the answer is unproven.
  *
  * @param statement
  *            what must hold; not itself under a tolerance
@@ -40,7 +40,8 @@ public record ClockTolerance(Requirement statement, double ppm) implements Requi
 		}
 		ClockRange outer = new ClockRange(subject.sampleRate(), ppm / MILLION, true);
 		ClockRange inner = new ClockRange(subject.sampleRate(), ppm / MILLION, false);
-		Optional<Proof> all = statement instanceof ClockRange.Aware aware ? aware.prove(subject, effort, outer) : Optional.empty();
+		Optional<Proof> all = statement instanceof ClockRange.Aware aware ? aware.prove(subject, effort, outer)
+				: Optional.empty();
 		if (all.isPresent() && all.get().verdict() == Verdict.MET) {
 			return all.get();
 		}
@@ -69,7 +70,8 @@ public record ClockTolerance(Requirement statement, double ppm) implements Requi
 
 	// Whether the statement can only change its truth once when the clock rises.
 	private boolean endsDecide() {
-		return !(statement instanceof GainLimit || statement instanceof GroupDelay || statement instanceof GroupDelayVariation
+		return !(statement instanceof GainLimit || statement instanceof GroupDelay
+				|| statement instanceof GroupDelayVariation
 				|| statement instanceof Null || statement instanceof ExactGain);
 	}
 

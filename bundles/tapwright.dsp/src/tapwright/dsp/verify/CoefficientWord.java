@@ -8,8 +8,9 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.ExactTaps;
 
 /**
- * The coefficients, as integers times one common scale, fit a two's complement word of some length. Factors of two that all
- * integers share count as part of the scale. The proof's unit is bits, its place the index of the coefficient that needs most.
+ * The coefficients, as integers times one common scale, fit a two's complement word of some length. Factors of two
+ * that all integers share count as part of the scale. The proof's unit is bits, its place the index of the
+ * coefficient that needs most.
  *
  * @param max
  *            longest word in bits, at least 1

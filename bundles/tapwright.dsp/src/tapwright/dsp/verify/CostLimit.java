@@ -11,8 +11,8 @@ import tapwright.dsp.arithmetic.Structure;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * The filter needs no more than this of a processor or circuit. Counts follow {@link Cost}; without stated arithmetic a plain delay
- * line is counted. The proof has no place.
+ * The filter needs no more than this of a processor or circuit. Counts follow {@link Cost}; without stated arithmetic
+ * a plain delay line is counted. The proof has no place.
  *
  * @param resource
  *            what is counted
@@ -46,7 +46,8 @@ public record CostLimit(Resource resource, double max) implements Requirement {
 		if (resource == Resource.TAPS) {
 			return Exactly.atMost(new BigFraction(subject.taps().length()), max, Double.NaN, "");
 		}
-		Cost cost = Cost.of(subject.taps(), subject.arithmetic().orElseGet(() -> Arithmetic.exact(Structure.DIRECT, 1)));
+		Cost cost = Cost.of(subject.taps(), subject.arithmetic().orElseGet(() -> Arithmetic.exact(Structure.DIRECT,
+				1)));
 		BigFraction need = switch (resource) {
 			case TAPS -> throw new AssertionError();
 			case MULTIPLIES -> cost.multipliesPerOutput();

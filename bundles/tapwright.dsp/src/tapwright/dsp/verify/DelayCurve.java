@@ -16,11 +16,11 @@ import tapwright.dsp.exact.Symmetry;
 /**
  * The group delay over a band, in samples, bracketed by sums of cosines with exact coefficients.
  * <p>
- * With c = (N-1)/2 and g[k] = 2 (k-c) h[k] the group delay is c + Q / (2P), where P = |H|^2 and Q = Re(G conj(H)). Both are sums of
- * cosines whose coefficients are correlations of h and g, so the delay is at most T where 2 (T-c) P - Q is nowhere negative. The largest
- * delay is found by W. Dinkelbach's method for ratios (Management Science 13(7), 1967): the place where this difference is smallest
- * gives a better T, until the difference for a T slightly above is proven to have no negative value. For symmetric coefficients the
- * delay is c everywhere.
+ * With c = (N-1)/2 and g[k] = 2 (k-c) h[k] the group delay is c + Q / (2P), where P = |H|^2 and Q = Re(G conj(H)).
+ * Both are sums of cosines whose coefficients are correlations of h and g, so the delay is at most T where 2 (T-c) P
+ * - Q is nowhere negative. The largest delay is found by W. Dinkelbach's method for ratios (Management Science 13(7),
+ * 1967): the place where this difference is smallest gives a better T, until the difference for a T slightly above is
+ * proven to have no negative value. For symmetric coefficients the delay is c everywhere.
  */
 final class DelayCurve {
 

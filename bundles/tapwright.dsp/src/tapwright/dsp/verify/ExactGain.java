@@ -11,8 +11,8 @@ import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * The magnitude at one frequency has exactly some value. Always decided, since a frequency over a sample rate is a rational number. The
- * proof's value is the gain as a plain number, its place the frequency in hertz.
+ * The magnitude at one frequency has exactly some value. Always decided, since a frequency over a sample rate is a
+ * rational number. The proof's value is the gain as a plain number, its place the frequency in hertz.
  *
  * @param frequency
  *            in hertz, not negative

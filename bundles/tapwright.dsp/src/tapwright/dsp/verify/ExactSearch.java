@@ -14,9 +14,9 @@ import tapwright.dsp.exact.FixedPoint;
 import tapwright.dsp.exact.Interval;
 
 /**
- * Finds the place where |H|^2 over a squared upper limit is largest, or a squared lower limit over |H|^2, by branch and bound in
- * interval arithmetic of a chosen precision. This quotient is called the <i>load</i> of a place: a limit is kept where the load
- * is at most 1.
+ * Finds the place where |H|^2 over a squared upper limit is largest, or a squared lower limit over |H|^2, by branch
+ * and bound in interval arithmetic of a chosen precision. This quotient is called the <i>load</i> of a place: a limit
+ * is kept where the load is at most 1.
  */
 final class ExactSearch {
 
@@ -131,7 +131,8 @@ final class ExactSearch {
 		patience.checkCancelled();
 		BigFraction centre = middle(stretch.lo, stretch.hi);
 		BigFraction radius = stretch.hi.subtract(centre);
-		InverseLimit limit = limits.computeIfAbsent(stretch.line, line -> new InverseLimit(fix, line, logUnit, sampleRate));
+		InverseLimit limit = limits.computeIfAbsent(stretch.line, line -> new InverseLimit(fix, line, logUnit,
+				sampleRate));
 		Optional<LocalFunction> inverse = limit.around(centre, radius);
 		if (inverse.isEmpty()) {
 			return new Piece(stretch, BigInteger.ZERO, null, centre, false);

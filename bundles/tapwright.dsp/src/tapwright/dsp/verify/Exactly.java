@@ -15,7 +15,8 @@ final class Exactly {
 	/** The value may not exceed the limit; an infinite limit is always kept. */
 	static Proof atMost(BigFraction value, double limit, double place, String note) {
 		if (Double.isInfinite(limit)) {
-			return new Proof(limit > 0 ? Verdict.MET : Verdict.MISSED, place, enclose(value), limit, Enclosure.of(limit), note);
+			return new Proof(limit > 0 ? Verdict.MET : Verdict.MISSED, place, enclose(value), limit,
+					Enclosure.of(limit), note);
 		}
 		return proof(value, limit, Rationals.exact(limit).subtract(value), place, note);
 	}
@@ -23,7 +24,8 @@ final class Exactly {
 	/** The value may not be below the limit; an infinite limit is always kept. */
 	static Proof atLeast(BigFraction value, double limit, double place, String note) {
 		if (Double.isInfinite(limit)) {
-			return new Proof(limit < 0 ? Verdict.MET : Verdict.MISSED, place, enclose(value), limit, Enclosure.of(-limit), note);
+			return new Proof(limit < 0 ? Verdict.MET : Verdict.MISSED, place, enclose(value), limit,
+					Enclosure.of(-limit), note);
 		}
 		return proof(value, limit, value.subtract(Rationals.exact(limit)), place, note);
 	}

@@ -23,14 +23,16 @@ final class Frequencies {
 		check("the lower edge of " + what, from);
 		check("the upper edge of " + what, to);
 		if (from > to) {
-			throw new IllegalArgumentException(what + " runs from " + from + " Hz down to " + to + " Hz; exchange the edges");
+			throw new IllegalArgumentException(what + " runs from " + from + " Hz down to " + to
+					+ " Hz; exchange the edges");
 		}
 	}
 
 	/** Refuses a frequency above half the sample rate. */
 	static void checkBelowHalf(String what, double frequency, double sampleRate) {
 		if (frequency > sampleRate / 2) {
-			throw new IllegalArgumentException(what + " is " + frequency + " Hz, above half the sample rate of " + sampleRate
+			throw new IllegalArgumentException(what + " is " + frequency + " Hz, above half the sample rate of "
+					+ sampleRate
 					+ " Hz; lower it or raise the sample rate");
 		}
 	}

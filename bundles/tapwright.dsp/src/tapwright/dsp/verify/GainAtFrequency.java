@@ -24,7 +24,8 @@ final class GainAtFrequency {
 		SplitTaps split = new SplitTaps(taps);
 		BigFraction unit = taps.unit().multiply(ExactTaps.powerOfTwo(split.sizeBits()));
 		Enclosure gain = null;
-		for (int bits = FIRST_BITS; bits <= LAST_BITS && (gain == null || gain.width() > NARROW * gain.hi()); bits *= 4) {
+		for (int bits = FIRST_BITS; bits <= LAST_BITS && (gain == null
+				|| gain.width() > NARROW * gain.hi()); bits *= 4) {
 			FixedPoint fix = new FixedPoint(bits);
 			Interval root = fix.sqrt(ExactSearch.square(fix, split, turns).nonNegative());
 			gain = new Enclosure(Rationals.below(fix.rational(root.lo()).multiply(unit)),

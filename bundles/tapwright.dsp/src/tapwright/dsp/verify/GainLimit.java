@@ -7,12 +7,12 @@ import java.util.Objects;
 import java.util.Optional;
 
 /**
- * The magnitude of the frequency response stays between a lower and an upper limit, each a broken line in decibels. Between two
- * breakpoints a limit is straight; two breakpoints at one frequency make a step, where both values hold. The proof's unit is
- * decibels relative to the reference, its places are frequencies in hertz.
+ * The magnitude of the frequency response stays between a lower and an upper limit, each a broken line in decibels.
+ * Between two breakpoints a limit is straight; two breakpoints at one frequency make a step, where both values hold.
+ * The proof's unit is decibels relative to the reference, its places are frequencies in hertz.
  * <p>
- * All numbers count as the exact doubles they are. For limits that are not constant, the proof's value is stated at the place
- * {@code worst}: the limit there less (upper) or plus (lower) the margin.
+ * All numbers count as the exact doubles they are. For limits that are not constant, the proof's value is stated at
+ * the place {@code worst}: the limit there less (upper) or plus (lower) the margin.
  *
  * @param breakpoints
  *            in order of rising frequency, at least one; a single one states limits at one frequency
@@ -21,7 +21,8 @@ import java.util.Optional;
  * @param reference
  *            what 0 dB means
  */
-public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainReference reference) implements Requirement, ClockRange.Aware {
+public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic,
+		GainReference reference) implements Requirement, ClockRange.Aware {
 
 	/**
 	 * Limits at one frequency.
@@ -43,7 +44,8 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 						+ " Hz; a lower limit is a number or negative infinity, an upper limit a number or infinity");
 			}
 			if (lower > upper) {
-				throw new IllegalArgumentException("the lower limit " + lower + " dB is above the upper limit " + upper + " dB at "
+				throw new IllegalArgumentException("the lower limit " + lower + " dB is above the upper limit "
+						+ upper + " dB at "
 						+ frequency + " Hz");
 			}
 		}
@@ -60,7 +62,8 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 			Breakpoint a = breakpoints.get(k - 1);
 			Breakpoint b = breakpoints.get(k);
 			if (a.frequency > b.frequency) {
-				throw new IllegalArgumentException("breakpoint " + (k + 1) + " at " + b.frequency + " Hz comes after one at "
+				throw new IllegalArgumentException("breakpoint " + (k + 1) + " at " + b.frequency
+						+ " Hz comes after one at "
 						+ a.frequency + " Hz; breakpoints must be in order of rising frequency");
 			}
 			if (a.frequency < b.frequency) {
@@ -68,7 +71,8 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 				checkLine(a, b, a.upper, b.upper, logarithmic);
 			}
 		}
-		if (breakpoints.stream().allMatch(point -> Double.isInfinite(point.lower) && point.upper == Double.POSITIVE_INFINITY)) {
+		if (breakpoints.stream().allMatch(point -> Double.isInfinite(point.lower)
+				&& point.upper == Double.POSITIVE_INFINITY)) {
 			throw new IllegalArgumentException("the gain limit limits nothing; state a lower or an upper limit");
 		}
 	}
@@ -85,7 +89,8 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 
 	/** Constant limits from one frequency to another. */
 	public static GainLimit between(double from, double to, double lowerDb, double upperDb) {
-		return new GainLimit(List.of(new Breakpoint(from, lowerDb, upperDb), new Breakpoint(to, lowerDb, upperDb)), false,
+		return new GainLimit(List.of(new Breakpoint(from, lowerDb, upperDb), new Breakpoint(to, lowerDb, upperDb)),
+				false,
 				GainReference.ABSOLUTE);
 	}
 
@@ -159,7 +164,8 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic, GainR
 			return;
 		}
 		if (Double.isInfinite(from) || Double.isInfinite(to)) {
-			throw new IllegalArgumentException("a limit runs from " + from + " dB at " + a.frequency + " Hz to " + to + " dB at "
+			throw new IllegalArgumentException("a limit runs from " + from + " dB at " + a.frequency + " Hz to " + to
+					+ " dB at "
 					+ b.frequency + " Hz; end it with a second breakpoint at the same frequency instead");
 		}
 		if (logarithmic && a.frequency == 0) {

@@ -14,7 +14,8 @@ import tapwright.dsp.verify.ExactSearch.Worst;
 /** One proof of a gain limit: searches with rising precision until the verdict is certain. */
 final class GainProof {
 
-	/** Relative gaps of the search, as powers of two. Loads are squares, so the last one decides distances beyond 1e-25. */
+	/** Relative gaps of the search, as powers of two. Loads are squares,
+			so the last one decides distances beyond 1e-25. */
 	private static final int[] GAPS = { 44, 88 };
 	/** Precisions for what lies beside places where the limit is touched exactly. */
 	private static final int[] TOUCH_PRECISIONS = { 128, 512, 2048 };
@@ -50,7 +51,9 @@ final class GainProof {
 			QuickGain quick = new QuickGain(space, lines, reference, subject);
 			return quick.proof().orElseGet(() -> {
 				SplitTaps split = new SplitTaps(taps);
-				return search(split, new GainUnit(reference, split, sampleRate, patience), quick.open());
+				List<Stretch> open = quick.open();
+				return search(split, new GainUnit(reference, quick.referenceStretches(), split, sampleRate, patience),
+						open);
 			});
 		} finally {
 			if (!space.isWorthKeeping()) {
@@ -62,18 +65,22 @@ final class GainProof {
 	private Proof zeroFilter() {
 		LimitLine line = lines.stream().filter(any -> !any.upper()).findFirst().orElse(lines.getFirst());
 		double margin = !line.upper() ? Double.NEGATIVE_INFINITY : line.isNothing() ? 0 : Double.POSITIVE_INFINITY;
-		return new Proof(line.upper() ? Verdict.MET : Verdict.MISSED, line.from(), Enclosure.of(Double.NEGATIVE_INFINITY),
+		return new Proof(line.upper() ? Verdict.MET : Verdict.MISSED, line.from(),
+				Enclosure.of(Double.NEGATIVE_INFINITY),
 				line.at(line.from()), Enclosure.of(margin), "All coefficients are zero.");
 	}
 
 	// A band of positive width holds a place with gain: a filter has finitely many zeros.
 	private Proof noGainAllowed(SplitTaps split, LimitLine line) {
-		GainUnit unit = new GainUnit(reference, split, sampleRate, patience);
+		List<Stretch> stretches = reference instanceof GainReference.LargestIn in
+				? new LimitLine(in.from(), in.to(), 0, 0, true, false).stretches(sampleRate, taps.length()) : List.of();
+		GainUnit unit = new GainUnit(reference, stretches, split, sampleRate, patience);
 		FixedPoint fix = new FixedPoint(precision(unit, GAPS[0]));
 		Worst worst = searcher(fix, split, unit, GAPS[0]).worst(line.stretches(sampleRate, taps.length()), GAPS[0],
 				Optional.empty());
 		boolean proven = line.from() < line.to() || worst.lo().signum() > 0;
-		Enclosure value = new Enclosure(GainReport.decibels(fix, worst.lo()).lo(), GainReport.decibels(fix, worst.hi()).hi());
+		Enclosure value = new Enclosure(GainReport.decibels(fix, worst.lo()).lo(), GainReport.decibels(fix,
+				worst.hi()).hi());
 		return new Proof(proven ? Verdict.MISSED : Verdict.UNPROVEN, line.hertz(worst.place(), sampleRate), value,
 				Double.NEGATIVE_INFINITY, proven ? Enclosure.of(Double.NEGATIVE_INFINITY)
 						: new Enclosure(Double.NEGATIVE_INFINITY, 0),
@@ -105,7 +112,8 @@ final class GainProof {
 
 	// No gain within the reference band is above the largest one there.
 	private boolean isMetByDefinition(LimitLine line) {
-		return reference instanceof GainReference.LargestIn in && line.upper() && in.from() <= line.from() && line.to() <= in.to()
+		return reference instanceof GainReference.LargestIn in && line.upper() && in.from() <= line.from()
+				&& line.to() <= in.to()
 				&& Math.min(line.fromDb(), line.toDb()) >= 0;
 	}
 
@@ -147,7 +155,7 @@ final class GainProof {
 
 	// Loads that are far from 1 need more bits to be seen well.
 	private int precision(GainUnit unit, int gap) {
-		double largest = 0;
+		double largest = unit.depth();
 		for (LimitLine line : lines) {
 			for (double db : new double[] { line.fromDb(), line.toDb() }) {
 				double level = line.isNothing() ? 0 : db / DECIBELS_PER_BIT;

@@ -15,7 +15,8 @@ final class GainReport {
 
 	/** The proof that an enclosed load amounts to. */
 	static Proof of(FixedPoint fix, Verdict verdict, Worst worst, double sampleRate, String note) {
-		Enclosure margin = new Enclosure(worst.hi() == null ? Double.NEGATIVE_INFINITY : -decibels(fix, worst.hi()).hi(),
+		Enclosure margin = new Enclosure(worst.hi() == null ? Double.NEGATIVE_INFINITY : -decibels(fix, worst.hi())
+				.hi(),
 				-decibels(fix, worst.lo()).lo());
 		return of(verdict, worst.line(), worst.line().hertz(worst.place(), sampleRate), margin, note);
 	}
@@ -24,7 +25,8 @@ final class GainReport {
 	static Proof of(Verdict verdict, LimitLine line, double place, Enclosure margin, String note) {
 		Enclosure sure = switch (verdict) {
 			case MET -> new Enclosure(Math.max(margin.lo(), 0), Math.max(margin.hi(), 0));
-			case MISSED -> new Enclosure(Math.min(margin.lo(), -Double.MIN_VALUE), Math.min(margin.hi(), -Double.MIN_VALUE));
+			case MISSED -> new Enclosure(Math.min(margin.lo(), -Double.MIN_VALUE), Math.min(margin.hi(),
+					-Double.MIN_VALUE));
 			case UNPROVEN -> margin;
 		};
 		double limit = line.at(place);
@@ -34,7 +36,8 @@ final class GainReport {
 		double low = limit + distance.lo() - slack;
 		double high = limit + distance.hi() + slack;
 		boolean exact = low == high && distance.lo() == 0;
-		return new Proof(verdict, place, exact ? Enclosure.of(limit) : new Enclosure(Math.nextDown(low), Double.isInfinite(high) ? high : Math.nextUp(high)), limit,
+		return new Proof(verdict, place, exact ? Enclosure.of(limit) : new Enclosure(Math.nextDown(low),
+				Double.isInfinite(high) ? high : Math.nextUp(high)), limit,
 				sure, note);
 	}
 

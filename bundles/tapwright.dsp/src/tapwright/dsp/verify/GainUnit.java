@@ -2,12 +2,14 @@
 package tapwright.dsp.verify;
 
 import java.math.BigInteger;
+import java.util.List;
 import java.util.Optional;
 
 import org.apache.commons.math3.fraction.BigFraction;
 
 import tapwright.dsp.exact.FixedPoint;
 import tapwright.dsp.exact.Interval;
+import tapwright.dsp.verify.ExactSearch.Stretch;
 import tapwright.dsp.verify.ExactSearch.Worst;
 
 /** The square of the gain that 0 dB stands for, in the units of split coefficients. Not all zero. */
@@ -17,12 +19,18 @@ final class GainUnit {
 	private static final int LAST_BITS = 4096;
 
 	private final GainReference reference;
+	private final List<Stretch> stretches;
 	private final SplitTaps taps;
 	private final double sampleRate;
 	private final Patience patience;
 	private final double log2;
 
-	GainUnit(GainReference reference, SplitTaps taps, double sampleRate, Patience patience) {
+	/**
+	 * @param stretches
+	 *            where the largest gain of a reference band may be
+	 */
+	GainUnit(GainReference reference, List<Stretch> stretches, SplitTaps taps, double sampleRate, Patience patience) {
+		this.stretches = stretches;
 		this.reference = reference;
 		this.taps = taps;
 		this.sampleRate = sampleRate;
@@ -34,6 +42,11 @@ final class GainUnit {
 	/** Logarithm to base 2 of the gain (not its square), roughly. */
 	double log2() {
 		return log2;
+	}
+
+	/** How many bits of a gain's fraction lie above what 0 dB stands for, when that is the filter's own gain. */
+	double depth() {
+		return reference instanceof GainReference.Absolute ? 0 : Math.abs(log2);
 	}
 
 	/** Natural logarithm of the square. */
@@ -61,11 +74,11 @@ final class GainUnit {
 	private Interval own(FixedPoint fix, int gapBits) {
 		return switch (reference) {
 			case GainReference.Absolute absolute -> throw new AssertionError();
-			case GainReference.AtFrequency at -> ExactSearch.square(fix, taps, LimitLine.turns(at.frequency(), sampleRate));
+			case GainReference.AtFrequency at -> ExactSearch.square(fix, taps, LimitLine.turns(at.frequency(),
+					sampleRate));
 			case GainReference.LargestIn in -> {
-				LimitLine line = new LimitLine(in.from(), in.to(), 0, 0, true, false);
-				Worst worst = new ExactSearch(fix, taps, sampleRate, Interval.ZERO, patience).worst(
-						line.stretches(sampleRate, taps.length()), gapBits, Optional.empty());
+				Worst worst = new ExactSearch(fix, taps, sampleRate, Interval.ZERO, patience).worst(stretches, gapBits,
+						Optional.empty());
 				yield new Interval(worst.lo(), worst.hi());
 			}
 		};

@@ -9,8 +9,8 @@ import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * The group delay stays within limits over a band. The proof's unit is seconds, its place a frequency in hertz. Where the gain is
- * exactly zero the delay counts as its limit from the sides.
+ * The group delay stays within limits over a band. The proof's unit is seconds, its place a frequency in hertz. Where
+ * the gain is exactly zero the delay counts as its limit from the sides.
  *
  * @param from
  *            lower band edge in hertz
@@ -27,7 +27,8 @@ public record GroupDelay(double from, double to, double min, double max) impleme
 	public GroupDelay {
 		Frequencies.checkBand("the band", from, to);
 		if (!(min <= max) || min == Double.POSITIVE_INFINITY || max == Double.NEGATIVE_INFINITY) {
-			throw new IllegalArgumentException("the delay limits " + min + " and " + max + " s leave nothing between them");
+			throw new IllegalArgumentException("the delay limits " + min + " and " + max
+					+ " s leave nothing between them");
 		}
 		if (Double.isInfinite(min) && Double.isInfinite(max)) {
 			throw new IllegalArgumentException("the group delay requirement limits nothing; state a shortest or a longest delay");
@@ -39,9 +40,11 @@ public record GroupDelay(double from, double to, double min, double max) impleme
 		Frequencies.checkBelowHalf("the upper band edge", to, subject.sampleRate());
 		double rate = subject.sampleRate();
 		Patience patience = new Patience(effort);
-		DelayCurve curve = new DelayCurve(subject.taps(), LimitLine.turns(from, rate), LimitLine.turns(to, rate), patience);
+		DelayCurve curve = new DelayCurve(subject.taps(), LimitLine.turns(from, rate), LimitLine.turns(to, rate),
+				patience);
 		if (curve.isConstant()) {
-			return Exactly.between(Exactly.seconds(curve.middle(), rate), min, max, from, "The coefficients are symmetric.");
+			return Exactly.between(Exactly.seconds(curve.middle(), rate), min, max, from,
+					"The coefficients are symmetric.");
 		}
 		Proof high = Double.isInfinite(max) ? null : oneSide(curve, rate, max, 1, patience);
 		Proof low = Double.isInfinite(min) ? null : oneSide(curve, rate, -min, -1, patience);
@@ -75,7 +78,8 @@ public record GroupDelay(double from, double to, double min, double max) impleme
 		double place = Frequencies.hertz(extreme.place(), rate);
 		BigFraction highest = extreme.hi() == null ? null : samples.subtract(extreme.hi());
 		Enclosure margin = Delays.margin(samples.subtract(extreme.lo()), highest, rate, verdict);
-		String note = verdict != Verdict.UNPROVEN ? "" : patience.wasOver() ? "The time limit of the proof ended before it was decided."
+		String note = verdict != Verdict.UNPROVEN ? "" : patience.wasOver()
+				? "The time limit of the proof ended before it was decided."
 				: "The worst delay is too close to the limit to be told from it.";
 		return new Proof(verdict, place, value, limit, margin, note);
 	}

@@ -6,8 +6,8 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * Largest less smallest group delay over a band stays within a limit. The proof's unit is seconds, its place the frequency in hertz
- * of the largest delay.
+ * Largest less smallest group delay over a band stays within a limit. The proof's unit is seconds, its place the
+ * frequency in hertz of the largest delay.
  *
  * @param from
  *            lower band edge in hertz
@@ -31,7 +31,8 @@ public record GroupDelayVariation(double from, double to, double max) implements
 		double rate = subject.sampleRate();
 		Frequencies.checkBelowHalf("the upper band edge", to, rate);
 		Patience patience = new Patience(effort);
-		DelayCurve curve = new DelayCurve(subject.taps(), LimitLine.turns(from, rate), LimitLine.turns(to, rate), patience);
+		DelayCurve curve = new DelayCurve(subject.taps(), LimitLine.turns(from, rate), LimitLine.turns(to, rate),
+				patience);
 		if (curve.isConstant()) {
 			return Exactly.atMost(BigFraction.ZERO, max, from, "The coefficients are symmetric.");
 		}

@@ -9,8 +9,8 @@ import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * From some time on the impulse response stays below a part of its largest magnitude. The proof's unit is per cent of the largest
- * magnitude, its place a time in seconds.
+ * From some time on the impulse response stays below a part of its largest magnitude. The proof's unit is per cent of
+ * the largest magnitude, its place a time in seconds.
  *
  * @param after
  *            start of the tail in seconds, included; not negative

@@ -2,6 +2,7 @@
 package tapwright.dsp.verify;
 
 import java.math.BigInteger;
+import java.util.Arrays;
 
 import tapwright.dsp.exact.FixedPoint;
 import tapwright.dsp.exact.Interval;
@@ -26,7 +27,7 @@ record IntervalPolynomial(FixedPoint fix, Interval... coefficients) {
 		Interval[] a = coefficients;
 		Interval[] b = other.coefficients;
 		Interval[] product = new Interval[a.length + b.length - 1];
-		java.util.Arrays.fill(product, Interval.ZERO);
+		Arrays.fill(product, Interval.ZERO);
 		for (int i = 0; i < a.length; i++) {
 			for (int k = 0; k < b.length; k++) {
 				product[i + k] = product[i + k].add(i == k && a == b ? fix.square(a[i]) : fix.multiply(a[i], b[k]));

@@ -13,8 +13,8 @@ import tapwright.dsp.exact.Interval;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * The reciprocal of a limit's square, 10^(-L/10) over the square of the gain that 0 dB stands for, as a local function: constant, exponential in s or a
- * power of frequency.
+ * The reciprocal of a limit's square, 10^(-L/10) over the square of the gain that 0 dB stands for, as a local
+ * function: constant, exponential in s or a power of frequency.
  */
 final class InverseLimit {
 
@@ -38,7 +38,8 @@ final class InverseLimit {
 		this.from = LimitLine.turns(line.from(), sampleRate);
 		this.to = LimitLine.turns(line.to(), sampleRate);
 		// Nothing to compare with: levels are then relative to 0 dB.
-		this.constant = line.isNothing() ? inverse(BigFraction.ZERO) : line.isConstant() ? inverse(db(line.fromDb())) : null;
+		this.constant = line.isNothing() ? inverse(BigFraction.ZERO) : line.isConstant() ? inverse(db(line.fromDb()))
+				: null;
 	}
 
 	private Interval inverse(BigFraction db) {
@@ -92,7 +93,8 @@ final class InverseLimit {
 		List<Interval> terms = new ArrayList<>();
 		Interval term = start;
 		for (int m = 0;; m++) {
-			// |exponent| + m over m + 1 does not rise beyond max(1, this): with the ratio below 3/4, the rest is below 4 terms.
+			// |exponent| + m over m + 1 does not rise beyond max(1, this): with the ratio below 3/4, the rest is
+			// below 4 terms.
 			BigInteger growth = exponent.magnitude().add(fix.of(m).hi()).multiply(step.hi()).shiftRight(fix.bits())
 					.shiftLeft(2);
 			boolean shrinks = growth.compareTo(fix.of(3L * (m + 1)).lo()) < 0;

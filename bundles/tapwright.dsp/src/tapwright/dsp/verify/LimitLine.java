@@ -12,8 +12,8 @@ import tapwright.dsp.exact.Rationals;
 import tapwright.dsp.verify.ExactSearch.Stretch;
 
 /**
- * One straight piece of one limit: the gain in decibels that may not be exceeded, or must be reached, from one frequency to
- * another, both included.
+ * One straight piece of one limit: the gain in decibels that may not be exceeded, or must be reached, from one
+ * frequency to another, both included.
  *
  * @param from
  *            lower frequency in hertz
@@ -75,8 +75,9 @@ record LimitLine(double from, double to, double fromDb, double toDb, boolean upp
 	}
 
 	/**
-	 * Lines that hold at the nominal clock exactly when this one holds at all clocks, but for rounding to the side that the range
-	 * says. A limit that gets stricter with rising frequency is met by the slowest clock's place, and the other way round.
+	 * Lines that hold at the nominal clock exactly when this one holds at all clocks, but for rounding to the side
+	 * that the range says. A limit that gets stricter with rising frequency is met by the slowest clock's place, and
+	 * the other way round.
 	 */
 	List<LimitLine> stretched(ClockRange clocks) {
 		if (isConstant()) {
@@ -89,7 +90,8 @@ record LimitLine(double from, double to, double fromDb, double toDb, boolean upp
 		if (eases) {
 			// The place at the slowest clock counts, after a flat start.
 			add(lines, clocks, clocks.lowest(from), clocks.highest(from), fromDb, fromDb);
-			add(lines, clocks, clocks.highest(from), to / (1 - clocks.deviation()) * (clocks.outward() ? 1 + TINY : 1 - TINY), fromDb, toDb);
+			add(lines, clocks, clocks.highest(from), to / (1 - clocks.deviation()) * (clocks.outward() ? 1 + TINY : 1
+					- TINY), fromDb, toDb);
 		} else {
 			add(lines, clocks, clocks.lowest(from), clocks.lowest(to), fromDb, toDb);
 			add(lines, clocks, clocks.lowest(to), clocks.highest(to), toDb, toDb);

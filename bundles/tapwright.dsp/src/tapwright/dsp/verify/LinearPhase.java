@@ -10,8 +10,8 @@ import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.exact.Symmetry;
 
 /**
- * The coefficients are exactly symmetric or antisymmetric, so that the phase is exactly linear. The proof's value is the largest
- * difference from the nearer symmetry, its place the index of a coefficient.
+ * The coefficients are exactly symmetric or antisymmetric, so that the phase is exactly linear. The proof's value is
+ * the largest difference from the nearer symmetry, its place the index of a coefficient.
  *
  * @param type
  *            which of the four types is asked for

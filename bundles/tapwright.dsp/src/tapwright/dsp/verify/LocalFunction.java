@@ -18,7 +18,8 @@ record LocalFunction(IntervalPolynomial polynomial, BigInteger error) {
 		var fix = polynomial.fix();
 		BigInteger size = polynomial.tail(0).add(error);
 		BigInteger otherSize = other.polynomial.tail(0);
-		BigInteger sum = size.multiply(other.error).add(otherSize.multiply(error)).shiftRight(fix.bits()).add(BigInteger.ONE);
+		BigInteger sum = size.multiply(other.error).add(otherSize.multiply(error)).shiftRight(fix.bits())
+				.add(BigInteger.ONE);
 		return new LocalFunction(polynomial.multiply(other.polynomial), sum);
 	}
 }

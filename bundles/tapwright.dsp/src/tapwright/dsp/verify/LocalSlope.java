@@ -2,10 +2,11 @@
 package tapwright.dsp.verify;
 
 /**
- * The reciprocal of a sloping limit as a Taylor polynomial on a part of a cell, in double precision. Work space of one thread.
+ * The reciprocal of a sloping limit as a Taylor polynomial on a part of a cell, in double precision. Work space of
+ * one thread.
  * <p>
- * A limit straight over frequency has an exponential for reciprocal, one straight over its logarithm a power of frequency. The
- * remainder is Lagrange's form of the rest of the exponential or binomial series.
+ * A limit straight over frequency has an exponential for reciprocal, one straight over its logarithm a power of
+ * frequency. The remainder is Lagrange's form of the rest of the exponential or binomial series.
  */
 final class LocalSlope {
 
@@ -36,13 +37,14 @@ final class LocalSlope {
 	}
 
 	/**
-	 * Bound on the relative error of the series' coefficients: from the place, the interpolated level, the power and the slope, each
-	 * a few roundings.
+	 * Bound on the relative error of the series' coefficients: from the place, the interpolated level, the power and
+	 * the slope, each a few roundings.
 	 */
 	static double doubt(LimitLine line) {
 		double rise = Math.abs(line.toDb() - line.fromDb());
 		double largest = Math.max(Math.abs(line.fromDb()), Math.abs(line.toDb()));
-		double lever = line.logarithmic() ? 1 + 1 / Math.log(line.to() / line.from()) : line.to() / (line.to() - line.from());
+		double lever = line.logarithmic() ? 1 + 1 / Math.log(line.to() / line.from()) : line.to() / (line.to()
+				- line.from());
 		return UNIT * (32 + NEPERS * (16 * rise * lever + 8 * largest));
 	}
 
@@ -89,7 +91,8 @@ final class LocalSlope {
 			return Double.POSITIVE_INFINITY;
 		}
 		double rest = Math.abs(series[TERMS - 1] / series[0] * (-exponent - TERMS + 1) * ratio / TERMS);
-		return rest * Math.max(StrictMath.pow(1 - ratio, -exponent - TERMS), StrictMath.pow(1 + ratio, -exponent - TERMS)) * 1.001;
+		return rest * Math.max(StrictMath.pow(1 - ratio, -exponent - TERMS), StrictMath.pow(1 + ratio, -exponent
+				- TERMS)) * 1.001;
 	}
 
 	/** Multiplies a polynomial by the series; returns the new number of coefficients. */

@@ -9,8 +9,8 @@ import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.exact.ExactTaps;
 
 /**
- * The gain at one frequency is exactly zero. Always decided, since a frequency over a sample rate is a rational number. The proof's
- * value is the gain as a plain number, its place the frequency in hertz.
+ * The gain at one frequency is exactly zero. Always decided, since a frequency over a sample rate is a rational
+ * number. The proof's value is the gain as a plain number, its place the frequency in hertz.
  *
  * @param frequency
  *            in hertz, not negative
@@ -35,6 +35,7 @@ public record Null(double frequency) implements Requirement {
 			return new Proof(Verdict.MET, frequency, Enclosure.of(0), 0, Enclosure.of(0), "");
 		}
 		Enclosure gain = GainAtFrequency.enclose(taps, turns);
-		return new Proof(Verdict.MISSED, frequency, gain, 0, new Enclosure(-gain.hi(), Math.min(-gain.lo(), -Double.MIN_VALUE)), "");
+		return new Proof(Verdict.MISSED, frequency, gain, 0, new Enclosure(-gain.hi(), Math.min(-gain.lo(),
+				-Double.MIN_VALUE)), "");
 	}
 }

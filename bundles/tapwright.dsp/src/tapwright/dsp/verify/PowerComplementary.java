@@ -12,11 +12,11 @@ import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.exact.ExactTaps;
 
 /**
- * The squared gains of this filter and of a partner at the same sample rate add up to one, within a tolerance in dB (of power) at
- * every frequency. The proof's value is the sum in dB, its place a frequency in hertz.
+ * The squared gains of this filter and of a partner at the same sample rate add up to one, within a tolerance in dB
+ * (of power) at every frequency. The proof's value is the sum in dB, its place a frequency in hertz.
  * <p>
- * The sum of squared gains is the amplitude of symmetric coefficients: the sum of the two autocorrelations. So this is a gain limit,
- * with twice the decibels, on those.
+ * The sum of squared gains is the amplitude of symmetric coefficients: the sum of the two autocorrelations. So this
+ * is a gain limit, with twice the decibels, on those.
  *
  * @param partner
  *            coefficients of the other filter
@@ -36,7 +36,8 @@ public record PowerComplementary(ExactTaps partner, double max) implements Requi
 		double half = subject.sampleRate() / 2;
 		Subject sum = new Subject(sum(subject.taps(), partner), subject.sampleRate());
 		Proof proof = GainLimit.between(0, half, -2 * max, 2 * max).prove(sum, effort);
-		return new Proof(proof.verdict(), proof.worst(), halved(proof.value()), proof.limit() / 2, halved(proof.margin()),
+		return new Proof(proof.verdict(), proof.worst(), halved(proof.value()), proof.limit() / 2,
+				halved(proof.margin()),
 				proof.note());
 	}
 

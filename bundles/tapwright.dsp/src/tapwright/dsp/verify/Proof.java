@@ -9,11 +9,11 @@ import tapwright.dsp.exact.Enclosure;
  * @param verdict
  *            met, missed or unproven
  * @param worst
- *            where the margin is smallest (for a missed requirement: a place that breaks it), in hertz, seconds or samples as
- *            the requirement's kind says; NaN when the requirement has no place
+ *            where the margin is smallest (for a missed requirement: a place that breaks it), in hertz, seconds or
+ *            samples as the requirement's kind says; NaN when the requirement has no place
  * @param value
- *            encloses the worst value, in the unit of the limit; for a missed requirement the true worst value over the whole
- *            range, as far as it is known
+ *            encloses the worst value, in the unit of the limit; for a missed requirement the true worst value over
+ *            the whole range, as far as it is known
  * @param limit
  *            the limit that the value is compared with, at the worst place
  * @param margin

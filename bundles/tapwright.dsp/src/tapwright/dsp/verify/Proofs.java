@@ -7,7 +7,8 @@ final class Proofs {
 	private Proofs() {
 	}
 
-	/** The proof that decides about both: a missed one before an unproven one before a met one, then the smaller margin. */
+	/** The proof that decides about both: a missed one before an unproven one before a met one,
+			then the smaller margin. */
 	static Proof worse(Proof a, Proof b) {
 		int order = Integer.compare(gravity(a.verdict()), gravity(b.verdict()));
 		if (order != 0) {

@@ -8,7 +8,8 @@ import java.util.Optional;
 import tapwright.dsp.exact.Enclosure;
 import tapwright.dsp.verify.ExactSearch.Stretch;
 
-/** The attempt to prove a gain limit in double precision, which succeeds unless the worst gain is very near the limit. */
+/** The attempt to prove a gain limit in double precision,
+		which succeeds unless the worst gain is very near the limit. */
 final class QuickGain {
 
 	static final ThreadLocal<QuickSearch> WORK_SPACE = ThreadLocal.withInitial(QuickSearch::new);
@@ -28,6 +29,7 @@ final class QuickGain {
 	private boolean possible = true;
 	private int exponent;
 	private double doubt;
+	private List<Stretch> referenceStretches = List.of();
 	private double slack;
 
 	/** Prepares a search; not a limit of negative infinity among the lines. */
@@ -73,7 +75,13 @@ final class QuickGain {
 			return Optional.empty();
 		}
 		Enclosure margin = new Enclosure(-up(hi), lo == 0 ? Double.POSITIVE_INFINITY : -down(lo));
-		return Optional.of(GainReport.of(hi <= 1 ? Verdict.MET : Verdict.MISSED, search.line(), search.place(), margin, ""));
+		return Optional.of(GainReport.of(hi <= 1 ? Verdict.MET : Verdict.MISSED, search.line(), search.place(),
+				margin, ""));
+	}
+
+	/** Where the largest gain of a reference band may be, after {@link #proof()}; empty for other references. */
+	List<Stretch> referenceStretches() {
+		return referenceStretches;
 	}
 
 	/** What an exact search has to look at after {@link #proof()} gave none. */
@@ -104,8 +112,12 @@ final class QuickGain {
 				return inverse(search.gainAt(at.frequency()));
 			}
 			case GainReference.LargestIn in -> {
-				search.search(List.of(new LimitLine(in.from(), in.to(), 0, 0, true, false)), new double[] { 1 });
-				return inverse(new Enclosure(search.lo(), search.hi()));
+				List<LimitLine> band = List.of(new LimitLine(in.from(), in.to(), 0, 0, true, false));
+				double[] plain = { 1 };
+				search.search(band, plain);
+				Enclosure largest = new Enclosure(search.lo(), search.hi());
+				referenceStretches = search.open(band, plain, 1 + 0x1p-40);
+				return inverse(largest);
 			}
 		}
 	}

@@ -15,7 +15,7 @@ final class QuickMinimum {
 	private static final int DEEPEST = 14;
 	/** Enough for a bracket, as part of the sum of absolute coefficients. */
 	private static final double GAP = 1e-13;
-	private static final double ROUNDING = 1e-14;
+	private static final double ROUNDING = 2e-14;
 
 	private final TaylorCells cells = new TaylorCells();
 	private final CellMaximum maximum = new CellMaximum();

@@ -11,8 +11,9 @@ import tapwright.dsp.exact.Rationals;
 import tapwright.dsp.verify.ExactSearch.Stretch;
 
 /**
- * Brackets the largest load of a filter in double precision: gain over an upper limit, or a lower limit over the gain. Work space of
- * one thread. Every bound accounts for the errors of its own arithmetic (see the package's theorems 2 and 3).
+ * Brackets the largest load of a filter in double precision: gain over an upper limit, or a lower limit over the
+ * gain. Work space of one thread. Every bound accounts for the errors of its own arithmetic (see the package's
+ * theorems 2 and 3).
  */
 final class QuickSearch {
 
@@ -20,8 +21,8 @@ final class QuickSearch {
 	private static final int DEEPEST = 14;
 	private static final int LONGEST = 3 * TaylorCells.TERMS;
 	/** Rounding of polynomial arithmetic over the sum of absolute coefficients, by theorem 3. */
-	private static final double ROUNDING = 1e-14;
-	private static final double SQUARE_ROUNDING = 4e-14;
+	private static final double ROUNDING = 2e-14;
+	private static final double SQUARE_ROUNDING = 6e-14;
 
 	private final TaylorCells cells;
 	private final double errorFactor;
@@ -230,7 +231,8 @@ final class QuickSearch {
 			boolean above = over(high) > best;
 			boolean below = !cells.isSquared() && over(-low) > best;
 			sharp = true;
-			double bound = Math.max(above ? refine(c, 1, centre, radius) : 0, below ? refine(c, -1, centre, radius) : 0);
+			double bound = Math.max(above ? refine(c, 1, centre, radius) : 0, below ? refine(c, -1, centre, radius)
+					: 0);
 			if (above || below) {
 				settle(bound, centre, radius, depth);
 			}
@@ -336,7 +338,8 @@ final class QuickSearch {
 
 	// Load of a lower limit at a point where the polynomial, up to sign and localRounding, is this.
 	private double certainlyUnder(double value) {
-		double most = cells.isSquared() ? Math.sqrt(Math.max(0, localRounding - value)) : Math.abs(value) + localRounding;
+		double most = cells.isSquared() ? Math.sqrt(Math.max(0, localRounding - value)) : Math.abs(value)
+				+ localRounding;
 		return 1 / ((most + localError) * gain);
 	}
 

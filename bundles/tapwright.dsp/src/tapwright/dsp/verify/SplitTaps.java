@@ -12,9 +12,9 @@ import tapwright.dsp.exact.Interval;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /**
- * A filter split about its middle c = (N-1)/2: with v[k] = |k - c|, e^(jwc) H(w) = E(w) + j O(w), E = sum of even[k] cos(v[k] w),
- * O = sum of odd[k] sin(v[k] w), exactly, in units of {@link #scale()} times 2^{@link #sizeBits()}; in these units
- * |E| &lt;= 1 and |O| &lt;= 1. Immutable.
+ * A filter split about its middle c = (N-1)/2: with v[k] = |k - c|, e^(jwc) H(w) = E(w) + j O(w), E = sum of even[k]
+ * cos(v[k] w), O = sum of odd[k] sin(v[k] w), exactly, in units of {@link #scale()} times 2^{@link #sizeBits()}; in
+ * these units |E| &lt;= 1 and |O| &lt;= 1. Immutable.
  */
 final class SplitTaps {
 
@@ -101,7 +101,8 @@ final class SplitTaps {
 	}
 
 	private Taylor taylor(FixedPoint fix, BigFraction centre, BigFraction radius) {
-		// x = pi radius 2^indexBits bounds v[k] times the radius in radians; the factor x^m/m! belongs to the m-th derivative.
+		// x = pi radius 2^indexBits bounds v[k] times the radius in radians; the factor x^m/m! belongs to the m-th
+		// derivative.
 		Interval x = fix.shiftRight(fix.multiply(fix.of(radius), fix.pi()), -indexBits);
 		Interval factor = fix.exact(fix.one());
 		int count = 0;
@@ -139,7 +140,8 @@ final class SplitTaps {
 		BigInteger s = start.sin().middle();
 		BigInteger turnCos = turn.cos().middle();
 		BigInteger turnSin = turn.sin().middle();
-		// |middle - true| of the pair (cos, sin) is at most the sum of both widths; products add 2 units of rounding (see proof).
+		// |middle - true| of the pair (cos, sin) is at most the sum of both widths; products add 2 units of rounding
+		// (see proof).
 		BigInteger stepError = width(turn).add(BigInteger.TWO);
 		BigInteger error = width(start);
 		for (int k = 0; k < half; k++) {
@@ -165,7 +167,8 @@ final class SplitTaps {
 		return pair.cos().hi().subtract(pair.cos().lo()).add(pair.sin().hi()).subtract(pair.sin().lo());
 	}
 
-	private static void accumulate(BigInteger tap, BigInteger index, BigInteger error, BigInteger[] derivatives, BigInteger[] sum,
+	private static void accumulate(BigInteger tap, BigInteger index, BigInteger error, BigInteger[] derivatives,
+			BigInteger[] sum,
 			BigInteger[] size) {
 		if (tap.signum() == 0) {
 			return;

@@ -2,8 +2,8 @@
 package tapwright.dsp.verify;
 
 /**
- * The step response exceeds its final value by no more than a part of it. The proof's unit is per cent of the final value, its
- * place a time in seconds.
+ * The step response exceeds its final value by no more than a part of it. The proof's unit is per cent of the final
+ * value, its place a time in seconds.
  *
  * @param max
  *            largest overshoot in per cent, not negative

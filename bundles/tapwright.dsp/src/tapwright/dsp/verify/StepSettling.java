@@ -6,8 +6,9 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.Rationals;
 
 /**
- * After some time the step response stays within a tolerance of its final value. The proof's value is the time of the first sample from
- * which on it does, in seconds after the sample in which the step comes; its place is the same time.
+ * After some time the step response stays within a tolerance of its final value. The proof's value is the time of the
+ * first sample from which on it does, in seconds after the sample in which the step comes; its place is the same
+ * time.
  *
  * @param within
  *            tolerance in per cent of the final value, not negative

@@ -4,8 +4,8 @@ package tapwright.dsp.verify;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /**
- * The step response goes below zero by no more than a part of its final value. The proof's unit is per cent of the final value,
- * its place a time in seconds.
+ * The step response goes below zero by no more than a part of its final value. The proof's unit is per cent of the
+ * final value, its place a time in seconds.
  *
  * @param max
  *            largest undershoot in per cent, not negative

@@ -24,7 +24,8 @@ public record Subject(ExactTaps taps, double sampleRate, Optional<Arithmetic> ar
 		Objects.requireNonNull(taps);
 		Objects.requireNonNull(arithmetic);
 		if (!(sampleRate > 0) || Double.isInfinite(sampleRate)) {
-			throw new IllegalArgumentException("the sample rate is " + sampleRate + " Hz; it must be a positive number");
+			throw new IllegalArgumentException("the sample rate is " + sampleRate
+					+ " Hz; it must be a positive number");
 		}
 	}
 

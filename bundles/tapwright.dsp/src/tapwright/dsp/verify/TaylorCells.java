@@ -7,13 +7,13 @@ import tapwright.dsp.exact.Symmetry;
 import tapwright.dsp.response.Fft;
 
 /**
- * Taylor polynomials of a frequency response in cells of equal width that cover 0 to half the sample rate, all at once by fast
- * Fourier transforms in double precision, with a proven bound on what rounding and truncation leave out. Work space of one
- * thread: loaded again for every filter.
+ * Taylor polynomials of a frequency response in cells of equal width that cover 0 to half the sample rate, all at
+ * once by fast Fourier transforms in double precision, with a proven bound on what rounding and truncation leave out.
+ * Work space of one thread: loaded again for every filter.
  * <p>
- * Cell j has its centre at j / M cycles per sample and the local variable s, -1 &lt;= s &lt;= 1, at (j + s/2) / M. With symmetric
- * coefficients a cell's polynomial is the real amplitude A of {@link tapwright.dsp.design.LinearPhaseType}, otherwise the square of
- * the magnitude.
+ * Cell j has its centre at j / M cycles per sample and the local variable s, -1 &lt;= s &lt;= 1, at (j + s/2) / M.
+ * With symmetric coefficients a cell's polynomial is the real amplitude A of {@link
+ * tapwright.dsp.design.LinearPhaseType}, otherwise the square of the magnitude.
  */
 public final class TaylorCells {
 
@@ -55,7 +55,8 @@ public final class TaylorCells {
 		this(1);
 	}
 
-	/** Work space whose error bound is multiplied by a factor: below 1 the bounds are wrong, so that tests can see it. */
+	/** Work space whose error bound is multiplied by a factor: below 1 the bounds are wrong,
+			so that tests can see it. */
 	TaylorCells(double errorFactor) {
 		this.errorFactor = errorFactor;
 	}
@@ -271,7 +272,8 @@ public final class TaylorCells {
 		}
 	}
 
-	/** Sum of the absolute Taylor coefficients of the real and imaginary part of the cell last written as a square, squared. */
+	/** Sum of the absolute Taylor coefficients of the real and imaginary part of the cell last written as a square,
+			squared. */
 	double squareSize() {
 		double even = 0;
 		double odd = 0;

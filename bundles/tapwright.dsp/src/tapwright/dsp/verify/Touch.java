@@ -8,13 +8,14 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.ExactTaps;
 
 /**
- * Decides exactly how a sum of cosines, r[0] + sum of 2 r[k] cos(kw), or of sines, sum of 2 r[k] sin(kw), behaves near an angle
- * with rational cosine. |H|^2 is such a sum with r the autocorrelation of the coefficients.
+ * Decides exactly how a sum of cosines, r[0] + sum of 2 r[k] cos(kw), or of sines, sum of 2 r[k] sin(kw), behaves
+ * near an angle with rational cosine. |H|^2 is such a sum with r the autocorrelation of the coefficients.
  * <p>
- * At w0 = 0, pi/3, pi/2, 2 pi/3 and pi the numbers 2 cos(k w0) are integers and 2 sin(k w0) are integers times 1 or sqrt(3), so all
- * derivatives are known exactly up to that positive factor. The first one that is not zero, d of order m, decides the sign of the
- * difference from the value at w0 by Taylor's theorem with Lagrange's remainder: |difference - d x^m / m!| &lt;= R |x|^(m+1) / (m+1)!
- * with R the sum of 2 |r[k]| k^(m+1), so the sign is that of d x^m for |x| &lt; (m+1) |d| / R.
+ * At w0 = 0, pi/3, pi/2, 2 pi/3 and pi the numbers 2 cos(k w0) are integers and 2 sin(k w0) are integers times 1 or
+ * sqrt(3), so all derivatives are known exactly up to that positive factor. The first one that is not zero, d of
+ * order m, decides the sign of the difference from the value at w0 by Taylor's theorem with Lagrange's remainder:
+ * |difference - d x^m / m!| &lt;= R |x|^(m+1) / (m+1)! with R the sum of 2 |r[k]| k^(m+1), so the sign is that of d
+ * x^m for |x| &lt; (m+1) |d| / R.
  */
 final class Touch {
 
@@ -22,7 +23,8 @@ final class Touch {
 	static final int[] TWELFTHS = { 0, 2, 3, 4, 6 };
 
 	private static final int[] TWO_COS = { 2, 0, 1, 0, -1, 0, -2, 0, -1, 0, 1, 0 };
-	private static final int[][] SINES = { { 0 }, {}, { 0, 1, 1, 0, -1, -1 }, { 0, 2, 0, -2 }, { 0, 1, -1 }, {}, { 0 } };
+	private static final int[][] SINES = { { 0 }, {}, { 0, 1, 1, 0, -1, -1 }, { 0, 2, 0, -2 }, { 0, 1, -1 }, {},
+			{ 0 } };
 
 	private final BigInteger[] correlation;
 	private final boolean ofSines;

@@ -32,11 +32,13 @@ final class Touching {
 
 	/** Looks at the frequencies with rational cosine. */
 	static Optional<Touching> find(List<LimitLine> lines, GainReference reference, ExactTaps taps, double sampleRate) {
-		List<LimitLine> rational = lines.stream().filter(line -> line.isConstant() && line.fromDb() % RATIONAL_DB == 0).toList();
+		List<LimitLine> rational = lines.stream().filter(line -> line.isConstant()
+				&& line.fromDb() % RATIONAL_DB == 0).toList();
 		Touching touching = new Touching(sampleRate);
 		if (!rational.isEmpty() && !(reference instanceof GainReference.LargestIn)) {
 			Touch touch = Touch.squareOf(taps);
-			touching.unit(touch, reference, taps).ifPresent(unit -> rational.forEach(line -> touching.examine(touch, line, unit)));
+			touching.unit(touch, reference, taps).ifPresent(unit -> rational.forEach(line -> touching.examine(touch,
+					line, unit)));
 		}
 		return touching.kept.isEmpty() && touching.broken.isEmpty() ? Optional.empty() : Optional.of(touching);
 	}

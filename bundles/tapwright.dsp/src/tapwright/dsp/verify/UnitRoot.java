@@ -9,12 +9,14 @@ import java.util.List;
 import org.apache.commons.math3.fraction.BigFraction;
 
 /**
- * Decides exactly whether a polynomial with integer coefficients vanishes at e^(2 pi j f) for rational f = p/q in lowest terms.
+ * Decides exactly whether a polynomial with integer coefficients vanishes at e^(2 pi j f) for rational f = p/q in
+ * lowest terms.
  * <p>
- * It does when the cyclotomic polynomial of order q divides it, whose degree is Euler's
- * function phi(q), at least sqrt(q/2). So a nonzero polynomial of degree below phi(q) does not vanish. Otherwise the polynomial, reduced modulo x^q - 1, is multiplied by 1 - x^(q/r)
- * for every prime r that divides q. These factors vanish at exactly the q-th roots of unity that are not primitive, so the product is
- * zero modulo x^q - 1 when and only when the polynomial vanishes at the primitive ones, of which e^(2 pi j f) is one.
+ * It does when the cyclotomic polynomial of order q divides it, whose degree is Euler's function phi(q), at least
+ * sqrt(q/2). So a nonzero polynomial of degree below phi(q) does not vanish. Otherwise the polynomial, reduced modulo
+ * x^q - 1, is multiplied by 1 - x^(q/r) for every prime r that divides q. These factors vanish at exactly the q-th
+ * roots of unity that are not primitive, so the product is zero modulo x^q - 1 when and only when the polynomial
+ * vanishes at the primitive ones, of which e^(2 pi j f) is one.
  */
 final class UnitRoot {
 

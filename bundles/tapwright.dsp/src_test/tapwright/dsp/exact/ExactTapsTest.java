@@ -23,16 +23,19 @@ class ExactTapsTest {
 		for (int k = 0; k < values.length; k++) {
 			BigFraction tap = taps.tap(k);
 			BigDecimal exact = new BigDecimal(values[k]);
-			assertEquals(0, exact.multiply(new BigDecimal(tap.getDenominator())).compareTo(new BigDecimal(tap.getNumerator())));
+			assertEquals(0, exact.multiply(new BigDecimal(tap.getDenominator()))
+					.compareTo(new BigDecimal(tap.getNumerator())));
 		}
 		assertArrayEquals(values, taps.toDoubles());
 	}
 
 	@Test
 	void scaledDoublesAreWithinTheirBound() {
-		List<BigInteger> integers = List.of(new BigInteger("123456789012345678901234567890"), BigInteger.ONE, BigInteger.ZERO,
+		List<BigInteger> integers = List.of(new BigInteger("123456789012345678901234567890"), BigInteger.ONE,
+				BigInteger.ZERO,
 				new BigInteger("-99999999999999999999"));
-		for (BigFraction unit : List.of(BigFraction.ONE, new BigFraction(1, 3), ExactTaps.powerOfTwo(-2000), ExactTaps.powerOfTwo(1500))) {
+		for (BigFraction unit : List.of(BigFraction.ONE, new BigFraction(1, 3), ExactTaps.powerOfTwo(-2000),
+				ExactTaps.powerOfTwo(1500))) {
 			checkScaled(ExactTaps.ofIntegers(integers, unit));
 		}
 		checkScaled(ExactTaps.ofDoubles(1e-310, 3e-308, 0));
@@ -60,7 +63,8 @@ class ExactTapsTest {
 		assertEquals(Symmetry.ODD, ExactTaps.ofDoubles(1, 0, -1).symmetry());
 		assertEquals(Symmetry.NONE, ExactTaps.ofDoubles(1, 0x1p-1074, -1).symmetry());
 		assertEquals(Symmetry.NONE, ExactTaps.ofDoubles(1, 2, Math.nextUp(1.0)).symmetry());
-		assertEquals(Symmetry.ODD, ExactTaps.ofIntegers(List.of(BigInteger.TWO, BigInteger.TWO.negate()), BigFraction.ONE).symmetry());
+		assertEquals(Symmetry.ODD, ExactTaps.ofIntegers(List.of(BigInteger.TWO, BigInteger.TWO.negate()),
+				BigFraction.ONE).symmetry());
 	}
 
 	@Test
@@ -76,6 +80,7 @@ class ExactTapsTest {
 		assertThrows(IllegalArgumentException.class, ExactTaps::ofDoubles);
 		assertThrows(IllegalArgumentException.class, () -> ExactTaps.ofDoubles(1, Double.NaN));
 		assertThrows(IllegalArgumentException.class, () -> ExactTaps.ofDoubles(Double.POSITIVE_INFINITY));
-		assertThrows(IllegalArgumentException.class, () -> ExactTaps.ofIntegers(List.of(BigInteger.ONE), BigFraction.ZERO));
+		assertThrows(IllegalArgumentException.class, () -> ExactTaps.ofIntegers(List.of(BigInteger.ONE),
+				BigFraction.ZERO));
 	}
 }

@@ -60,9 +60,11 @@ class FixedPointTest {
 				Interval power = fix.pow10(exponent);
 				Interval back = fix.divide(fix.ln(power), fix.ln10());
 				BigInteger exact = fix.of(exponent).lo();
-				assertTrue(back.lo().compareTo(exact) <= 0 && back.hi().compareTo(exact) >= 0, exponent + " at " + bits);
+				assertTrue(back.lo().compareTo(exact) <= 0 && back.hi().compareTo(exact) >= 0, exponent + " at "
+						+ bits);
 				BigDecimal middle = decimal(fix, power.middle());
-				check(fix, back, OracleMath.log10(middle), 1L << Math.min(60, 16 + (int) Math.max(0, -3.4 * exponent.doubleValue())));
+				check(fix, back, OracleMath.log10(middle), 1L << Math.min(60, 16 + (int) Math.max(0,
+						-3.4 * exponent.doubleValue())));
 			}
 		}
 	}

@@ -43,8 +43,10 @@ class ResponseTest {
 	// Re(sum n h[n] e^(-jwn) / sum h[n] e^(-jwn)), evaluated with mpmath.
 	@Test
 	void groupDelayIsTheRatioOfMoments() {
-		double[] delay = FrequencyResponse.of(new double[] { 2, -1, 0.5 }, 1, new double[] { 0, 0.125, 0.25, 0.5 }).groupDelay();
-		assertArrayEquals(new double[] { 0, -0.5686165142176733163723939, -0.1538461538461538461538462, 0.5714285714285714285714286 },
+		double[] delay = FrequencyResponse.of(new double[] { 2, -1, 0.5 }, 1, new double[] { 0, 0.125, 0.25, 0.5 })
+				.groupDelay();
+		assertArrayEquals(new double[] { 0, -0.5686165142176733163723939, -0.1538461538461538461538462,
+				0.5714285714285714285714286 },
 				delay, 1e-14);
 	}
 
@@ -83,7 +85,8 @@ class ResponseTest {
 		List<Complex> zeros = Zeros.of(taps);
 		assertEquals(12, zeros.size());
 		for (double radius : radii) {
-			assertEquals(2, zeros.stream().filter(zero -> Math.abs(zero.abs() - radius) < 1e-9 * radius).count(), "radius " + radius);
+			assertEquals(2, zeros.stream().filter(zero -> Math.abs(zero.abs() - radius) < 1e-9 * radius).count(),
+					"radius " + radius);
 		}
 		assertEquals(List.of(Complex.ZERO, Complex.ZERO), Zeros.of(new double[] { 0, 1, 0, 0 }));
 		assertEquals(List.of(), Zeros.of(new double[] { 0, 0 }));

@@ -39,11 +39,25 @@ final class GainJudge {
 		GainOracle.Extremes extremes = oracle.extremes(new BigDecimal(subject.from()), new BigDecimal(subject.to()));
 		BigInteger sum = Arrays.stream(integers(taps)).map(BigInteger::abs).reduce(BigInteger.ZERO, BigInteger::add);
 		BigDecimal nothing = new BigDecimal(sum.multiply(sum)).multiply(NOTHING);
-		judge(subject, extremes.most().compareTo(nothing) < 0 ? null : decibels(extremes.most(), taps), true);
-		judge(subject, extremes.least().compareTo(nothing) < 0 ? null : decibels(extremes.least(), taps), false);
+		BigDecimal most = extremes.most().compareTo(nothing) < 0 ? null : decibels(extremes.most(), taps);
+		BigDecimal least = extremes.least().compareTo(nothing) < 0 ? null : decibels(extremes.least(), taps);
+		judge(subject, most, true, GainReference.ABSOLUTE);
+		judge(subject, least, false, GainReference.ABSOLUTE);
+		double other = random.nextDouble() / 2;
+		double another = other + (0.5 - other) * random.nextDouble();
+		boolean atFrequency = random.nextBoolean();
+		GainReference reference = atFrequency ? new GainReference.AtFrequency(other)
+				: new GainReference.LargestIn(other, another);
+		BigDecimal square = oracle.extremes(new BigDecimal(other), new BigDecimal(atFrequency ? other : another))
+				.most();
+		if (square.compareTo(nothing) > 0) {
+			BigDecimal zero = decibels(square, taps);
+			judge(subject, most == null ? null : most.subtract(zero), true, reference);
+			judge(subject, least == null ? null : least.subtract(zero), false, reference);
+		}
 	}
 
-	private void judge(HardCases.Case subject, BigDecimal truth, boolean upper) {
+	private void judge(HardCases.Case subject, BigDecimal truth, boolean upper, GainReference reference) {
 		if (truth == null) {
 			return;
 		}
@@ -52,7 +66,7 @@ final class GainJudge {
 				double limit = truth.doubleValue() + side * distance * (0.5 + random.nextDouble());
 				GainLimit requirement = upper ? GainLimit.atMost(subject.from(), subject.to(), limit)
 						: GainLimit.atLeast(subject.from(), subject.to(), limit);
-				judge(subject, requirement, truth, limit, upper);
+				judge(subject, requirement.relativeTo(reference), truth, limit, upper);
 			}
 		}
 	}
@@ -72,8 +86,10 @@ final class GainJudge {
 			case UNPROVEN -> unproven++;
 		}
 		if (wrong || outside || wide || astray) {
-			fail((wrong ? "wrong verdict " : outside ? "truth outside the enclosure " : wide ? "wide enclosure " : "place outside the band ")
-					+ subject + " " + requirement + " truth " + truth.doubleValue() + " margin " + margin.doubleValue() + " "
+			fail((wrong ? "wrong verdict " : outside ? "truth outside the enclosure " : wide ? "wide enclosure "
+					: "place outside the band ")
+					+ subject + " " + requirement + " truth " + truth.doubleValue() + " margin "
+							+ margin.doubleValue() + " "
 					+ proof);
 		}
 	}
@@ -99,7 +115,8 @@ final class GainJudge {
 		if (square.signum() == 0) {
 			return null;
 		}
-		BigDecimal unit = new BigDecimal(taps.unit().getNumerator()).divide(new BigDecimal(taps.unit().getDenominator()),
+		BigDecimal unit = new BigDecimal(taps.unit().getNumerator()).divide(new BigDecimal(taps.unit()
+				.getDenominator()),
 				OracleMath.DIGITS);
 		return OracleMath.log10(square.multiply(unit, OracleMath.DIGITS).multiply(unit, OracleMath.DIGITS))
 				.multiply(BigDecimal.TEN);

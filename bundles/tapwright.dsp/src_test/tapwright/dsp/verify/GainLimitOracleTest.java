@@ -7,12 +7,13 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import org.junit.jupiter.api.Test;
 
 /**
- * Verdicts and enclosures of gain limits, judged by root isolation in exact arithmetic. A few filters on every build, many with
- * {@code -Dtapwright.thorough=true}.
+ * Verdicts and enclosures of gain limits, judged by root isolation in exact arithmetic. A few filters on every build,
+ * many with {@code -Dtapwright.thorough=true}.
  */
 class GainLimitOracleTest {
 
-	private static final int FILTERS = Integer.getInteger("tapwright.filters", Boolean.getBoolean("tapwright.thorough") ? 3800 : 24);
+	private static final int FILTERS = Integer.getInteger("tapwright.filters",
+			Boolean.getBoolean("tapwright.thorough") ? 1000 : 16);
 	private static final long SEED = Long.getLong("tapwright.seed", 20260);
 
 	@Test

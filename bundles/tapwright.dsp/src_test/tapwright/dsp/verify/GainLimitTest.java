@@ -59,8 +59,10 @@ class GainLimitTest {
 
 	// Closed form sin(pi f N) / (N sin(pi f)), evaluated with mpmath.
 	@ParameterizedTest
-	@CsvSource({ "4, 0.36613976359938499463, -11.303337684950061167", "8, 0.17974875028826504333, -12.797347818635084244",
-			"16, 0.089510862870714772087, -13.14683055926419725", "64, 0.022350204815548405913, -13.254321125725801238" })
+	@CsvSource({ "4, 0.36613976359938499463, -11.303337684950061167",
+			"8, 0.17974875028826504333, -12.797347818635084244",
+			"16, 0.089510862870714772087, -13.14683055926419725",
+					"64, 0.022350204815548405913, -13.254321125725801238" })
 	void firstSideLobeOfAnAverageIsTheClosedForm(int n, double place, double decibels) {
 		Proof proof = GainLimit.atMost(1.0 / n, 0.5, -10).prove(average(n), Effort.STANDARD);
 		assertEquals(Verdict.MET, proof.verdict());
@@ -69,8 +71,9 @@ class GainLimitTest {
 		assertTrue(proof.value().width() < 1e-11);
 	}
 
-	// E. B. Hogenauer, An economical class of digital filters for decimation and interpolation, IEEE Transactions on Acoustics, Speech, and
-	// Signal Processing 29(2), 1981, tables I and II: large rate change, bandwidth times differential delay 1/4.
+	// E. B. Hogenauer, An economical class of digital filters for decimation and interpolation, IEEE Transactions on
+	// Acoustics, Speech, and Signal Processing 29(2), 1981, tables I and II: large rate change, bandwidth times
+	// differential delay 1/4.
 	@ParameterizedTest
 	@CsvSource({ "1, 0.91, 10.5", "2, 1.82, 20.9", "3, 2.74, 31.4", "4, 3.65, 41.8", "5, 4.56, 52.3", "6, 5.47, 62.7" })
 	void integratorsAndCombsAttenuateAsTabulated(int sections, double pass, double alias) {
@@ -95,7 +98,8 @@ class GainLimitTest {
 		assertEquals(Verdict.MET, GainLimit.atMost(0, 0.5, 0).prove(new Subject(taps, 1), Effort.STANDARD).verdict());
 		// (-1, 0, 9, 16, 9, 0, -1) / 32 is flat at 0 and rises nowhere above 1.
 		ExactTaps flat = ExactTaps.ofDoubles(-1 / 32.0, 0, 9 / 32.0, 0.5, 9 / 32.0, 0, -1 / 32.0);
-		assertEquals(Verdict.MET, GainLimit.between(0, 0.1, -0.3, 0).prove(new Subject(flat, 1), Effort.STANDARD).verdict());
+		assertEquals(Verdict.MET, GainLimit.between(0, 0.1, -0.3, 0).prove(new Subject(flat, 1), Effort.STANDARD)
+				.verdict());
 	}
 
 	@Test
@@ -105,7 +109,8 @@ class GainLimitTest {
 		Proof proof = GainLimit.atMost(0.2, 0.3, 0).prove(new Subject(taps, 1), Effort.STANDARD);
 		assertEquals(Verdict.MET, proof.verdict());
 		assertEquals(0.25, proof.worst());
-		assertEquals(Verdict.MISSED, GainLimit.atLeast(0.2, 0.3, 0).prove(new Subject(taps, 1), Effort.STANDARD).verdict());
+		assertEquals(Verdict.MISSED, GainLimit.atLeast(0.2, 0.3, 0).prove(new Subject(taps, 1), Effort.STANDARD)
+				.verdict());
 	}
 
 	@Test
@@ -147,7 +152,8 @@ class GainLimitTest {
 
 	@Test
 	void lineOfLimitsBendsAtItsBreakpoints() {
-		// A pure delay has 0 dB everywhere: the upper line comes down to 0.5 dB at 100 Hz, straight in dB over log frequency.
+		// A pure delay has 0 dB everywhere: the upper line comes down to 0.5 dB at 100 Hz, straight in dB over log
+		// frequency.
 		GainLimit limit = new GainLimit(List.of(new Breakpoint(1, NONE, 4), new Breakpoint(100, NONE, 0.5),
 				new Breakpoint(100, NONE, 3), new Breakpoint(1000, NONE, 1)), true, GainReference.ABSOLUTE);
 		Proof proof = limit.prove(new Subject(ExactTaps.ofDoubles(1, 0), 2000), Effort.STANDARD);
@@ -174,7 +180,8 @@ class GainLimitTest {
 		assertThrows(IllegalArgumentException.class, () -> GainLimit.between(0, 1, NONE, Double.POSITIVE_INFINITY));
 		assertThrows(IllegalArgumentException.class, () -> GainLimit.atMost(0, 1, Double.NaN));
 		String message = assertThrows(IllegalArgumentException.class,
-				() -> GainLimit.atMost(0, 501, 0).prove(new Subject(ExactTaps.ofDoubles(1), 1000), Effort.STANDARD)).getMessage();
+				() -> GainLimit.atMost(0, 501, 0).prove(new Subject(ExactTaps.ofDoubles(1), 1000), Effort.STANDARD))
+						.getMessage();
 		assertTrue(message.contains("501") && message.contains("1000"), message);
 	}
 

@@ -7,9 +7,9 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The largest and smallest |H|^2 of integer coefficients over a band, slowly and independently of the product: |H|^2 is a polynomial
- * in x = cos w with integer coefficients, whose stationary points are isolated by C. Sturm's theorem (1829) in exact arithmetic and
- * narrowed by bisection.
+ * The largest and smallest |H|^2 of integer coefficients over a band, slowly and independently of the product: |H|^2
+ * is a polynomial in x = cos w with integer coefficients, whose stationary points are isolated by C. Sturm's theorem
+ * (1829) in exact arithmetic and narrowed by bisection.
  */
 final class GainOracle {
 

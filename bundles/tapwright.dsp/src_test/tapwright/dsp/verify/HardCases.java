@@ -49,7 +49,8 @@ final class HardCases {
 
 	private Case integers(int n, double from, double to) {
 		int bits = 1 + random.nextInt(15);
-		List<BigInteger> taps = IntStream.range(0, n).mapToObj(k -> BigInteger.valueOf(random.nextInt(1 << bits) - (1 << bits - 1)))
+		List<BigInteger> taps = IntStream.range(0, n).mapToObj(k -> BigInteger.valueOf(random.nextInt(1 << bits)
+				- (1 << bits - 1)))
 				.toList();
 		BigFraction unit = new BigFraction(1 + random.nextInt(5), 1 + random.nextInt(1000));
 		return new Case("integers", ExactTaps.ofIntegers(taps, unit), from, to);

@@ -6,8 +6,9 @@ import java.math.MathContext;
 import java.math.RoundingMode;
 
 /**
- * Decimal arithmetic for judging proofs, by other methods than the product's: pi by the arithmetic-geometric mean (C. F. Gauss, A.-M. Legendre;
- * R. Brent 1976), the cosine by its series and repeated doubling, logarithms after repeated square roots.
+ * Decimal arithmetic for judging proofs, by other methods than the product's: pi by the arithmetic-geometric mean (C.
+ * F. Gauss, A.-M. Legendre; R. Brent 1976), the cosine by its series and repeated doubling, logarithms after repeated
+ * square roots.
  */
 public final class OracleMath {
 

@@ -76,7 +76,8 @@ class OtherKindsTest {
 	@Test
 	void nullsAreDecidedInTheCyclotomicField() {
 		for (int n = 2; n < 40; n++) {
-			Subject average = new Subject(ExactTaps.ofIntegers(Collections.nCopies(n, BigInteger.ONE), new BigFraction(1, n)), n);
+			Subject average = new Subject(ExactTaps.ofIntegers(Collections.nCopies(n, BigInteger.ONE),
+					new BigFraction(1, n)), n);
 			for (int k = 1; 2 * k <= n; k++) {
 				assertEquals(MET, new Null(k).prove(average, Effort.STANDARD).verdict());
 				assertEquals(MISSED, new Null(Math.nextDown((double) k)).prove(average, Effort.STANDARD).verdict());
@@ -93,11 +94,13 @@ class OtherKindsTest {
 		assertEquals(MET, new ExactGain(0, 1).prove(average(3), Effort.STANDARD).verdict());
 		assertEquals(MISSED, new ExactGain(0, Math.nextUp(1.0)).prove(average(3), Effort.STANDARD).verdict());
 		// |1 + j| is the square root of 2: no double.
-		Proof root = new ExactGain(0.25, Math.sqrt(2)).prove(new Subject(ExactTaps.ofDoubles(1, 1), 1), Effort.STANDARD);
+		Proof root = new ExactGain(0.25, Math.sqrt(2)).prove(new Subject(ExactTaps.ofDoubles(1, 1), 1),
+				Effort.STANDARD);
 		assertEquals(MISSED, root.verdict());
 		assertEquals(Math.sqrt(2), root.value().middle(), 1e-15);
 		// |1 + e^(-j pi/3)|^2 = 3, |1 - 1/2 + ...|: 3 + 4j style triples give rational gains.
-		assertEquals(MET, new ExactGain(0.25, 5).prove(new Subject(ExactTaps.ofDoubles(3, 4), 1), Effort.STANDARD).verdict());
+		assertEquals(MET, new ExactGain(0.25, 5).prove(new Subject(ExactTaps.ofDoubles(3, 4), 1), Effort.STANDARD)
+				.verdict());
 	}
 
 	@Test
@@ -180,8 +183,10 @@ class OtherKindsTest {
 		assertEquals(MET, new ClockTolerance(limit, 0.001).prove(average, Effort.STANDARD).verdict());
 		assertEquals(MISSED, new ClockTolerance(limit, 10).prove(average, Effort.STANDARD).verdict());
 		assertEquals(MISSED, new ClockTolerance(new Null(0.25), 1).prove(average, Effort.STANDARD).verdict());
-		assertEquals(MET, new ClockTolerance(new BulkDelay(3.49, 3.51), 1000).prove(average, Effort.STANDARD).verdict());
-		assertEquals(MISSED, new ClockTolerance(new BulkDelay(3.499, 3.501), 1000).prove(average, Effort.STANDARD).verdict());
+		assertEquals(MET, new ClockTolerance(new BulkDelay(3.49, 3.51), 1000).prove(average, Effort.STANDARD)
+				.verdict());
+		assertEquals(MISSED, new ClockTolerance(new BulkDelay(3.499, 3.501), 1000).prove(average, Effort.STANDARD)
+				.verdict());
 	}
 
 	@Test
@@ -195,15 +200,18 @@ class OtherKindsTest {
 			double none = upper ? Double.NEGATIVE_INFINITY : Double.POSITIVE_INFINITY;
 			GainLimit limit = new GainLimit(java.util.List.of(
 					new GainLimit.Breakpoint(0.2, upper ? none : a, upper ? a : none),
-					new GainLimit.Breakpoint(0.45, upper ? none : b, upper ? b : none)), random.nextBoolean(), GainReference.ABSOLUTE);
-			Proof all = new ClockTolerance(limit, 50_000).prove(new Subject(ExactTaps.ofDoubles(taps), 1), Effort.STANDARD);
+					new GainLimit.Breakpoint(0.45, upper ? none : b, upper ? b : none)), random.nextBoolean(),
+							GainReference.ABSOLUTE);
+			Proof all = new ClockTolerance(limit, 50_000).prove(new Subject(ExactTaps.ofDoubles(taps), 1),
+					Effort.STANDARD);
 			double worst = Double.POSITIVE_INFINITY;
 			for (int k = -100; k <= 100; k++) {
 				Proof one = limit.prove(new Subject(ExactTaps.ofDoubles(taps), 1 + 0.05 * k / 100), Effort.STANDARD);
 				worst = Math.min(worst, one.margin().hi());
 			}
 			assertTrue(all.margin().lo() <= worst, all + " against " + worst);
-			assertTrue(all.margin().hi() == Double.NEGATIVE_INFINITY || worst < all.margin().hi() + 0.5, all + " against " + worst);
+			assertTrue(all.margin().hi() == Double.NEGATIVE_INFINITY || worst < all.margin().hi() + 0.5, all
+					+ " against " + worst);
 		}
 	}
 

@@ -60,7 +60,8 @@ class SlopingLimitTest {
 	}
 
 	// Smallest margin: grid, then golden section around every local minimum of it.
-	private static double margin(double[] taps, double from, double to, double a, double b, boolean upper, boolean logarithmic) {
+	private static double margin(double[] taps, double from, double to, double a, double b, boolean upper,
+			boolean logarithmic) {
 		double[] margins = new double[GRID + 1];
 		for (int k = 0; k <= GRID; k++) {
 			margins[k] = margin(taps, at(from, to, k / (double) GRID, logarithmic), from, to, a, b, upper, logarithmic);

@@ -9,8 +9,8 @@ import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.verify.GainLimit.Breakpoint;
 
 /**
- * Times proofs of two-band limits on one thread; run {@code verify_benchmark.py} right before or after to compare. Arguments: number
- * of coefficients (128) and the word {@code general} for coefficients without symmetry.
+ * Times proofs of two-band limits on one thread; run {@code verify_benchmark.py} right before or after to compare.
+ * Arguments: number of coefficients (128) and the word {@code general} for coefficients without symmetry.
  */
 public final class VerifyBenchmark {
 
@@ -39,7 +39,8 @@ public final class VerifyBenchmark {
 			double half = 1.8 / n;
 			limits.add(new GainLimit(List.of(new Breakpoint(0, -0.05, 0.05), new Breakpoint(cutoff - half, -0.05, 0.05),
 					new Breakpoint(cutoff - half, NONE, FREE), new Breakpoint(cutoff + half, NONE, FREE),
-					new Breakpoint(cutoff + half, NONE, -50), new Breakpoint(0.5, NONE, -50)), false, GainReference.ABSOLUTE));
+					new Breakpoint(cutoff + half, NONE, -50), new Breakpoint(0.5, NONE, -50)), false,
+							GainReference.ABSOLUTE));
 			filters.add(taps);
 		}
 		double best = Double.MAX_VALUE;
