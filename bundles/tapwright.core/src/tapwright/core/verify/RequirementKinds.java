@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 
+import tapwright.core.verify.kind.ArithmeticKinds;
 import tapwright.core.verify.kind.CostKinds;
 import tapwright.core.verify.kind.FrequencyKinds;
 import tapwright.core.verify.kind.GainKind;
@@ -22,6 +23,7 @@ public final class RequirementKinds {
 		register(FrequencyKinds.ALL);
 		register(TimeKinds.ALL);
 		register(CostKinds.ALL);
+		register(ArithmeticKinds.ALL);
 	}
 
 	private RequirementKinds() {

@@ -59,6 +59,26 @@ class RequirementKindsTest {
 		assertTrue(only.description().length() > 3);
 	}
 
+	// Four unit coefficients and samples of 8 bits, two's complement, add up to -512 at most: 10 bits hold that, 9 do not. Rounding
+	// away 10 of 15 fraction bits makes noise of q^2/12 with q = 2^-5 (B. Widrow, 1956), -40.9 dB, a little less for the finer start.
+	@ParameterizedTest
+	@CsvSource(delimiter = '|', value = { "10 | 'kind': 'no-overflow', 'input': 'full-scale' | met",
+			"9 | 'kind': 'no-overflow', 'input': 'full-scale' | missed", "9 | 'kind': 'no-overflow', 'input': 'sinusoid' | unproven",
+			"10 | 'kind': 'no-overflow', 'input': 'sinusoid' | met", "16 | 'kind': 'output-noise', 'max': -40.8 | met",
+			"16 | 'kind': 'output-noise', 'max': -41 | missed" })
+	void judgeWhatFormatsDo(int accumulator, String members, String verdict) throws InputException {
+		var filter = FilterJson.read(("""
+				{'format': 'tapwright-filter/1', 'name': 'x', 'sampleRate': 1000, 'coefficients': {'integers': [1, 1, 1, 1], 'scale': '1'},
+				 'arithmetic': {'structure': 'direct', 'coefficient': {'word': 2, 'fraction': 0}, 'input': {'word': 8, 'fraction': 15},
+				   'accumulator': {'word': ACC, 'fraction': 15}, 'output': {'word': 6, 'fraction': 5}, 'overflow': 'saturate'},
+				 'requirements': [{'id': 'a', MEMBERS}]}""").replace("ACC", String.valueOf(accumulator)).replace("MEMBERS", members)
+				.replace('\'', '"'));
+		FilterEvidence evidence = FilterQuestion.of(filter, Expression.Names.NONE).answer(Effort.STANDARD);
+		assertTrue(evidence.problems().isEmpty(), evidence.problems().toString());
+		RequirementEvidence only = evidence.requirements().getFirst();
+		assertEquals(verdict.toUpperCase(Locale.ROOT), only.proof().verdict().name(), only.message());
+	}
+
 	@Test
 	void sayThatAPartnerNeedsAPortfolio() throws InputException {
 		var filter = FilterJson.read("""
