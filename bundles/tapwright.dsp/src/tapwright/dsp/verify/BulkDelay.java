@@ -45,7 +45,8 @@ public record BulkDelay(double min, double max) implements Requirement {
 			moment = moment.add(taps.integer(k).multiply(BigInteger.valueOf(k)));
 		}
 		if (sum.signum() == 0) {
-			throw new IllegalArgumentException("the gain at 0 Hz is zero and the coefficients are not symmetric, so the filter has no "
+			throw new IllegalArgumentException("the gain at 0 Hz is zero and the coefficients are not symmetric, "
+					+ "so the filter has no "
 					+ "bulk delay; limit the group delay over a band instead");
 		}
 		return new BigFraction(moment, sum);

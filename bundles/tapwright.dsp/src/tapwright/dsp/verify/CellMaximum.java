@@ -20,7 +20,7 @@ final class CellMaximum {
 	private double value;
 	private double slope;
 
-	/** Bounds by the first three coefficients and the sizes of the others; sets {@link #lo} and {@link #hi} of all values. */
+	/** Bounds all values by three coefficients and the sizes of the others; sets {@link #lo} and {@link #hi}. */
 	void coarse(double[] c, int n) {
 		double tail = 0;
 		for (int m = 3; m < n; m++) {

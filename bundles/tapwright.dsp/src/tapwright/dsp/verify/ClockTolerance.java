@@ -56,7 +56,7 @@ public record ClockTolerance(Requirement statement, double ppm) implements Requi
 		}
 		Proof atEnds = atEnds(subject, effort, inner);
 		return atEnds.verdict() == Verdict.MISSED ? atEnds
-				: unproven(atOuterEnds, "It holds at both ends of the clock's range, but what lies between them is not proven.");
+				: unproven(atOuterEnds, "It holds at both ends of the clock's range; between them it is not proven.");
 	}
 
 	private Proof atEnds(Subject subject, Effort effort, ClockRange range) {

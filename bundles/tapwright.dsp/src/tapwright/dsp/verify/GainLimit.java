@@ -170,7 +170,7 @@ public record GainLimit(List<Breakpoint> breakpoints, boolean logarithmic,
 		}
 		if (logarithmic && a.frequency == 0) {
 			throw new IllegalArgumentException(
-					"a sloping limit over the logarithm of frequency cannot start at 0 Hz; start it at a positive frequency");
+					"a sloping limit over the logarithm of frequency cannot start at 0 Hz; start it higher");
 		}
 	}
 }

@@ -67,7 +67,7 @@ final class GainUnit {
 				return (square.lo().bitLength() - bits) / 2.0;
 			}
 		}
-		throw new IllegalArgumentException("the gain that the limit refers to is zero, or far too small to compare with; "
+		throw new IllegalArgumentException("the gain that the limit refers to is zero, or too small to compare with; "
 				+ "choose another reference");
 	}
 

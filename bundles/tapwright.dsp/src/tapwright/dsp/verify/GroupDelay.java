@@ -31,7 +31,7 @@ public record GroupDelay(double from, double to, double min, double max) impleme
 					+ " s leave nothing between them");
 		}
 		if (Double.isInfinite(min) && Double.isInfinite(max)) {
-			throw new IllegalArgumentException("the group delay requirement limits nothing; state a shortest or a longest delay");
+			throw new IllegalArgumentException("the requirement limits nothing; state a shortest or a longest delay");
 		}
 	}
 

@@ -26,7 +26,7 @@ public record NonNegativeAmplitude() implements Requirement {
 				patience);
 		String note = minimum.verdict() != Verdict.UNPROVEN ? ""
 				: patience.wasOver() ? "The time limit of the proof ended before it was decided."
-						: "The smallest amplitude is closer to zero than one part in 1e25 of the sum of absolute coefficients.";
+						: "The smallest amplitude is closer to zero than 1e-25 of the sum of absolute coefficients.";
 		return new Proof(minimum.verdict(), Frequencies.hertz(minimum.place(), subject.sampleRate()), minimum.least(),
 				0,
 				minimum.least(), note);

@@ -9,7 +9,7 @@ import org.apache.commons.math3.fraction.BigFraction;
 import tapwright.dsp.exact.ExactTaps;
 import tapwright.dsp.exact.Rationals;
 
-/** Brackets the smallest amplitude of symmetric coefficients over a band in double precision. Work space of one thread. */
+/** Brackets the smallest amplitude of symmetric coefficients over a band in doubles. Work space of one thread. */
 final class QuickMinimum {
 
 	private static final int DEEPEST = 14;

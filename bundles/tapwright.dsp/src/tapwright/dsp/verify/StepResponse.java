@@ -22,7 +22,8 @@ final class StepResponse {
 			values[n] = sum;
 		}
 		if (sum.signum() == 0) {
-			throw new IllegalArgumentException("the step response ends at zero, so nothing can be stated relative to its final "
+			throw new IllegalArgumentException("the step response ends at zero, so nothing can be stated relative to its "
+					+ "final "
 					+ "value; step requirements suit filters that pass 0 Hz");
 		}
 		if (sum.signum() < 0) {

@@ -16,7 +16,7 @@ final class GainJudge {
 
 	private static final double[] DISTANCES = { 1e-6, 1e-7, 1e-8, 1e-9, 1e-10, 1e-11, 1e-12 };
 	private static final double WIDEST = 1e-6;
-	/** The oracle's places are good to 1e-45, so a square below this part of the largest possible one counts as zero. */
+	/** The oracle's places are good to 1e-45, so a square below this part of the largest possible one is zero. */
 	private static final BigDecimal NOTHING = new BigDecimal("1e-60");
 
 	private final HardCases cases;
