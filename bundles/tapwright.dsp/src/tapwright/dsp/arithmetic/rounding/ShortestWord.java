@@ -3,9 +3,10 @@ package tapwright.dsp.arithmetic.rounding;
 
 import java.math.BigInteger;
 import java.time.Duration;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.SortedMap;
+import java.util.TreeMap;
 import java.util.function.Predicate;
 
 import tapwright.dsp.Progress;
@@ -86,8 +87,8 @@ public record ShortestWord(ExactTaps ideal, Judge judge, Predicate<ExactTaps> pr
 	}
 
 	/**
-	 * Tries word lengths: first, from the shortest up, nearest steps alone; then, from the word before the first success down,
-	 * all methods, until two lengths in a row fail. That no shorter word could do is not proven.
+	 * Tries word lengths, nearest steps first and then all methods: halves the range as if every word beyond a sufficient one
+	 * sufficed, then goes down until two lengths in a row fail. That no shorter word could do is not proven.
 	 *
 	 * @param shortest
 	 *            bits, at least 2
@@ -102,26 +103,29 @@ public record ShortestWord(ExactTaps ideal, Judge judge, Predicate<ExactTaps> pr
 			throw new IllegalArgumentException("word lengths " + shortest + " to " + longest + "; they must rise from at least 2 to at most "
 					+ NumberFormat.MAX_WORD);
 		}
-		List<Attempt> attempts = new ArrayList<>();
-		int word = shortest;
-		for (boolean done = false; !done && word <= longest; word++) {
-			progress.checkCancelled();
-			progress.report("nearest steps in " + word + " bits", -1);
-			Attempt attempt = nearest(word);
-			done = attempt.proven();
-			if (done) {
-				attempts.add(attempt);
+		SortedMap<Integer, Attempt> attempts = new TreeMap<>();
+		int low = shortest;
+		int high = longest;
+		while (low < high) {
+			int middle = (low + high) / 2;
+			if (attempt(middle, attempts, progress).proven()) {
+				high = middle;
+			} else {
+				low = middle + 1;
 			}
 		}
 		int failures = 0;
-		int next = attempts.isEmpty() ? longest : attempts.get(0).format().word() - 1;
-		for (; next >= shortest && failures < 2; next--) {
-			progress.report("best rounding in " + next + " bits", -1);
-			Attempt attempt = thorough(next, progress);
-			attempts.add(0, attempt);
-			failures = attempt.proven() ? 0 : failures + 1;
+		for (int word = high; word >= shortest && failures < 2; word--) {
+			boolean proven = attempt(word, attempts, progress).proven();
+			failures = proven || word == high ? 0 : failures + 1;
 		}
-		return List.copyOf(attempts);
+		return List.copyOf(attempts.values());
+	}
+
+	private Attempt attempt(int word, SortedMap<Integer, Attempt> known, Progress progress) {
+		progress.checkCancelled();
+		progress.report("coefficients of " + word + " bits", -1);
+		return known.computeIfAbsent(word, bits -> attempt(bits, progress));
 	}
 
 	/** The shortest proven word among attempts. */
@@ -129,19 +133,17 @@ public record ShortestWord(ExactTaps ideal, Judge judge, Predicate<ExactTaps> pr
 		return attempts.stream().filter(Attempt::proven).findFirst();
 	}
 
-	private Attempt nearest(int word) {
-		NumberFormat format = format(ideal, word);
-		ExactTaps taps = format.nearest(ideal);
-		return new Attempt(format, new Rounded(taps, judge.loss(taps), false), proven.test(taps));
-	}
-
-	private Attempt thorough(int word, Progress progress) {
+	private Attempt attempt(int word, Progress progress) {
+		long end = System.nanoTime() + perWord.toNanos();
 		NumberFormat format = format(ideal, word);
 		RoundingTask task = new RoundingTask(ideal, format, judge, bands);
-		Search search = new Search(seed, perWord.dividedBy(methods().size()), progress, rounded -> proven.test(rounded.taps()));
+		List<RoundingMethod> methods = methods();
 		Rounded best = null;
-		for (RoundingMethod method : methods()) {
-			Rounded rounded = method.round(task, search);
+		for (int n = 0; n < methods.size(); n++) {
+			// What the quick methods leave of their share goes to those that come after.
+			long share = Math.max(0, end - System.nanoTime()) / (methods.size() - n);
+			Rounded rounded = methods.get(n).round(task,
+					new Search(seed, Duration.ofNanos(share), progress, found -> proven.test(found.taps())));
 			if (proven.test(rounded.taps())) {
 				return new Attempt(format, rounded, true);
 			}
