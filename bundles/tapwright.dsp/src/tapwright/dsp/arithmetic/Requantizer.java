@@ -37,11 +37,6 @@ public record Requantizer(BigFraction ratio, Rounding rounding, Optional<NumberF
 		return ratio.getDenominator().equals(BigInteger.ONE);
 	}
 
-	/** Whether every number stays as it is, the range aside. */
-	public boolean isIdentity() {
-		return ratio.equals(BigFraction.ONE);
-	}
-
 	/**
 	 * Bits to shift right by (left when negative) for the same effect as the ratio.
 	 *

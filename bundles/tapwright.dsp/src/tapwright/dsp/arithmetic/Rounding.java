@@ -16,11 +16,6 @@ public enum Rounding {
 	/** To the nearest step, ties away from zero. */
 	HALF_AWAY;
 
-	/** Whether the result is always a nearest step. */
-	public boolean isNearest() {
-		return this != TOWARD_ZERO && this != FLOOR;
-	}
-
 	/**
 	 * The integer that numerator / denominator is rounded to, exactly.
 	 *
