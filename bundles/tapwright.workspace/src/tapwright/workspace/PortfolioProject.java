@@ -14,6 +14,7 @@ import tapwright.core.graph.VerifiedFilter;
 import tapwright.core.graph.VerifiedPortfolio;
 import tapwright.core.problem.Problem;
 import tapwright.core.quantity.Expression;
+import tapwright.core.verify.Partners;
 import tapwright.model.io.ModelFiles;
 import tapwright.workspace.internal.EvidenceListeners;
 import tapwright.workspace.internal.FilterFiles;
@@ -67,6 +68,11 @@ public record PortfolioProject(IProject project) {
 	 */
 	public Expression.Names parameters() {
 		return ProjectVerification.of(project).parameters();
+	}
+
+	/** The other filters of the portfolio as they are on disk, for verifying content that is not saved. Reads files when asked. */
+	public Partners partners() {
+		return ProjectVerification.of(project).partners();
 	}
 
 	/** The newest evidence of a filter file; nothing when it was not verified yet or cannot be read. */

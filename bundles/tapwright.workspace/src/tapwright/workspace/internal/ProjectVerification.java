@@ -29,8 +29,10 @@ import tapwright.core.graph.EvidenceStore;
 import tapwright.core.graph.PortfolioVerifier;
 import tapwright.core.graph.VerifiedFilter;
 import tapwright.core.graph.VerifiedPortfolio;
+import tapwright.core.portfolio.FilePartners;
 import tapwright.core.quantity.Expression;
 import tapwright.core.verify.FilterQuestion;
+import tapwright.core.verify.Partners;
 import tapwright.dsp.Progress;
 import tapwright.dsp.verify.Proof;
 import tapwright.model.io.ModelFiles;
@@ -72,6 +74,8 @@ public final class ProjectVerification {
 				return Status.OK_STATUS;
 			} catch (CancellationException e) {
 				return Status.CANCEL_STATUS;
+			} catch (CoreException e) {
+				return e.getStatus();
 			}
 		});
 		loading.setRule(project);
@@ -106,6 +110,11 @@ public final class ProjectVerification {
 	/** The parameters at the last verification, or now when there was none. */
 	public Expression.Names parameters() {
 		return isVerified() ? state().parameters() : verifier.readParameters();
+	}
+
+	/** The filters of the project as they are on disk. */
+	public Partners partners() {
+		return new FilePartners(new ProjectContent(project), parameters());
 	}
 
 	/** Whether a file, or the root file, has other content than at its last verification. */
