@@ -25,7 +25,7 @@ final class EvidenceWords {
 		Proof proof = evidence.proof();
 		var words = new StringBuilder();
 		if (known(proof.value())) {
-			words.append(Words.of(proof.value().middle(), evidence.valueUnit(), digits(proof)));
+			words.append(value(proof, evidence.valueUnit()));
 			if (!Double.isNaN(proof.worst()) && !evidence.placeUnit().isEmpty()) {
 				words.append(" at ").append(Words.of(proof.worst(), evidence.placeUnit(), 5));
 			}
@@ -38,6 +38,18 @@ final class EvidenceWords {
 			words.append(words.isEmpty() ? "" : "; ").append(proof.note());
 		}
 		return words.isEmpty() ? proof.verdict().name().toLowerCase(Locale.ROOT) : words.toString();
+	}
+
+	private static String value(Proof proof, String unit) {
+		Enclosure value = proof.value();
+		if (value.contains(0) && Double.isFinite(value.width())) { // digits of a number that may be zero would say nothing
+			return Words.of(0, unit);
+		}
+		if (Double.isInfinite(value.lo()) && value.hi() > value.lo()) {
+			return "at most " + Words.of(value.hi(), unit, digits(proof));
+		}
+		return Double.isInfinite(value.hi()) ? "at least " + Words.of(value.lo(), unit, digits(proof))
+				: Words.of(value.middle(), unit, digits(proof));
 	}
 
 	private static String distance(RequirementEvidence evidence) {

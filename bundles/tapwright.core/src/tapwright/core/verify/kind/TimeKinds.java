@@ -28,7 +28,7 @@ public final class TimeKinds {
 
 	/** All of them. */
 	public static final List<RequirementKind<?>> ALL = List.of(
-			new PlainKind<>(LinearPhaseRequirement.class, "1", "1",
+			new PlainKind<>(LinearPhaseRequirement.class, "1", "",
 					(linear, numbers) -> new LinearPhase(LinearPhase.Type.valueOf(linear.getType().name())),
 					(linear, numbers) -> "linear phase" + (linear.getType() == PhaseType.ANY ? ""
 							: " of type " + linear.getType().getLiteral())),
