@@ -22,8 +22,7 @@ import tapwright.dsp.exact.Symmetry;
 
 /**
  * Linear-phase design with the least largest weighted error over the bands among all filters that keep further limits (K.
- * Steiglitz, T. W. Parks and J. F. Kaiser, IEEE Transactions on Signal
- * Processing 40(8), 1992).
+ * Steiglitz, T. W. Parks and J. F. Kaiser, IEEE Transactions on Signal Processing 40(8), 1992).
  *
  * @param taps
  *            number of coefficients, at most {@link #LONGEST}

@@ -36,6 +36,8 @@ public record MinimumPhase(double[] prototype) implements Design {
 	/** Lifts above the least one, relative to the largest amplitude, tried in turn. */
 	private static final double[] LIFTS = { 1e-13, 1e-12, 1e-11, 1e-10, 1e-9, 1e-8, 1e-7 };
 	private static final double EXACT = 1e-13;
+	/** The first steps may lead away before the method converges. */
+	private static final int PATIENCE = 4;
 
 	/** Checks the prototype. */
 	public MinimumPhase {
@@ -146,6 +148,7 @@ public record MinimumPhase(double[] prototype) implements Design {
 		double[] best = start;
 		double least = residual(r, start);
 		double[] h = start;
+		int idle = 0;
 		int n = h.length;
 		for (int step = 0; step < NEWTON_STEPS && least > EXACT / 100 * r[0]; step++) {
 			progress.checkCancelled();
@@ -164,11 +167,12 @@ public record MinimumPhase(double[] prototype) implements Design {
 				return best; // judged by its residual: a zero on the circle needs a larger lift
 			}
 			double residual = residual(r, h);
-			if (!(residual < least)) {
+			idle = residual < least ? 0 : idle + 1;
+			if (idle > PATIENCE) {
 				return best;
 			}
-			best = h;
-			least = residual;
+			best = idle == 0 ? h : best;
+			least = Math.min(least, residual);
 		}
 		return best;
 	}

@@ -50,8 +50,8 @@ class SpecialDesignsTest {
 
 	@Test
 	void keepsDeepStopBands() throws DesignException {
-		// The squared gain in the stop-band is a few 1e-12.
-		double[] linear = new Equiripple(115, Symmetry.EVEN, List.of(new Band(0, 0.1, 1, 1), new Band(0.2, 0.5, 0, 1000)))
+		// The squared gain in the stop-band is about 1e-11.
+		double[] linear = new Equiripple(115, Symmetry.EVEN, List.of(new Band(0, 0.1, 1, 1), new Band(0.2, 0.5, 0, 1e5)))
 				.compute(Progress.NONE).taps();
 		double[] h = new MinimumPhase(linear).compute(Progress.NONE).taps();
 		assertEquals(58, h.length);
@@ -60,12 +60,12 @@ class SpecialDesignsTest {
 		for (int i = 0; i <= 3000; i++) {
 			largest = Math.max(largest, gain(h, 0.2 + i * 1e-4));
 		}
-		assertTrue(largest < 3e-6, "about 110 dB and not " + largest);
+		assertTrue(largest < 5e-6, "about 106 dB and not " + largest);
 		double ripple = 0;
 		for (int i = 0; i <= 3000; i++) {
 			ripple = Math.max(ripple, gain(linear, 0.2 + i * 1e-4));
 		}
-		assertTrue(largest <= 1.05 * Math.sqrt(2 * ripple) + 2e-7, largest + " against " + Math.sqrt(2 * ripple));
+		assertTrue(largest <= 1.05 * Math.sqrt(2 * ripple + 1e-11), largest + " against " + Math.sqrt(2 * ripple));
 	}
 
 	@Test
@@ -119,6 +119,32 @@ class SpecialDesignsTest {
 		assertThrows(IllegalArgumentException.class, () -> new Comb(0, true));
 		assertThrows(IllegalArgumentException.class, () -> new HalfBand(30, 0.2, false));
 		assertThrows(IllegalArgumentException.class, () -> new HalfBand(31, 0.25, false));
+	}
+
+	// E. B. Hogenauer (1981), Table I: four sections at a quarter of the decimated rate droop by 3.65 dB when the rate is large.
+	@Test
+	void makesUpForTheDroopOfADecimator() throws DesignException {
+		CicCompensator design = new CicCompensator(31, 4, 1024, 0.25, 0.4, 1);
+		assertEquals(-3.64839033585, 20 * Math.log10(design.gain(0.25)), 1e-4);
+		double[] h = design.compute(Progress.NONE).taps();
+		double worst = 0;
+		for (int i = 0; i <= 2500; i++) {
+			worst = Math.max(worst, Math.abs(gain(h, i * 1e-4) * design.gain(i * 1e-4) - 1));
+		}
+		assertTrue(worst < 0.01, "largest error of the product: " + worst);
+	}
+
+	@Test
+	void complementsAddUpToADelay() throws DesignException {
+		HalfBand low = new HalfBand(31, 0.2, false);
+		double[] h = low.compute(Progress.NONE).taps();
+		double[] g = new Complement(low).compute(Progress.NONE).taps();
+		for (int k = 0; k < 31; k++) {
+			assertEquals(k == 15 ? 1 : 0, h[k] + g[k], 0);
+		}
+		assertThrows(DesignException.class, () -> new Complement(new Binomial(3)).compute(Progress.NONE));
+		assertThrows(IllegalArgumentException.class, () -> new CicCompensator(31, 0, 8, 0.2, 0.3, 1));
+		assertThrows(IllegalArgumentException.class, () -> new CicCompensator(31, 4, 8, 0.3, 0.2, 1));
 	}
 
 	private static double gain(double[] h, double f) {
