@@ -2,7 +2,6 @@
 package tapwright.workspace.internal;
 
 import java.io.IOException;
-import java.nio.file.Path;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Set;
