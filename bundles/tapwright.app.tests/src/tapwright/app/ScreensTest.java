@@ -74,7 +74,7 @@ class ScreensTest {
 		page.showView(IPageLayout.ID_PROBLEM_VIEW);
 		var editor = (FilterEditor) IDE.openEditor(page, project.getFile("strain-antialias.filter"));
 		Waiting.until("its proof", () -> editor.proof().latest().filter(proven -> !proven.stale()).isPresent());
-		for (String id : List.of("filter", "requirements", "coefficients")) {
+		for (String id : List.of("filter", "requirements", "coefficients", "arithmetic")) {
 			editor.setActivePage(id);
 			picture(name + "-" + id);
 		}

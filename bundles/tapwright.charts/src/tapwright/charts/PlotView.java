@@ -84,6 +84,7 @@ public final class PlotView extends Composite {
 		JFaceResources.getColorRegistry().addListener(themeListener);
 		addDisposeListener(event -> JFaceResources.getColorRegistry().removeListener(themeListener));
 		applyColors();
+		rebuild();
 	}
 
 	private void describeForScreenReaders() {

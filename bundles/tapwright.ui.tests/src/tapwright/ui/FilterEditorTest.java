@@ -163,7 +163,7 @@ class FilterEditorTest {
 		try {
 			for (int round = 0; round < 5; round++) {
 				FilterEditor editor = open();
-				for (String page : List.of("filter", "requirements", "coefficients", "evidence")) {
+				for (String page : List.of("filter", "requirements", "coefficients", "arithmetic", "evidence")) {
 					editor.setActivePage(page);
 					assertTrue(((Composite) container(editor)).getChildren().length > 0, page);
 				}

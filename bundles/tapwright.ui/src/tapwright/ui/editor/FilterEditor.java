@@ -46,7 +46,8 @@ public final class FilterEditor extends ModelEditor<Filter> implements IGotoMark
 
 	@Override
 	List<? extends FormPage> createModelPages() {
-		pages = List.of(new FilterPage(this), new RequirementsPage(this), new CoefficientsPage(this), new EvidencePage(this));
+		pages = List.of(new FilterPage(this), new RequirementsPage(this), new CoefficientsPage(this), new ArithmeticPage(this),
+				new EvidencePage(this));
 		return pages;
 	}
 
