@@ -15,6 +15,7 @@ import org.eclipse.ui.application.WorkbenchAdvisor;
 import org.eclipse.ui.application.WorkbenchWindowAdvisor;
 import org.eclipse.ui.ide.IDE;
 
+import tapwright.ui.start.FirstStart;
 import tapwright.ui.look.Icons;
 
 /** What the workbench of the product starts with. */

@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: EPL-2.0
-package tapwright.app;
+package tapwright.ui.start;
 
 import java.io.IOException;
 import java.nio.file.Files;
@@ -37,11 +37,17 @@ import tapwright.workspace.PortfolioNature;
 import tapwright.workspace.PortfolioProject;
 
 /** Brings the portfolios of a folder into the workspace, in place, and opens the first filter with a problem when they are new. */
-final class FirstStart extends WorkspaceJob {
+public final class FirstStart extends WorkspaceJob {
 
 	private final Path folder;
 
-	FirstStart(Path folder) {
+	/**
+	 * A job that is still to be scheduled.
+	 *
+	 * @param folder
+	 *            holds a portfolio, or folders that do
+	 */
+	public FirstStart(Path folder) {
 		super("Opening the portfolios in " + folder.getFileName());
 		this.folder = folder;
 		setRule(ResourcesPlugin.getWorkspace().getRoot());
