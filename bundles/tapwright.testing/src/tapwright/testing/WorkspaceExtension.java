@@ -6,7 +6,6 @@ import java.util.UUID;
 import org.eclipse.core.resources.IFile;
 import org.eclipse.core.resources.IFolder;
 import org.eclipse.core.resources.IProject;
-import org.eclipse.core.resources.IProjectDescription;
 import org.eclipse.core.resources.IResource;
 import org.eclipse.core.resources.IWorkspace;
 import org.eclipse.core.resources.IWorkspaceDescription;
@@ -48,10 +47,9 @@ public final class WorkspaceExtension implements BeforeEachCallback, AfterEachCa
 	/** A new, open portfolio project without files. */
 	public IProject portfolioProject() throws CoreException {
 		IProject project = workspace.getRoot().getProject("marram-" + UUID.randomUUID());
-		IProjectDescription description = workspace.newProjectDescription(project.getName());
-		description.setNatureIds(new String[] { PortfolioNature.ID });
-		project.create(description, null);
+		project.create(null);
 		project.open(null);
+		PortfolioNature.addTo(project, null);
 		return project;
 	}
 
