@@ -402,6 +402,78 @@ public interface ModelFactory extends EFactory {
 	RaisedCosineDesign createRaisedCosineDesign();
 
 	/**
+	 * Returns a new object of class '<em>Least Squares Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Least Squares Design</em>'.
+	 * @generated
+	 */
+	LeastSquaresDesign createLeastSquaresDesign();
+
+	/**
+	 * Returns a new object of class '<em>Constrained Least Squares Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Constrained Least Squares Design</em>'.
+	 * @generated
+	 */
+	ConstrainedLeastSquaresDesign createConstrainedLeastSquaresDesign();
+
+	/**
+	 * Returns a new object of class '<em>Linear Program Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Linear Program Design</em>'.
+	 * @generated
+	 */
+	LinearProgramDesign createLinearProgramDesign();
+
+	/**
+	 * Returns a new object of class '<em>Half Band Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Half Band Design</em>'.
+	 * @generated
+	 */
+	HalfBandDesign createHalfBandDesign();
+
+	/**
+	 * Returns a new object of class '<em>Cic Compensator Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Cic Compensator Design</em>'.
+	 * @generated
+	 */
+	CicCompensatorDesign createCicCompensatorDesign();
+
+	/**
+	 * Returns a new object of class '<em>Comb Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Comb Design</em>'.
+	 * @generated
+	 */
+	CombDesign createCombDesign();
+
+	/**
+	 * Returns a new object of class '<em>Minimum Phase Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Minimum Phase Design</em>'.
+	 * @generated
+	 */
+	MinimumPhaseDesign createMinimumPhaseDesign();
+
+	/**
+	 * Returns a new object of class '<em>Complement Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return a new object of class '<em>Complement Design</em>'.
+	 * @generated
+	 */
+	ComplementDesign createComplementDesign();
+
+	/**
 	 * Returns a new object of class '<em>Real Coefficients</em>'.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->

@@ -2809,6 +2809,356 @@ public interface ModelPackage extends EPackage {
 	int RAISED_COSINE_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 5;
 
 	/**
+	 * The meta object id for the '{@link tapwright.model.impl.LeastSquaresDesignImpl <em>Least Squares Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.LeastSquaresDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getLeastSquaresDesign()
+	 * @generated
+	 */
+	int LEAST_SQUARES_DESIGN = 46;
+
+	/**
+	 * The feature id for the '<em><b>Taps</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LEAST_SQUARES_DESIGN__TAPS = BAND_DESIGN__TAPS;
+
+	/**
+	 * The feature id for the '<em><b>Bands</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LEAST_SQUARES_DESIGN__BANDS = BAND_DESIGN__BANDS;
+
+	/**
+	 * The feature id for the '<em><b>Type</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LEAST_SQUARES_DESIGN__TYPE = BAND_DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The number of structural features of the '<em>Least Squares Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LEAST_SQUARES_DESIGN_FEATURE_COUNT = BAND_DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.ConstrainedLeastSquaresDesignImpl <em>Constrained Least Squares Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.ConstrainedLeastSquaresDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getConstrainedLeastSquaresDesign()
+	 * @generated
+	 */
+	int CONSTRAINED_LEAST_SQUARES_DESIGN = 47;
+
+	/**
+	 * The feature id for the '<em><b>Taps</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONSTRAINED_LEAST_SQUARES_DESIGN__TAPS = BAND_DESIGN__TAPS;
+
+	/**
+	 * The feature id for the '<em><b>Bands</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONSTRAINED_LEAST_SQUARES_DESIGN__BANDS = BAND_DESIGN__BANDS;
+
+	/**
+	 * The feature id for the '<em><b>Type</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONSTRAINED_LEAST_SQUARES_DESIGN__TYPE = BAND_DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The number of structural features of the '<em>Constrained Least Squares Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CONSTRAINED_LEAST_SQUARES_DESIGN_FEATURE_COUNT = BAND_DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.LinearProgramDesignImpl <em>Linear Program Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.LinearProgramDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getLinearProgramDesign()
+	 * @generated
+	 */
+	int LINEAR_PROGRAM_DESIGN = 48;
+
+	/**
+	 * The feature id for the '<em><b>Taps</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LINEAR_PROGRAM_DESIGN__TAPS = BAND_DESIGN__TAPS;
+
+	/**
+	 * The feature id for the '<em><b>Bands</b></em>' containment reference list.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LINEAR_PROGRAM_DESIGN__BANDS = BAND_DESIGN__BANDS;
+
+	/**
+	 * The feature id for the '<em><b>Monotone</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LINEAR_PROGRAM_DESIGN__MONOTONE = BAND_DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The number of structural features of the '<em>Linear Program Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int LINEAR_PROGRAM_DESIGN_FEATURE_COUNT = BAND_DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.HalfBandDesignImpl <em>Half Band Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.HalfBandDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getHalfBandDesign()
+	 * @generated
+	 */
+	int HALF_BAND_DESIGN = 49;
+
+	/**
+	 * The feature id for the '<em><b>Taps</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int HALF_BAND_DESIGN__TAPS = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Pass Edge</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int HALF_BAND_DESIGN__PASS_EDGE = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Hilbert</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int HALF_BAND_DESIGN__HILBERT = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The number of structural features of the '<em>Half Band Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int HALF_BAND_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 3;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.CicCompensatorDesignImpl <em>Cic Compensator Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.CicCompensatorDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getCicCompensatorDesign()
+	 * @generated
+	 */
+	int CIC_COMPENSATOR_DESIGN = 50;
+
+	/**
+	 * The feature id for the '<em><b>Taps</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN__TAPS = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Sections</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN__SECTIONS = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The feature id for the '<em><b>Rate</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN__RATE = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The feature id for the '<em><b>Pass Edge</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN__PASS_EDGE = DESIGN_FEATURE_COUNT + 3;
+
+	/**
+	 * The feature id for the '<em><b>Stop Edge</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN__STOP_EDGE = DESIGN_FEATURE_COUNT + 4;
+
+	/**
+	 * The feature id for the '<em><b>Stop Weight</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN__STOP_WEIGHT = DESIGN_FEATURE_COUNT + 5;
+
+	/**
+	 * The number of structural features of the '<em>Cic Compensator Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int CIC_COMPENSATOR_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 6;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.CombDesignImpl <em>Comb Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.CombDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getCombDesign()
+	 * @generated
+	 */
+	int COMB_DESIGN = 51;
+
+	/**
+	 * The feature id for the '<em><b>Period</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int COMB_DESIGN__PERIOD = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The feature id for the '<em><b>Difference</b></em>' attribute.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int COMB_DESIGN__DIFFERENCE = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The number of structural features of the '<em>Comb Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int COMB_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 2;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.MinimumPhaseDesignImpl <em>Minimum Phase Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.MinimumPhaseDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getMinimumPhaseDesign()
+	 * @generated
+	 */
+	int MINIMUM_PHASE_DESIGN = 52;
+
+	/**
+	 * The feature id for the '<em><b>Prototype</b></em>' containment reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MINIMUM_PHASE_DESIGN__PROTOTYPE = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The number of structural features of the '<em>Minimum Phase Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int MINIMUM_PHASE_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 1;
+
+	/**
+	 * The meta object id for the '{@link tapwright.model.impl.ComplementDesignImpl <em>Complement Design</em>}' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see tapwright.model.impl.ComplementDesignImpl
+	 * @see tapwright.model.impl.ModelPackageImpl#getComplementDesign()
+	 * @generated
+	 */
+	int COMPLEMENT_DESIGN = 53;
+
+	/**
+	 * The feature id for the '<em><b>Prototype</b></em>' containment reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int COMPLEMENT_DESIGN__PROTOTYPE = DESIGN_FEATURE_COUNT + 0;
+
+	/**
+	 * The number of structural features of the '<em>Complement Design</em>' class.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 * @ordered
+	 */
+	int COMPLEMENT_DESIGN_FEATURE_COUNT = DESIGN_FEATURE_COUNT + 1;
+
+	/**
 	 * The meta object id for the '{@link tapwright.model.impl.CoefficientsImpl <em>Coefficients</em>}' class.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -2816,7 +3166,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getCoefficients()
 	 * @generated
 	 */
-	int COEFFICIENTS = 46;
+	int COEFFICIENTS = 54;
 
 	/**
 	 * The feature id for the '<em><b>Design Hash</b></em>' attribute.
@@ -2844,7 +3194,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getRealCoefficients()
 	 * @generated
 	 */
-	int REAL_COEFFICIENTS = 47;
+	int REAL_COEFFICIENTS = 55;
 
 	/**
 	 * The feature id for the '<em><b>Design Hash</b></em>' attribute.
@@ -2881,7 +3231,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getIntegerCoefficients()
 	 * @generated
 	 */
-	int INTEGER_COEFFICIENTS = 48;
+	int INTEGER_COEFFICIENTS = 56;
 
 	/**
 	 * The feature id for the '<em><b>Design Hash</b></em>' attribute.
@@ -2927,7 +3277,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getArithmetic()
 	 * @generated
 	 */
-	int ARITHMETIC = 49;
+	int ARITHMETIC = 57;
 
 	/**
 	 * The feature id for the '<em><b>Structure</b></em>' attribute.
@@ -3027,7 +3377,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getFormat()
 	 * @generated
 	 */
-	int FORMAT = 50;
+	int FORMAT = 58;
 
 	/**
 	 * The feature id for the '<em><b>Word</b></em>' attribute.
@@ -3073,7 +3423,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getEvidence()
 	 * @generated
 	 */
-	int EVIDENCE = 51;
+	int EVIDENCE = 59;
 
 	/**
 	 * The feature id for the '<em><b>Tool</b></em>' attribute.
@@ -3119,7 +3469,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getResult()
 	 * @generated
 	 */
-	int RESULT = 52;
+	int RESULT = 60;
 
 	/**
 	 * The feature id for the '<em><b>Requirement</b></em>' attribute.
@@ -3219,7 +3569,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getRevision()
 	 * @generated
 	 */
-	int REVISION = 53;
+	int REVISION = 61;
 
 	/**
 	 * The feature id for the '<em><b>Parents</b></em>' attribute list.
@@ -3310,7 +3660,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getBaseline()
 	 * @generated
 	 */
-	int BASELINE = 54;
+	int BASELINE = 62;
 
 	/**
 	 * The feature id for the '<em><b>Name</b></em>' attribute.
@@ -3383,7 +3733,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getBaselineEntry()
 	 * @generated
 	 */
-	int BASELINE_ENTRY = 55;
+	int BASELINE_ENTRY = 63;
 
 	/**
 	 * The feature id for the '<em><b>Filter</b></em>' attribute.
@@ -3429,7 +3779,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getSignOff()
 	 * @generated
 	 */
-	int SIGN_OFF = 56;
+	int SIGN_OFF = 64;
 
 	/**
 	 * The feature id for the '<em><b>Filter</b></em>' attribute.
@@ -3511,7 +3861,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getSeverity()
 	 * @generated
 	 */
-	int SEVERITY = 57;
+	int SEVERITY = 65;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Unit <em>Unit</em>}' enum.
@@ -3521,7 +3871,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getUnit()
 	 * @generated
 	 */
-	int UNIT = 58;
+	int UNIT = 66;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Side <em>Side</em>}' enum.
@@ -3531,7 +3881,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getSide()
 	 * @generated
 	 */
-	int SIDE = 59;
+	int SIDE = 67;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Interpolation <em>Interpolation</em>}' enum.
@@ -3541,7 +3891,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getInterpolation()
 	 * @generated
 	 */
-	int INTERPOLATION = 60;
+	int INTERPOLATION = 68;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.PhaseType <em>Phase Type</em>}' enum.
@@ -3551,7 +3901,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getPhaseType()
 	 * @generated
 	 */
-	int PHASE_TYPE = 61;
+	int PHASE_TYPE = 69;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.InputClass <em>Input Class</em>}' enum.
@@ -3561,7 +3911,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getInputClass()
 	 * @generated
 	 */
-	int INPUT_CLASS = 62;
+	int INPUT_CLASS = 70;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Structure <em>Structure</em>}' enum.
@@ -3571,7 +3921,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getStructure()
 	 * @generated
 	 */
-	int STRUCTURE = 63;
+	int STRUCTURE = 71;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Rounding <em>Rounding</em>}' enum.
@@ -3581,7 +3931,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getRounding()
 	 * @generated
 	 */
-	int ROUNDING = 64;
+	int ROUNDING = 72;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Overflow <em>Overflow</em>}' enum.
@@ -3591,7 +3941,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getOverflow()
 	 * @generated
 	 */
-	int OVERFLOW = 65;
+	int OVERFLOW = 73;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Verdict <em>Verdict</em>}' enum.
@@ -3601,7 +3951,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getVerdict()
 	 * @generated
 	 */
-	int VERDICT = 66;
+	int VERDICT = 74;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.Decision <em>Decision</em>}' enum.
@@ -3611,7 +3961,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getDecision()
 	 * @generated
 	 */
-	int DECISION = 67;
+	int DECISION = 75;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.WindowKind <em>Window Kind</em>}' enum.
@@ -3621,7 +3971,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getWindowKind()
 	 * @generated
 	 */
-	int WINDOW_KIND = 68;
+	int WINDOW_KIND = 76;
 
 	/**
 	 * The meta object id for the '{@link tapwright.model.PulseGain <em>Pulse Gain</em>}' enum.
@@ -3631,7 +3981,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getPulseGain()
 	 * @generated
 	 */
-	int PULSE_GAIN = 69;
+	int PULSE_GAIN = 77;
 
 	/**
 	 * The meta object id for the '<em>Quantity</em>' data type.
@@ -3641,7 +3991,7 @@ public interface ModelPackage extends EPackage {
 	 * @see tapwright.model.impl.ModelPackageImpl#getQuantity()
 	 * @generated
 	 */
-	int QUANTITY = 70;
+	int QUANTITY = 78;
 
 
 	/**
@@ -5379,6 +5729,262 @@ public interface ModelPackage extends EPackage {
 	 * @generated
 	 */
 	EAttribute getRaisedCosineDesign_Gain();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.LeastSquaresDesign <em>Least Squares Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Least Squares Design</em>'.
+	 * @see tapwright.model.LeastSquaresDesign
+	 * @generated
+	 */
+	EClass getLeastSquaresDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.LeastSquaresDesign#getType <em>Type</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Type</em>'.
+	 * @see tapwright.model.LeastSquaresDesign#getType()
+	 * @see #getLeastSquaresDesign()
+	 * @generated
+	 */
+	EAttribute getLeastSquaresDesign_Type();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.ConstrainedLeastSquaresDesign <em>Constrained Least Squares Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Constrained Least Squares Design</em>'.
+	 * @see tapwright.model.ConstrainedLeastSquaresDesign
+	 * @generated
+	 */
+	EClass getConstrainedLeastSquaresDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.ConstrainedLeastSquaresDesign#getType <em>Type</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Type</em>'.
+	 * @see tapwright.model.ConstrainedLeastSquaresDesign#getType()
+	 * @see #getConstrainedLeastSquaresDesign()
+	 * @generated
+	 */
+	EAttribute getConstrainedLeastSquaresDesign_Type();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.LinearProgramDesign <em>Linear Program Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Linear Program Design</em>'.
+	 * @see tapwright.model.LinearProgramDesign
+	 * @generated
+	 */
+	EClass getLinearProgramDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.LinearProgramDesign#isMonotone <em>Monotone</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Monotone</em>'.
+	 * @see tapwright.model.LinearProgramDesign#isMonotone()
+	 * @see #getLinearProgramDesign()
+	 * @generated
+	 */
+	EAttribute getLinearProgramDesign_Monotone();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.HalfBandDesign <em>Half Band Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Half Band Design</em>'.
+	 * @see tapwright.model.HalfBandDesign
+	 * @generated
+	 */
+	EClass getHalfBandDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.HalfBandDesign#getTaps <em>Taps</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Taps</em>'.
+	 * @see tapwright.model.HalfBandDesign#getTaps()
+	 * @see #getHalfBandDesign()
+	 * @generated
+	 */
+	EAttribute getHalfBandDesign_Taps();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.HalfBandDesign#getPassEdge <em>Pass Edge</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Pass Edge</em>'.
+	 * @see tapwright.model.HalfBandDesign#getPassEdge()
+	 * @see #getHalfBandDesign()
+	 * @generated
+	 */
+	EAttribute getHalfBandDesign_PassEdge();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.HalfBandDesign#isHilbert <em>Hilbert</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Hilbert</em>'.
+	 * @see tapwright.model.HalfBandDesign#isHilbert()
+	 * @see #getHalfBandDesign()
+	 * @generated
+	 */
+	EAttribute getHalfBandDesign_Hilbert();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.CicCompensatorDesign <em>Cic Compensator Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Cic Compensator Design</em>'.
+	 * @see tapwright.model.CicCompensatorDesign
+	 * @generated
+	 */
+	EClass getCicCompensatorDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CicCompensatorDesign#getTaps <em>Taps</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Taps</em>'.
+	 * @see tapwright.model.CicCompensatorDesign#getTaps()
+	 * @see #getCicCompensatorDesign()
+	 * @generated
+	 */
+	EAttribute getCicCompensatorDesign_Taps();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CicCompensatorDesign#getSections <em>Sections</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Sections</em>'.
+	 * @see tapwright.model.CicCompensatorDesign#getSections()
+	 * @see #getCicCompensatorDesign()
+	 * @generated
+	 */
+	EAttribute getCicCompensatorDesign_Sections();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CicCompensatorDesign#getRate <em>Rate</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Rate</em>'.
+	 * @see tapwright.model.CicCompensatorDesign#getRate()
+	 * @see #getCicCompensatorDesign()
+	 * @generated
+	 */
+	EAttribute getCicCompensatorDesign_Rate();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CicCompensatorDesign#getPassEdge <em>Pass Edge</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Pass Edge</em>'.
+	 * @see tapwright.model.CicCompensatorDesign#getPassEdge()
+	 * @see #getCicCompensatorDesign()
+	 * @generated
+	 */
+	EAttribute getCicCompensatorDesign_PassEdge();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CicCompensatorDesign#getStopEdge <em>Stop Edge</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Stop Edge</em>'.
+	 * @see tapwright.model.CicCompensatorDesign#getStopEdge()
+	 * @see #getCicCompensatorDesign()
+	 * @generated
+	 */
+	EAttribute getCicCompensatorDesign_StopEdge();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CicCompensatorDesign#getStopWeight <em>Stop Weight</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Stop Weight</em>'.
+	 * @see tapwright.model.CicCompensatorDesign#getStopWeight()
+	 * @see #getCicCompensatorDesign()
+	 * @generated
+	 */
+	EAttribute getCicCompensatorDesign_StopWeight();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.CombDesign <em>Comb Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Comb Design</em>'.
+	 * @see tapwright.model.CombDesign
+	 * @generated
+	 */
+	EClass getCombDesign();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CombDesign#getPeriod <em>Period</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Period</em>'.
+	 * @see tapwright.model.CombDesign#getPeriod()
+	 * @see #getCombDesign()
+	 * @generated
+	 */
+	EAttribute getCombDesign_Period();
+
+	/**
+	 * Returns the meta object for the attribute '{@link tapwright.model.CombDesign#isDifference <em>Difference</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the attribute '<em>Difference</em>'.
+	 * @see tapwright.model.CombDesign#isDifference()
+	 * @see #getCombDesign()
+	 * @generated
+	 */
+	EAttribute getCombDesign_Difference();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.MinimumPhaseDesign <em>Minimum Phase Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Minimum Phase Design</em>'.
+	 * @see tapwright.model.MinimumPhaseDesign
+	 * @generated
+	 */
+	EClass getMinimumPhaseDesign();
+
+	/**
+	 * Returns the meta object for the containment reference '{@link tapwright.model.MinimumPhaseDesign#getPrototype <em>Prototype</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference '<em>Prototype</em>'.
+	 * @see tapwright.model.MinimumPhaseDesign#getPrototype()
+	 * @see #getMinimumPhaseDesign()
+	 * @generated
+	 */
+	EReference getMinimumPhaseDesign_Prototype();
+
+	/**
+	 * Returns the meta object for class '{@link tapwright.model.ComplementDesign <em>Complement Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for class '<em>Complement Design</em>'.
+	 * @see tapwright.model.ComplementDesign
+	 * @generated
+	 */
+	EClass getComplementDesign();
+
+	/**
+	 * Returns the meta object for the containment reference '{@link tapwright.model.ComplementDesign#getPrototype <em>Prototype</em>}'.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @return the meta object for the containment reference '<em>Prototype</em>'.
+	 * @see tapwright.model.ComplementDesign#getPrototype()
+	 * @see #getComplementDesign()
+	 * @generated
+	 */
+	EReference getComplementDesign_Prototype();
 
 	/**
 	 * Returns the meta object for class '{@link tapwright.model.Coefficients <em>Coefficients</em>}'.
@@ -7615,6 +8221,214 @@ public interface ModelPackage extends EPackage {
 		 * @generated
 		 */
 		EAttribute RAISED_COSINE_DESIGN__GAIN = eINSTANCE.getRaisedCosineDesign_Gain();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.LeastSquaresDesignImpl <em>Least Squares Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.LeastSquaresDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getLeastSquaresDesign()
+		 * @generated
+		 */
+		EClass LEAST_SQUARES_DESIGN = eINSTANCE.getLeastSquaresDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Type</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute LEAST_SQUARES_DESIGN__TYPE = eINSTANCE.getLeastSquaresDesign_Type();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.ConstrainedLeastSquaresDesignImpl <em>Constrained Least Squares Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.ConstrainedLeastSquaresDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getConstrainedLeastSquaresDesign()
+		 * @generated
+		 */
+		EClass CONSTRAINED_LEAST_SQUARES_DESIGN = eINSTANCE.getConstrainedLeastSquaresDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Type</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CONSTRAINED_LEAST_SQUARES_DESIGN__TYPE = eINSTANCE.getConstrainedLeastSquaresDesign_Type();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.LinearProgramDesignImpl <em>Linear Program Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.LinearProgramDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getLinearProgramDesign()
+		 * @generated
+		 */
+		EClass LINEAR_PROGRAM_DESIGN = eINSTANCE.getLinearProgramDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Monotone</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute LINEAR_PROGRAM_DESIGN__MONOTONE = eINSTANCE.getLinearProgramDesign_Monotone();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.HalfBandDesignImpl <em>Half Band Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.HalfBandDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getHalfBandDesign()
+		 * @generated
+		 */
+		EClass HALF_BAND_DESIGN = eINSTANCE.getHalfBandDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Taps</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute HALF_BAND_DESIGN__TAPS = eINSTANCE.getHalfBandDesign_Taps();
+
+		/**
+		 * The meta object literal for the '<em><b>Pass Edge</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute HALF_BAND_DESIGN__PASS_EDGE = eINSTANCE.getHalfBandDesign_PassEdge();
+
+		/**
+		 * The meta object literal for the '<em><b>Hilbert</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute HALF_BAND_DESIGN__HILBERT = eINSTANCE.getHalfBandDesign_Hilbert();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.CicCompensatorDesignImpl <em>Cic Compensator Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.CicCompensatorDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getCicCompensatorDesign()
+		 * @generated
+		 */
+		EClass CIC_COMPENSATOR_DESIGN = eINSTANCE.getCicCompensatorDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Taps</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CIC_COMPENSATOR_DESIGN__TAPS = eINSTANCE.getCicCompensatorDesign_Taps();
+
+		/**
+		 * The meta object literal for the '<em><b>Sections</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CIC_COMPENSATOR_DESIGN__SECTIONS = eINSTANCE.getCicCompensatorDesign_Sections();
+
+		/**
+		 * The meta object literal for the '<em><b>Rate</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CIC_COMPENSATOR_DESIGN__RATE = eINSTANCE.getCicCompensatorDesign_Rate();
+
+		/**
+		 * The meta object literal for the '<em><b>Pass Edge</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CIC_COMPENSATOR_DESIGN__PASS_EDGE = eINSTANCE.getCicCompensatorDesign_PassEdge();
+
+		/**
+		 * The meta object literal for the '<em><b>Stop Edge</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CIC_COMPENSATOR_DESIGN__STOP_EDGE = eINSTANCE.getCicCompensatorDesign_StopEdge();
+
+		/**
+		 * The meta object literal for the '<em><b>Stop Weight</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute CIC_COMPENSATOR_DESIGN__STOP_WEIGHT = eINSTANCE.getCicCompensatorDesign_StopWeight();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.CombDesignImpl <em>Comb Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.CombDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getCombDesign()
+		 * @generated
+		 */
+		EClass COMB_DESIGN = eINSTANCE.getCombDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Period</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute COMB_DESIGN__PERIOD = eINSTANCE.getCombDesign_Period();
+
+		/**
+		 * The meta object literal for the '<em><b>Difference</b></em>' attribute feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EAttribute COMB_DESIGN__DIFFERENCE = eINSTANCE.getCombDesign_Difference();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.MinimumPhaseDesignImpl <em>Minimum Phase Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.MinimumPhaseDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getMinimumPhaseDesign()
+		 * @generated
+		 */
+		EClass MINIMUM_PHASE_DESIGN = eINSTANCE.getMinimumPhaseDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Prototype</b></em>' containment reference feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference MINIMUM_PHASE_DESIGN__PROTOTYPE = eINSTANCE.getMinimumPhaseDesign_Prototype();
+
+		/**
+		 * The meta object literal for the '{@link tapwright.model.impl.ComplementDesignImpl <em>Complement Design</em>}' class.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @see tapwright.model.impl.ComplementDesignImpl
+		 * @see tapwright.model.impl.ModelPackageImpl#getComplementDesign()
+		 * @generated
+		 */
+		EClass COMPLEMENT_DESIGN = eINSTANCE.getComplementDesign();
+
+		/**
+		 * The meta object literal for the '<em><b>Prototype</b></em>' containment reference feature.
+		 * <!-- begin-user-doc -->
+		 * <!-- end-user-doc -->
+		 * @generated
+		 */
+		EReference COMPLEMENT_DESIGN__PROTOTYPE = eINSTANCE.getComplementDesign_Prototype();
 
 		/**
 		 * The meta object literal for the '{@link tapwright.model.impl.CoefficientsImpl <em>Coefficients</em>}' class.

@@ -9,6 +9,8 @@ import java.util.Optional;
 import tapwright.core.InputException;
 import tapwright.core.design.kind.ClosedFormKinds;
 import tapwright.core.design.kind.EquirippleDesignKind;
+import tapwright.core.design.kind.OptimalKinds;
+import tapwright.core.design.kind.SpecialKinds;
 import tapwright.core.design.kind.WindowDesignKind;
 import tapwright.model.Design;
 import tapwright.model.GivenDesign;
@@ -21,6 +23,8 @@ public final class DesignKinds {
 	static {
 		register(List.of(new WindowDesignKind(), new EquirippleDesignKind()));
 		register(ClosedFormKinds.ALL);
+		register(OptimalKinds.ALL);
+		register(SpecialKinds.ALL);
 	}
 
 	private DesignKinds() {

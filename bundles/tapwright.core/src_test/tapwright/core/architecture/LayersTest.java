@@ -28,9 +28,9 @@ class LayersTest {
 			Map.entry("tapwright.ui", Set.of("tapwright.workspace", "tapwright.model.edit", "tapwright.charts")),
 			Map.entry("tapwright.app", Set.of("tapwright.ui")),
 			Map.entry("tapwright.testing", Set.of("tapwright.workspace")),
-			Map.entry("tapwright.workspace.tests", Set.of("tapwright.workspace", "tapwright.testing")),
-			Map.entry("tapwright.ui.tests", Set.of("tapwright.ui", "tapwright.testing")),
-			Map.entry("tapwright.app.tests", Set.of("tapwright.app", "tapwright.testing")));
+			Map.entry("tapwright.workspace.tests", Set.of("tapwright.core", "tapwright.workspace", "tapwright.testing")),
+			Map.entry("tapwright.ui.tests", Set.of("tapwright.workspace", "tapwright.charts", "tapwright.ui", "tapwright.testing")),
+			Map.entry("tapwright.app.tests", Set.of("tapwright.workspace", "tapwright.charts", "tapwright.ui", "tapwright.app", "tapwright.testing")));
 
 	private static final List<String> HEADLESS = List.of("tapwright.dsp", "tapwright.model", "tapwright.core",
 			"tapwright.cli");

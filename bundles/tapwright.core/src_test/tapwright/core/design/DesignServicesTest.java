@@ -13,6 +13,8 @@ import java.util.List;
 import org.eclipse.emf.ecore.EClass;
 import org.eclipse.emf.ecore.util.EcoreUtil;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 
 import tapwright.core.InputException;
 import tapwright.core.interchange.FilterJson;
@@ -49,6 +51,28 @@ class DesignServicesTest {
 				assertFalse(e.getMessage().isBlank()); // a missing parameter is fine here, an unknown method is not
 			}
 		}
+	}
+
+	@ParameterizedTest
+	@CsvSource(delimiter = '|', value = {
+			"'method': 'least-squares', 'taps': 61 | {'id': 'null', 'kind': 'null', 'at': 12000}",
+			"'method': 'constrained-least-squares', 'taps': 61 | {'id': 'null', 'kind': 'null', 'at': 12000}",
+			"'method': 'linear-program', 'taps': 55 | {'id': 'step', 'kind': 'step-overshoot', 'max': 9.5}",
+			"'method': 'linear-program', 'taps': 61, 'monotone': true | {'id': 'null', 'kind': 'null', 'at': 12000}",
+			"'method': 'window', 'taps': 75 | {'id': 'type', 'kind': 'linear-phase', 'type': 'I'}",
+			"'method': 'minimum-phase', 'prototype': {'method': 'equiripple', 'taps': 111, 'bands': [{'from': 0, 'to': 6000, 'desired': 1}, {'from': 9000, 'to': 24000, 'desired': 0, 'weight': 1000}]} | {'id': 'delay', 'kind': 'group-delay', 'from': 0, 'to': 3000, 'max': '0.5 ms'}" })
+	void runsEveryMethodUntilTheRequirementsAreMet(String design, String more) throws Exception {
+		Filter filter = FilterJson.read(LOW_PASS
+				.replace("\"method\": \"equiripple\", \"taps\": 55", design.replace('\'', '"'))
+				.replace("\"max\": 1}]", "\"max\": 1}, " + more.replace('\'', '"') + "]"));
+		Designer designer = Designer.of(filter, Expression.Names.NONE).orElseThrow();
+		filter.setCoefficients(designer.run(Progress.NONE).coefficients());
+		var evidence = FilterQuestion.of(filter, Expression.Names.NONE).answer(Effort.STANDARD);
+		evidence.requirements().stream().filter(each -> !each.id().equals("null"))
+				.forEach(each -> assertEquals(Verdict.MET, each.proof().verdict(), each.message()));
+		// A null in double precision is as deep as the coefficients allow, not exact.
+		evidence.find("null").ifPresent(each -> assertTrue(each.proof().value().hi() < 1e-14, each.message()));
+		assertEquals(designer.hash(), Designer.of(filter, Expression.Names.NONE).orElseThrow().hash());
 	}
 
 	@Test

@@ -417,6 +417,46 @@ public class FilterItemProvider
 
 		newChildDescriptors.add
 			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createLeastSquaresDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createConstrainedLeastSquaresDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createLinearProgramDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createHalfBandDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createCicCompensatorDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createCombDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createMinimumPhaseDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
+				(ModelPackage.Literals.FILTER__DESIGN,
+				 ModelFactory.eINSTANCE.createComplementDesign()));
+
+		newChildDescriptors.add
+			(createChildParameter
 				(ModelPackage.Literals.FILTER__COEFFICIENTS,
 				 ModelFactory.eINSTANCE.createRealCoefficients()));
 

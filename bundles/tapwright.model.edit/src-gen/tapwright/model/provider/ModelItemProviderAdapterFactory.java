@@ -1040,6 +1040,190 @@ public class ModelItemProviderAdapterFactory extends ModelAdapterFactory impleme
 	}
 
 	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.LeastSquaresDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected LeastSquaresDesignItemProvider leastSquaresDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.LeastSquaresDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createLeastSquaresDesignAdapter() {
+		if (leastSquaresDesignItemProvider == null) {
+			leastSquaresDesignItemProvider = new LeastSquaresDesignItemProvider(this);
+		}
+
+		return leastSquaresDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.ConstrainedLeastSquaresDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected ConstrainedLeastSquaresDesignItemProvider constrainedLeastSquaresDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.ConstrainedLeastSquaresDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createConstrainedLeastSquaresDesignAdapter() {
+		if (constrainedLeastSquaresDesignItemProvider == null) {
+			constrainedLeastSquaresDesignItemProvider = new ConstrainedLeastSquaresDesignItemProvider(this);
+		}
+
+		return constrainedLeastSquaresDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.LinearProgramDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected LinearProgramDesignItemProvider linearProgramDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.LinearProgramDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createLinearProgramDesignAdapter() {
+		if (linearProgramDesignItemProvider == null) {
+			linearProgramDesignItemProvider = new LinearProgramDesignItemProvider(this);
+		}
+
+		return linearProgramDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.HalfBandDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected HalfBandDesignItemProvider halfBandDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.HalfBandDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createHalfBandDesignAdapter() {
+		if (halfBandDesignItemProvider == null) {
+			halfBandDesignItemProvider = new HalfBandDesignItemProvider(this);
+		}
+
+		return halfBandDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.CicCompensatorDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected CicCompensatorDesignItemProvider cicCompensatorDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.CicCompensatorDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createCicCompensatorDesignAdapter() {
+		if (cicCompensatorDesignItemProvider == null) {
+			cicCompensatorDesignItemProvider = new CicCompensatorDesignItemProvider(this);
+		}
+
+		return cicCompensatorDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.CombDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected CombDesignItemProvider combDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.CombDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createCombDesignAdapter() {
+		if (combDesignItemProvider == null) {
+			combDesignItemProvider = new CombDesignItemProvider(this);
+		}
+
+		return combDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.MinimumPhaseDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected MinimumPhaseDesignItemProvider minimumPhaseDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.MinimumPhaseDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createMinimumPhaseDesignAdapter() {
+		if (minimumPhaseDesignItemProvider == null) {
+			minimumPhaseDesignItemProvider = new MinimumPhaseDesignItemProvider(this);
+		}
+
+		return minimumPhaseDesignItemProvider;
+	}
+
+	/**
+	 * This keeps track of the one adapter used for all {@link tapwright.model.ComplementDesign} instances.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected ComplementDesignItemProvider complementDesignItemProvider;
+
+	/**
+	 * This creates an adapter for a {@link tapwright.model.ComplementDesign}.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Adapter createComplementDesignAdapter() {
+		if (complementDesignItemProvider == null) {
+			complementDesignItemProvider = new ComplementDesignItemProvider(this);
+		}
+
+		return complementDesignItemProvider;
+	}
+
+	/**
 	 * This keeps track of the one adapter used for all {@link tapwright.model.RealCoefficients} instances.
 	 * <!-- begin-user-doc -->
 	 * <!-- end-user-doc -->
@@ -1416,6 +1600,14 @@ public class ModelItemProviderAdapterFactory extends ModelAdapterFactory impleme
 		if (savitzkyGolayDesignItemProvider != null) savitzkyGolayDesignItemProvider.dispose();
 		if (lagrangeDelayDesignItemProvider != null) lagrangeDelayDesignItemProvider.dispose();
 		if (raisedCosineDesignItemProvider != null) raisedCosineDesignItemProvider.dispose();
+		if (leastSquaresDesignItemProvider != null) leastSquaresDesignItemProvider.dispose();
+		if (constrainedLeastSquaresDesignItemProvider != null) constrainedLeastSquaresDesignItemProvider.dispose();
+		if (linearProgramDesignItemProvider != null) linearProgramDesignItemProvider.dispose();
+		if (halfBandDesignItemProvider != null) halfBandDesignItemProvider.dispose();
+		if (cicCompensatorDesignItemProvider != null) cicCompensatorDesignItemProvider.dispose();
+		if (combDesignItemProvider != null) combDesignItemProvider.dispose();
+		if (minimumPhaseDesignItemProvider != null) minimumPhaseDesignItemProvider.dispose();
+		if (complementDesignItemProvider != null) complementDesignItemProvider.dispose();
 		if (realCoefficientsItemProvider != null) realCoefficientsItemProvider.dispose();
 		if (integerCoefficientsItemProvider != null) integerCoefficientsItemProvider.dispose();
 		if (arithmeticItemProvider != null) arithmeticItemProvider.dispose();

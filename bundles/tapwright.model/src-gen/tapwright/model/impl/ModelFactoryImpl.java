@@ -101,6 +101,14 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 			case ModelPackage.SAVITZKY_GOLAY_DESIGN: return createSavitzkyGolayDesign();
 			case ModelPackage.LAGRANGE_DELAY_DESIGN: return createLagrangeDelayDesign();
 			case ModelPackage.RAISED_COSINE_DESIGN: return createRaisedCosineDesign();
+			case ModelPackage.LEAST_SQUARES_DESIGN: return createLeastSquaresDesign();
+			case ModelPackage.CONSTRAINED_LEAST_SQUARES_DESIGN: return createConstrainedLeastSquaresDesign();
+			case ModelPackage.LINEAR_PROGRAM_DESIGN: return createLinearProgramDesign();
+			case ModelPackage.HALF_BAND_DESIGN: return createHalfBandDesign();
+			case ModelPackage.CIC_COMPENSATOR_DESIGN: return createCicCompensatorDesign();
+			case ModelPackage.COMB_DESIGN: return createCombDesign();
+			case ModelPackage.MINIMUM_PHASE_DESIGN: return createMinimumPhaseDesign();
+			case ModelPackage.COMPLEMENT_DESIGN: return createComplementDesign();
 			case ModelPackage.REAL_COEFFICIENTS: return createRealCoefficients();
 			case ModelPackage.INTEGER_COEFFICIENTS: return createIntegerCoefficients();
 			case ModelPackage.ARITHMETIC: return createArithmetic();
@@ -658,6 +666,94 @@ public class ModelFactoryImpl extends EFactoryImpl implements ModelFactory {
 	public RaisedCosineDesign createRaisedCosineDesign() {
 		RaisedCosineDesignImpl raisedCosineDesign = new RaisedCosineDesignImpl();
 		return raisedCosineDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public LeastSquaresDesign createLeastSquaresDesign() {
+		LeastSquaresDesignImpl leastSquaresDesign = new LeastSquaresDesignImpl();
+		return leastSquaresDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public ConstrainedLeastSquaresDesign createConstrainedLeastSquaresDesign() {
+		ConstrainedLeastSquaresDesignImpl constrainedLeastSquaresDesign = new ConstrainedLeastSquaresDesignImpl();
+		return constrainedLeastSquaresDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public LinearProgramDesign createLinearProgramDesign() {
+		LinearProgramDesignImpl linearProgramDesign = new LinearProgramDesignImpl();
+		return linearProgramDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public HalfBandDesign createHalfBandDesign() {
+		HalfBandDesignImpl halfBandDesign = new HalfBandDesignImpl();
+		return halfBandDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public CicCompensatorDesign createCicCompensatorDesign() {
+		CicCompensatorDesignImpl cicCompensatorDesign = new CicCompensatorDesignImpl();
+		return cicCompensatorDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public CombDesign createCombDesign() {
+		CombDesignImpl combDesign = new CombDesignImpl();
+		return combDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public MinimumPhaseDesign createMinimumPhaseDesign() {
+		MinimumPhaseDesignImpl minimumPhaseDesign = new MinimumPhaseDesignImpl();
+		return minimumPhaseDesign;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public ComplementDesign createComplementDesign() {
+		ComplementDesignImpl complementDesign = new ComplementDesignImpl();
+		return complementDesign;
 	}
 
 	/**

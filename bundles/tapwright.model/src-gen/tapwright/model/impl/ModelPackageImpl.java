@@ -21,8 +21,12 @@ import tapwright.model.Baseline;
 import tapwright.model.BaselineEntry;
 import tapwright.model.BinomialDesign;
 import tapwright.model.BulkDelayRequirement;
+import tapwright.model.CicCompensatorDesign;
 import tapwright.model.CoefficientWordRequirement;
 import tapwright.model.Coefficients;
+import tapwright.model.CombDesign;
+import tapwright.model.ComplementDesign;
+import tapwright.model.ConstrainedLeastSquaresDesign;
 import tapwright.model.Decimation;
 import tapwright.model.Decision;
 import tapwright.model.Deployment;
@@ -39,15 +43,19 @@ import tapwright.model.GainRequirement;
 import tapwright.model.GivenDesign;
 import tapwright.model.GroupDelayRequirement;
 import tapwright.model.GroupDelayVariationRequirement;
+import tapwright.model.HalfBandDesign;
 import tapwright.model.ImpulseTailRequirement;
 import tapwright.model.InputClass;
 import tapwright.model.IntegerCoefficients;
 import tapwright.model.Interpolation;
 import tapwright.model.LagrangeDelayDesign;
+import tapwright.model.LeastSquaresDesign;
 import tapwright.model.LimitPoint;
 import tapwright.model.LinearPhaseRequirement;
+import tapwright.model.LinearProgramDesign;
 import tapwright.model.MaximallyFlatDesign;
 import tapwright.model.MemoryRequirement;
+import tapwright.model.MinimumPhaseDesign;
 import tapwright.model.ModelFactory;
 import tapwright.model.ModelPackage;
 import tapwright.model.MovingAverageDesign;
@@ -414,6 +422,62 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	private EClass raisedCosineDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass leastSquaresDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass constrainedLeastSquaresDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass linearProgramDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass halfBandDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass cicCompensatorDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass combDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass minimumPhaseDesignEClass = null;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	private EClass complementDesignEClass = null;
 
 	/**
 	 * <!-- begin-user-doc -->
@@ -2276,6 +2340,246 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 	 * @generated
 	 */
 	@Override
+	public EClass getLeastSquaresDesign() {
+		return leastSquaresDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getLeastSquaresDesign_Type() {
+		return (EAttribute)leastSquaresDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getConstrainedLeastSquaresDesign() {
+		return constrainedLeastSquaresDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getConstrainedLeastSquaresDesign_Type() {
+		return (EAttribute)constrainedLeastSquaresDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getLinearProgramDesign() {
+		return linearProgramDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getLinearProgramDesign_Monotone() {
+		return (EAttribute)linearProgramDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getHalfBandDesign() {
+		return halfBandDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getHalfBandDesign_Taps() {
+		return (EAttribute)halfBandDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getHalfBandDesign_PassEdge() {
+		return (EAttribute)halfBandDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getHalfBandDesign_Hilbert() {
+		return (EAttribute)halfBandDesignEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getCicCompensatorDesign() {
+		return cicCompensatorDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCicCompensatorDesign_Taps() {
+		return (EAttribute)cicCompensatorDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCicCompensatorDesign_Sections() {
+		return (EAttribute)cicCompensatorDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCicCompensatorDesign_Rate() {
+		return (EAttribute)cicCompensatorDesignEClass.getEStructuralFeatures().get(2);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCicCompensatorDesign_PassEdge() {
+		return (EAttribute)cicCompensatorDesignEClass.getEStructuralFeatures().get(3);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCicCompensatorDesign_StopEdge() {
+		return (EAttribute)cicCompensatorDesignEClass.getEStructuralFeatures().get(4);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCicCompensatorDesign_StopWeight() {
+		return (EAttribute)cicCompensatorDesignEClass.getEStructuralFeatures().get(5);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getCombDesign() {
+		return combDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCombDesign_Period() {
+		return (EAttribute)combDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EAttribute getCombDesign_Difference() {
+		return (EAttribute)combDesignEClass.getEStructuralFeatures().get(1);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getMinimumPhaseDesign() {
+		return minimumPhaseDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getMinimumPhaseDesign_Prototype() {
+		return (EReference)minimumPhaseDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EClass getComplementDesign() {
+		return complementDesignEClass;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public EReference getComplementDesign_Prototype() {
+		return (EReference)complementDesignEClass.getEStructuralFeatures().get(0);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
 	public EClass getCoefficients() {
 		return coefficientsEClass;
 	}
@@ -3277,6 +3581,38 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__ROOT);
 		createEAttribute(raisedCosineDesignEClass, RAISED_COSINE_DESIGN__GAIN);
 
+		leastSquaresDesignEClass = createEClass(LEAST_SQUARES_DESIGN);
+		createEAttribute(leastSquaresDesignEClass, LEAST_SQUARES_DESIGN__TYPE);
+
+		constrainedLeastSquaresDesignEClass = createEClass(CONSTRAINED_LEAST_SQUARES_DESIGN);
+		createEAttribute(constrainedLeastSquaresDesignEClass, CONSTRAINED_LEAST_SQUARES_DESIGN__TYPE);
+
+		linearProgramDesignEClass = createEClass(LINEAR_PROGRAM_DESIGN);
+		createEAttribute(linearProgramDesignEClass, LINEAR_PROGRAM_DESIGN__MONOTONE);
+
+		halfBandDesignEClass = createEClass(HALF_BAND_DESIGN);
+		createEAttribute(halfBandDesignEClass, HALF_BAND_DESIGN__TAPS);
+		createEAttribute(halfBandDesignEClass, HALF_BAND_DESIGN__PASS_EDGE);
+		createEAttribute(halfBandDesignEClass, HALF_BAND_DESIGN__HILBERT);
+
+		cicCompensatorDesignEClass = createEClass(CIC_COMPENSATOR_DESIGN);
+		createEAttribute(cicCompensatorDesignEClass, CIC_COMPENSATOR_DESIGN__TAPS);
+		createEAttribute(cicCompensatorDesignEClass, CIC_COMPENSATOR_DESIGN__SECTIONS);
+		createEAttribute(cicCompensatorDesignEClass, CIC_COMPENSATOR_DESIGN__RATE);
+		createEAttribute(cicCompensatorDesignEClass, CIC_COMPENSATOR_DESIGN__PASS_EDGE);
+		createEAttribute(cicCompensatorDesignEClass, CIC_COMPENSATOR_DESIGN__STOP_EDGE);
+		createEAttribute(cicCompensatorDesignEClass, CIC_COMPENSATOR_DESIGN__STOP_WEIGHT);
+
+		combDesignEClass = createEClass(COMB_DESIGN);
+		createEAttribute(combDesignEClass, COMB_DESIGN__PERIOD);
+		createEAttribute(combDesignEClass, COMB_DESIGN__DIFFERENCE);
+
+		minimumPhaseDesignEClass = createEClass(MINIMUM_PHASE_DESIGN);
+		createEReference(minimumPhaseDesignEClass, MINIMUM_PHASE_DESIGN__PROTOTYPE);
+
+		complementDesignEClass = createEClass(COMPLEMENT_DESIGN);
+		createEReference(complementDesignEClass, COMPLEMENT_DESIGN__PROTOTYPE);
+
 		coefficientsEClass = createEClass(COEFFICIENTS);
 		createEAttribute(coefficientsEClass, COEFFICIENTS__DESIGN_HASH);
 
@@ -3433,6 +3769,14 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		savitzkyGolayDesignEClass.getESuperTypes().add(this.getDesign());
 		lagrangeDelayDesignEClass.getESuperTypes().add(this.getDesign());
 		raisedCosineDesignEClass.getESuperTypes().add(this.getDesign());
+		leastSquaresDesignEClass.getESuperTypes().add(this.getBandDesign());
+		constrainedLeastSquaresDesignEClass.getESuperTypes().add(this.getBandDesign());
+		linearProgramDesignEClass.getESuperTypes().add(this.getBandDesign());
+		halfBandDesignEClass.getESuperTypes().add(this.getDesign());
+		cicCompensatorDesignEClass.getESuperTypes().add(this.getDesign());
+		combDesignEClass.getESuperTypes().add(this.getDesign());
+		minimumPhaseDesignEClass.getESuperTypes().add(this.getDesign());
+		complementDesignEClass.getESuperTypes().add(this.getDesign());
 		realCoefficientsEClass.getESuperTypes().add(this.getCoefficients());
 		integerCoefficientsEClass.getESuperTypes().add(this.getCoefficients());
 
@@ -3644,6 +3988,38 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		initEAttribute(getRaisedCosineDesign_Symbols(), this.getQuantity(), "symbols", null, 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getRaisedCosineDesign_Root(), ecorePackage.getEBoolean(), "root", "true", 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 		initEAttribute(getRaisedCosineDesign_Gain(), this.getPulseGain(), "gain", null, 0, 1, RaisedCosineDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(leastSquaresDesignEClass, LeastSquaresDesign.class, "LeastSquaresDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getLeastSquaresDesign_Type(), this.getPhaseType(), "type", null, 0, 1, LeastSquaresDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(constrainedLeastSquaresDesignEClass, ConstrainedLeastSquaresDesign.class, "ConstrainedLeastSquaresDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getConstrainedLeastSquaresDesign_Type(), this.getPhaseType(), "type", null, 0, 1, ConstrainedLeastSquaresDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(linearProgramDesignEClass, LinearProgramDesign.class, "LinearProgramDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getLinearProgramDesign_Monotone(), ecorePackage.getEBoolean(), "monotone", null, 0, 1, LinearProgramDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(halfBandDesignEClass, HalfBandDesign.class, "HalfBandDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getHalfBandDesign_Taps(), this.getQuantity(), "taps", null, 0, 1, HalfBandDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getHalfBandDesign_PassEdge(), this.getQuantity(), "passEdge", null, 0, 1, HalfBandDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getHalfBandDesign_Hilbert(), ecorePackage.getEBoolean(), "hilbert", null, 0, 1, HalfBandDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(cicCompensatorDesignEClass, CicCompensatorDesign.class, "CicCompensatorDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getCicCompensatorDesign_Taps(), this.getQuantity(), "taps", null, 0, 1, CicCompensatorDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getCicCompensatorDesign_Sections(), this.getQuantity(), "sections", null, 0, 1, CicCompensatorDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getCicCompensatorDesign_Rate(), this.getQuantity(), "rate", null, 0, 1, CicCompensatorDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getCicCompensatorDesign_PassEdge(), this.getQuantity(), "passEdge", null, 0, 1, CicCompensatorDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getCicCompensatorDesign_StopEdge(), this.getQuantity(), "stopEdge", null, 0, 1, CicCompensatorDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getCicCompensatorDesign_StopWeight(), this.getQuantity(), "stopWeight", null, 0, 1, CicCompensatorDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(combDesignEClass, CombDesign.class, "CombDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEAttribute(getCombDesign_Period(), this.getQuantity(), "period", null, 0, 1, CombDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+		initEAttribute(getCombDesign_Difference(), ecorePackage.getEBoolean(), "difference", null, 0, 1, CombDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(minimumPhaseDesignEClass, MinimumPhaseDesign.class, "MinimumPhaseDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEReference(getMinimumPhaseDesign_Prototype(), this.getDesign(), null, "prototype", null, 0, 1, MinimumPhaseDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
+
+		initEClass(complementDesignEClass, ComplementDesign.class, "ComplementDesign", !IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
+		initEReference(getComplementDesign_Prototype(), this.getDesign(), null, "prototype", null, 0, 1, ComplementDesign.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, IS_COMPOSITE, !IS_RESOLVE_PROXIES, !IS_UNSETTABLE, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
 
 		initEClass(coefficientsEClass, Coefficients.class, "Coefficients", IS_ABSTRACT, !IS_INTERFACE, IS_GENERATED_INSTANCE_CLASS);
 		initEAttribute(getCoefficients_DesignHash(), ecorePackage.getEString(), "designHash", null, 0, 1, Coefficients.class, !IS_TRANSIENT, !IS_VOLATILE, IS_CHANGEABLE, !IS_UNSETTABLE, !IS_ID, IS_UNIQUE, !IS_DERIVED, IS_ORDERED);
@@ -5229,6 +5605,150 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 			   "documentation", "What the pulse is scaled to."
 		   });
 		addAnnotation
+		  (leastSquaresDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Smallest weighted squared error. Nulls and exact gains that the requirements ask for hold exactly."
+		   });
+		addAnnotation
+		  (getLeastSquaresDesign_Type(),
+		   source,
+		   new String[] {
+			   "documentation", "Kind of linear phase; type I or II by the number of taps when any."
+		   });
+		addAnnotation
+		  (constrainedLeastSquaresDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Smallest squared error within the gain limits of the requirements (Selesnick, Lang and Burrus, 1996)."
+		   });
+		addAnnotation
+		  (getConstrainedLeastSquaresDesign_Type(),
+		   source,
+		   new String[] {
+			   "documentation", "Kind of linear phase; type I or II by the number of taps when any."
+		   });
+		addAnnotation
+		  (linearProgramDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Smallest largest error within all gain limits, step limits, nulls and exact gains that the requirements ask for."
+		   });
+		addAnnotation
+		  (getLinearProgramDesign_Monotone(),
+		   source,
+		   new String[] {
+			   "documentation", "The amplitude only falls in the first band."
+		   });
+		addAnnotation
+		  (halfBandDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Equiripple half-band filter with exact zeros (Vaidyanathan and Nguyen, 1987), or its Hilbert transformer."
+		   });
+		addAnnotation
+		  (getHalfBandDesign_Taps(),
+		   source,
+		   new String[] {
+			   "documentation", "Number of coefficients, 4 J - 1."
+		   });
+		addAnnotation
+		  (getHalfBandDesign_PassEdge(),
+		   source,
+		   new String[] {
+			   "documentation", "Upper edge of the pass band in Hz, below a quarter of the sample rate."
+		   });
+		addAnnotation
+		  (getHalfBandDesign_Hilbert(),
+		   source,
+		   new String[] {
+			   "documentation", "The Hilbert transformer instead."
+		   });
+		addAnnotation
+		  (cicCompensatorDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "Makes the pass band of a cascaded integrator-comb decimator in front of it flat."
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_Taps(),
+		   source,
+		   new String[] {
+			   "documentation", "Number of coefficients."
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_Sections(),
+		   source,
+		   new String[] {
+			   "documentation", "Sections of the decimator."
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_Rate(),
+		   source,
+		   new String[] {
+			   "documentation", "Factor of the decimator."
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_PassEdge(),
+		   source,
+		   new String[] {
+			   "documentation", "Upper edge of the flat band in Hz."
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_StopEdge(),
+		   source,
+		   new String[] {
+			   "documentation", "Lower edge of the stop band in Hz."
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_StopWeight(),
+		   source,
+		   new String[] {
+			   "documentation", "Weight of the error in the stop band; 1 when empty."
+		   });
+		addAnnotation
+		  (combDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "The sum or difference of two samples, a period apart."
+		   });
+		addAnnotation
+		  (getCombDesign_Period(),
+		   source,
+		   new String[] {
+			   "documentation", "Distance of the samples in seconds."
+		   });
+		addAnnotation
+		  (getCombDesign_Difference(),
+		   source,
+		   new String[] {
+			   "documentation", "0 Hz is a zero."
+		   });
+		addAnnotation
+		  (minimumPhaseDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "The filter of shortest delay with the gain of another one, by spectral factorisation (Wilson, 1969)."
+		   });
+		addAnnotation
+		  (getMinimumPhaseDesign_Prototype(),
+		   source,
+		   new String[] {
+			   "documentation", "A design with symmetric coefficients, whose squared gain is that of the result."
+		   });
+		addAnnotation
+		  (complementDesignEClass,
+		   source,
+		   new String[] {
+			   "documentation", "What another filter leaves over: a pure delay less that filter."
+		   });
+		addAnnotation
+		  (getComplementDesign_Prototype(),
+		   source,
+		   new String[] {
+			   "documentation", "A design with an odd number of symmetric coefficients."
+		   });
+		addAnnotation
 		  (coefficientsEClass,
 		   source,
 		   new String[] {
@@ -6288,6 +6808,116 @@ public class ModelPackageImpl extends EPackageImpl implements ModelPackage {
 		   source,
 		   new String[] {
 			   "unit", "1"
+		   });
+		addAnnotation
+		  (leastSquaresDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "least-squares",
+			   "label", "Least squares"
+		   });
+		addAnnotation
+		  (constrainedLeastSquaresDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "constrained-least-squares",
+			   "label", "Constrained least squares"
+		   });
+		addAnnotation
+		  (linearProgramDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "linear-program",
+			   "label", "Linear program"
+		   });
+		addAnnotation
+		  (halfBandDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "half-band",
+			   "label", "Half-band"
+		   });
+		addAnnotation
+		  (getHalfBandDesign_Taps(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getHalfBandDesign_PassEdge(),
+		   source,
+		   new String[] {
+			   "unit", "Hz"
+		   });
+		addAnnotation
+		  (cicCompensatorDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "cic-compensator",
+			   "label", "Droop compensator"
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_Taps(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_Sections(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_Rate(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_PassEdge(),
+		   source,
+		   new String[] {
+			   "unit", "Hz"
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_StopEdge(),
+		   source,
+		   new String[] {
+			   "unit", "Hz"
+		   });
+		addAnnotation
+		  (getCicCompensatorDesign_StopWeight(),
+		   source,
+		   new String[] {
+			   "unit", "1"
+		   });
+		addAnnotation
+		  (combDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "comb",
+			   "label", "Comb"
+		   });
+		addAnnotation
+		  (getCombDesign_Period(),
+		   source,
+		   new String[] {
+			   "unit", "s"
+		   });
+		addAnnotation
+		  (minimumPhaseDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "minimum-phase",
+			   "label", "Minimum phase"
+		   });
+		addAnnotation
+		  (complementDesignEClass,
+		   source,
+		   new String[] {
+			   "method", "complement",
+			   "label", "Complement"
 		   });
 		addAnnotation
 		  (realCoefficientsEClass,

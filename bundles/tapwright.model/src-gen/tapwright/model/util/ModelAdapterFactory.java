@@ -254,6 +254,38 @@ public class ModelAdapterFactory extends AdapterFactoryImpl {
 				return createRaisedCosineDesignAdapter();
 			}
 			@Override
+			public Adapter caseLeastSquaresDesign(LeastSquaresDesign object) {
+				return createLeastSquaresDesignAdapter();
+			}
+			@Override
+			public Adapter caseConstrainedLeastSquaresDesign(ConstrainedLeastSquaresDesign object) {
+				return createConstrainedLeastSquaresDesignAdapter();
+			}
+			@Override
+			public Adapter caseLinearProgramDesign(LinearProgramDesign object) {
+				return createLinearProgramDesignAdapter();
+			}
+			@Override
+			public Adapter caseHalfBandDesign(HalfBandDesign object) {
+				return createHalfBandDesignAdapter();
+			}
+			@Override
+			public Adapter caseCicCompensatorDesign(CicCompensatorDesign object) {
+				return createCicCompensatorDesignAdapter();
+			}
+			@Override
+			public Adapter caseCombDesign(CombDesign object) {
+				return createCombDesignAdapter();
+			}
+			@Override
+			public Adapter caseMinimumPhaseDesign(MinimumPhaseDesign object) {
+				return createMinimumPhaseDesignAdapter();
+			}
+			@Override
+			public Adapter caseComplementDesign(ComplementDesign object) {
+				return createComplementDesignAdapter();
+			}
+			@Override
 			public Adapter caseCoefficients(Coefficients object) {
 				return createCoefficientsAdapter();
 			}
@@ -958,6 +990,118 @@ public class ModelAdapterFactory extends AdapterFactoryImpl {
 	 * @generated
 	 */
 	public Adapter createRaisedCosineDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.LeastSquaresDesign <em>Least Squares Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.LeastSquaresDesign
+	 * @generated
+	 */
+	public Adapter createLeastSquaresDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.ConstrainedLeastSquaresDesign <em>Constrained Least Squares Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.ConstrainedLeastSquaresDesign
+	 * @generated
+	 */
+	public Adapter createConstrainedLeastSquaresDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.LinearProgramDesign <em>Linear Program Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.LinearProgramDesign
+	 * @generated
+	 */
+	public Adapter createLinearProgramDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.HalfBandDesign <em>Half Band Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.HalfBandDesign
+	 * @generated
+	 */
+	public Adapter createHalfBandDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.CicCompensatorDesign <em>Cic Compensator Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.CicCompensatorDesign
+	 * @generated
+	 */
+	public Adapter createCicCompensatorDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.CombDesign <em>Comb Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.CombDesign
+	 * @generated
+	 */
+	public Adapter createCombDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.MinimumPhaseDesign <em>Minimum Phase Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.MinimumPhaseDesign
+	 * @generated
+	 */
+	public Adapter createMinimumPhaseDesignAdapter() {
+		return null;
+	}
+
+	/**
+	 * Creates a new adapter for an object of class '{@link tapwright.model.ComplementDesign <em>Complement Design</em>}'.
+	 * <!-- begin-user-doc -->
+	 * This default implementation returns null so that we can easily ignore cases;
+	 * it's useful to ignore a case when inheritance will catch all the cases anyway.
+	 * <!-- end-user-doc -->
+	 * @return the new adapter.
+	 * @see tapwright.model.ComplementDesign
+	 * @generated
+	 */
+	public Adapter createComplementDesignAdapter() {
 		return null;
 	}
 

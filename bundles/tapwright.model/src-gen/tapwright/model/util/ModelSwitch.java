@@ -381,6 +381,65 @@ public class ModelSwitch<T> extends Switch<T> {
 				if (result == null) result = defaultCase(theEObject);
 				return result;
 			}
+			case ModelPackage.LEAST_SQUARES_DESIGN: {
+				LeastSquaresDesign leastSquaresDesign = (LeastSquaresDesign)theEObject;
+				T result = caseLeastSquaresDesign(leastSquaresDesign);
+				if (result == null) result = caseBandDesign(leastSquaresDesign);
+				if (result == null) result = caseDesign(leastSquaresDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.CONSTRAINED_LEAST_SQUARES_DESIGN: {
+				ConstrainedLeastSquaresDesign constrainedLeastSquaresDesign = (ConstrainedLeastSquaresDesign)theEObject;
+				T result = caseConstrainedLeastSquaresDesign(constrainedLeastSquaresDesign);
+				if (result == null) result = caseBandDesign(constrainedLeastSquaresDesign);
+				if (result == null) result = caseDesign(constrainedLeastSquaresDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.LINEAR_PROGRAM_DESIGN: {
+				LinearProgramDesign linearProgramDesign = (LinearProgramDesign)theEObject;
+				T result = caseLinearProgramDesign(linearProgramDesign);
+				if (result == null) result = caseBandDesign(linearProgramDesign);
+				if (result == null) result = caseDesign(linearProgramDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.HALF_BAND_DESIGN: {
+				HalfBandDesign halfBandDesign = (HalfBandDesign)theEObject;
+				T result = caseHalfBandDesign(halfBandDesign);
+				if (result == null) result = caseDesign(halfBandDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.CIC_COMPENSATOR_DESIGN: {
+				CicCompensatorDesign cicCompensatorDesign = (CicCompensatorDesign)theEObject;
+				T result = caseCicCompensatorDesign(cicCompensatorDesign);
+				if (result == null) result = caseDesign(cicCompensatorDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.COMB_DESIGN: {
+				CombDesign combDesign = (CombDesign)theEObject;
+				T result = caseCombDesign(combDesign);
+				if (result == null) result = caseDesign(combDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.MINIMUM_PHASE_DESIGN: {
+				MinimumPhaseDesign minimumPhaseDesign = (MinimumPhaseDesign)theEObject;
+				T result = caseMinimumPhaseDesign(minimumPhaseDesign);
+				if (result == null) result = caseDesign(minimumPhaseDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
+			case ModelPackage.COMPLEMENT_DESIGN: {
+				ComplementDesign complementDesign = (ComplementDesign)theEObject;
+				T result = caseComplementDesign(complementDesign);
+				if (result == null) result = caseDesign(complementDesign);
+				if (result == null) result = defaultCase(theEObject);
+				return result;
+			}
 			case ModelPackage.COEFFICIENTS: {
 				Coefficients coefficients = (Coefficients)theEObject;
 				T result = caseCoefficients(coefficients);
@@ -1140,6 +1199,126 @@ public class ModelSwitch<T> extends Switch<T> {
 	 * @generated
 	 */
 	public T caseRaisedCosineDesign(RaisedCosineDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Least Squares Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Least Squares Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseLeastSquaresDesign(LeastSquaresDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Constrained Least Squares Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Constrained Least Squares Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseConstrainedLeastSquaresDesign(ConstrainedLeastSquaresDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Linear Program Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Linear Program Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseLinearProgramDesign(LinearProgramDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Half Band Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Half Band Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseHalfBandDesign(HalfBandDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Cic Compensator Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Cic Compensator Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseCicCompensatorDesign(CicCompensatorDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Comb Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Comb Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseCombDesign(CombDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Minimum Phase Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Minimum Phase Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseMinimumPhaseDesign(MinimumPhaseDesign object) {
+		return null;
+	}
+
+	/**
+	 * Returns the result of interpreting the object as an instance of '<em>Complement Design</em>'.
+	 * <!-- begin-user-doc -->
+	 * This implementation returns null;
+	 * returning a non-null result will terminate the switch.
+	 * <!-- end-user-doc -->
+	 * @param object the target of the switch.
+	 * @return the result of interpreting the object as an instance of '<em>Complement Design</em>'.
+	 * @see #doSwitch(org.eclipse.emf.ecore.EObject) doSwitch(EObject)
+	 * @generated
+	 */
+	public T caseComplementDesign(ComplementDesign object) {
 		return null;
 	}
 

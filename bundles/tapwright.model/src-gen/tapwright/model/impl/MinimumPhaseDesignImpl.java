@@ -1,0 +1,179 @@
+/**
+ * SPDX-License-Identifier: EPL-2.0
+ * Generated from model/tapwright.ecore: change the model, then run releng/generate-model.
+ */
+package tapwright.model.impl;
+
+import org.eclipse.emf.common.notify.Notification;
+import org.eclipse.emf.common.notify.NotificationChain;
+
+import org.eclipse.emf.ecore.EClass;
+import org.eclipse.emf.ecore.InternalEObject;
+
+import org.eclipse.emf.ecore.impl.ENotificationImpl;
+
+import tapwright.model.Design;
+import tapwright.model.MinimumPhaseDesign;
+import tapwright.model.ModelPackage;
+
+/**
+ * <!-- begin-user-doc -->
+ * An implementation of the model object '<em><b>Minimum Phase Design</b></em>'.
+ * <!-- end-user-doc -->
+ * <p>
+ * The following features are implemented:
+ * </p>
+ * <ul>
+ *   <li>{@link tapwright.model.impl.MinimumPhaseDesignImpl#getPrototype <em>Prototype</em>}</li>
+ * </ul>
+ *
+ * @generated
+ */
+public class MinimumPhaseDesignImpl extends DesignImpl implements MinimumPhaseDesign {
+	/**
+	 * The cached value of the '{@link #getPrototype() <em>Prototype</em>}' containment reference.
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @see #getPrototype()
+	 * @generated
+	 * @ordered
+	 */
+	protected Design prototype;
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	protected MinimumPhaseDesignImpl() {
+		super();
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	protected EClass eStaticClass() {
+		return ModelPackage.Literals.MINIMUM_PHASE_DESIGN;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Design getPrototype() {
+		return prototype;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	public NotificationChain basicSetPrototype(Design newPrototype, NotificationChain msgs) {
+		Design oldPrototype = prototype;
+		prototype = newPrototype;
+		if (eNotificationRequired()) {
+			ENotificationImpl notification = new ENotificationImpl(this, Notification.SET, ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE, oldPrototype, newPrototype);
+			if (msgs == null) msgs = notification; else msgs.add(notification);
+		}
+		return msgs;
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void setPrototype(Design newPrototype) {
+		if (newPrototype != prototype) {
+			NotificationChain msgs = null;
+			if (prototype != null)
+				msgs = ((InternalEObject)prototype).eInverseRemove(this, EOPPOSITE_FEATURE_BASE - ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE, null, msgs);
+			if (newPrototype != null)
+				msgs = ((InternalEObject)newPrototype).eInverseAdd(this, EOPPOSITE_FEATURE_BASE - ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE, null, msgs);
+			msgs = basicSetPrototype(newPrototype, msgs);
+			if (msgs != null) msgs.dispatch();
+		}
+		else if (eNotificationRequired())
+			eNotify(new ENotificationImpl(this, Notification.SET, ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE, newPrototype, newPrototype));
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public NotificationChain eInverseRemove(InternalEObject otherEnd, int featureID, NotificationChain msgs) {
+		switch (featureID) {
+			case ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE:
+				return basicSetPrototype(null, msgs);
+		}
+		return super.eInverseRemove(otherEnd, featureID, msgs);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public Object eGet(int featureID, boolean resolve, boolean coreType) {
+		switch (featureID) {
+			case ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE:
+				return getPrototype();
+		}
+		return super.eGet(featureID, resolve, coreType);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void eSet(int featureID, Object newValue) {
+		switch (featureID) {
+			case ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE:
+				setPrototype((Design)newValue);
+				return;
+		}
+		super.eSet(featureID, newValue);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public void eUnset(int featureID) {
+		switch (featureID) {
+			case ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE:
+				setPrototype((Design)null);
+				return;
+		}
+		super.eUnset(featureID);
+	}
+
+	/**
+	 * <!-- begin-user-doc -->
+	 * <!-- end-user-doc -->
+	 * @generated
+	 */
+	@Override
+	public boolean eIsSet(int featureID) {
+		switch (featureID) {
+			case ModelPackage.MINIMUM_PHASE_DESIGN__PROTOTYPE:
+				return prototype != null;
+		}
+		return super.eIsSet(featureID);
+	}
+
+} //MinimumPhaseDesignImpl
