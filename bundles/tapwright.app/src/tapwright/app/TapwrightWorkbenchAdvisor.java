@@ -15,8 +15,8 @@ import org.eclipse.ui.application.WorkbenchAdvisor;
 import org.eclipse.ui.application.WorkbenchWindowAdvisor;
 import org.eclipse.ui.ide.IDE;
 
-import tapwright.ui.start.FirstStart;
 import tapwright.ui.look.Icons;
+import tapwright.ui.start.FirstStart;
 
 /** What the workbench of the product starts with. */
 public final class TapwrightWorkbenchAdvisor extends WorkbenchAdvisor {

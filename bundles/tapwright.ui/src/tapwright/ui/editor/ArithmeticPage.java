@@ -103,8 +103,8 @@ final class ArithmeticPage extends FilterEditorPage {
 			return "";
 		}
 		Cost counted = Cost.of(subject.taps(), subject.arithmetic().get());
-		return counted.multiplies() + " multiplications and " + counted.adds() + " additions for every " + counted.inputs()
-				+ (counted.inputs() == 1 ? " input sample" : " input samples") + "\n"
+		return counted.multiplies() + " multiplications and " + counted.adds() + " additions for every "
+				+ (counted.inputs() == 1 ? "input sample" : counted.inputs() + " input samples") + "\n"
 				+ Words.of(counted.multipliesPerSecond(subject.sampleRate()), "1")
 				+ " multiplications per second\n" + counted.coefficientWords() + " words for coefficients, "
 				+ counted.delayWords() + " words for delay lines";

@@ -13,6 +13,7 @@ import org.eclipse.ui.forms.editor.FormPage;
 import org.eclipse.ui.ide.IGotoMarker;
 
 import tapwright.core.quantity.Expression;
+import tapwright.core.verify.Partners;
 import tapwright.model.Filter;
 import tapwright.ui.proof.FilterSnapshot;
 import tapwright.ui.proof.LiveProof;
@@ -53,7 +54,7 @@ public final class FilterEditor extends ModelEditor<Filter> implements IGotoMark
 
 	@Override
 	void modelChanged() {
-		proof.ask(FilterSnapshot.of(document().root(), document().parameters()));
+		prove();
 		pages.forEach(FilterEditorPage::modelChanged);
 	}
 
@@ -66,9 +67,14 @@ public final class FilterEditor extends ModelEditor<Filter> implements IGotoMark
 	private void parametersMayHaveChanged() {
 		getSite().getShell().getDisplay().asyncExec(() -> {
 			if (isReadable()) {
-				proof.ask(FilterSnapshot.of(document().root(), document().parameters()));
+				prove();
 			}
 		});
+	}
+
+	private void prove() {
+		Partners partners = PortfolioProject.of(document().file()).map(PortfolioProject::partners).orElse(Partners.NONE);
+		proof.ask(FilterSnapshot.of(document().root(), document().parameters(), partners));
 	}
 
 	/** The evidence of the content. */

@@ -59,7 +59,7 @@ final class FormatTable {
 		column("Sign", 110, place -> format(place).map(format -> SIGNS[format.isSigned() ? 0 : 1]).orElse(""))
 				.setEditingSupport(new Sign());
 		column("Range", 280, this::range);
-		column("Step", 140, place -> numbers(place).map(format -> word(Rationals.nearest(format.step()))).orElse(""));
+		column("Step", 140, place -> numbers(place).map(format -> "2^" + -format.fraction()).orElse(""));
 		viewer.setInput(PLACES);
 	}
 

@@ -38,7 +38,7 @@ import tapwright.ui.look.Icons;
 /** Contained objects as rows of a table, edited in place, a column for each attribute. UI thread. */
 public final class ObjectTable {
 
-	private static final int FEWEST_ROWS = 3;
+	private static final int FEWEST_ROWS = 4;
 	private static final int NARROWEST = 70;
 
 	private final ModelAccess access;
@@ -79,8 +79,7 @@ public final class ObjectTable {
 		String unit = Meta.unit(attribute);
 		column.getColumn().setText(FeatureWords.label(attribute) + (unit.equals("1") ? "" : " (" + unit + ")"));
 		column.getColumn().setToolTipText(Meta.documentation(attribute));
-		boolean wide = !Meta.isQuantity(attribute) && !(attribute.getEType() instanceof EEnum);
-		layout.setColumnData(column.getColumn(), new ColumnWeightData(wide ? 3 : 2, NARROWEST));
+		layout.setColumnData(column.getColumn(), new ColumnWeightData(weight(attribute), NARROWEST));
 		column.setLabelProvider(new ColumnLabelProvider() {
 			@Override
 			public String getText(Object element) {
@@ -89,6 +88,11 @@ public final class ObjectTable {
 		});
 		column.setEditingSupport(attribute.getEType() instanceof EEnum choices ? new ChoiceEditing(attribute, choices)
 				: new TextEditing(attribute));
+	}
+
+	private static int weight(EAttribute attribute) {
+		boolean narrow = Meta.isQuantity(attribute) || attribute.getEType() instanceof EEnum;
+		return narrow ? 2 : attribute.getName().equals("description") ? 5 : 3;
 	}
 
 	private static String text(EObject object, EAttribute attribute) {

@@ -27,14 +27,14 @@ import tapwright.model.Requirement;
  */
 public record FilterSnapshot(FilterQuestion question, Map<String, tapwright.dsp.verify.Requirement> statements) {
 
-	/** Takes the snapshot. */
-	public static FilterSnapshot of(Filter filter, Expression.Names parameters) {
+	/** Takes the snapshot of a filter with the given parameters and partners. */
+	public static FilterSnapshot of(Filter filter, Expression.Names parameters, Partners partners) {
 		var numbers = new Numbers(parameters);
 		Map<String, tapwright.dsp.verify.Requirement> statements = new LinkedHashMap<>();
 		for (Requirement requirement : filter.getRequirements()) {
-			statement(requirement, numbers).ifPresent(statement -> statements.put(requirement.getId(), statement));
+			statement(requirement, numbers, partners).ifPresent(statement -> statements.put(requirement.getId(), statement));
 		}
-		return new FilterSnapshot(FilterQuestion.of(filter, parameters), Collections.unmodifiableMap(statements));
+		return new FilterSnapshot(FilterQuestion.of(filter, parameters, partners), Collections.unmodifiableMap(statements));
 	}
 
 	/** Name of the filter. */
@@ -48,10 +48,11 @@ public record FilterSnapshot(FilterQuestion question, Map<String, tapwright.dsp.
 	}
 
 	// What makes no sense is reported by the question; here it only leaves no trace in the picture.
-	private static <T extends Requirement> Optional<tapwright.dsp.verify.Requirement> statement(T requirement, Numbers numbers) {
+	private static <T extends Requirement> Optional<tapwright.dsp.verify.Requirement> statement(T requirement, Numbers numbers,
+			Partners partners) {
 		try {
 			RequirementKind<T> kind = RequirementKinds.of(requirement);
-			return Optional.of(kind.statement(requirement, numbers, Partners.NONE));
+			return Optional.of(kind.statement(requirement, numbers, partners));
 		} catch (InputException | IllegalArgumentException e) {
 			return Optional.empty();
 		}

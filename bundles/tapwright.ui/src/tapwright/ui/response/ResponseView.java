@@ -27,6 +27,7 @@ import org.eclipse.ui.IWorkbenchPartReference;
 import org.eclipse.ui.part.ViewPart;
 
 import tapwright.core.quantity.Expression;
+import tapwright.core.verify.Partners;
 import tapwright.model.Filter;
 import tapwright.model.io.ModelFiles;
 import tapwright.ui.editor.FilterEditor;
@@ -169,7 +170,8 @@ public final class ResponseView extends ViewPart {
 			}
 			Optional<PortfolioProject> portfolio = PortfolioProject.of(file);
 			Expression.Names parameters = portfolio.map(PortfolioProject::parameters).orElse(Expression.Names.NONE);
-			return Optional.of(new Overlay(FilterSnapshot.of(filter, parameters),
+			Partners partners = portfolio.map(PortfolioProject::partners).orElse(Partners.NONE);
+			return Optional.of(new Overlay(FilterSnapshot.of(filter, parameters, partners),
 					portfolio.flatMap(found -> found.evidence(file)).map(present -> present.evidence())));
 		} catch (CoreException | IOException e) {
 			return Optional.empty();
