@@ -54,6 +54,7 @@ class FilterSchemaTest {
 		quantity.addProperty("description", Meta.documentation(ModelPackage.Literals.QUANTITY));
 		quantity.add("type", strings("number", "string"));
 		definitions.add("quantity", quantity);
+		definitions.add("design", variants(ModelPackage.Literals.DESIGN)); // designs can contain designs
 		schema.add("$defs", definitions);
 		return schema;
 	}
@@ -111,6 +112,14 @@ class FilterSchemaTest {
 		if (!type.isAbstract()) {
 			return object(type, "", "");
 		}
+		if (type == ModelPackage.Literals.DESIGN) {
+			schema.addProperty("$ref", "#/$defs/design");
+			return schema;
+		}
+		return variants(type);
+	}
+
+	private static JsonObject variants(EClass type) {
 		JsonArray variants = new JsonArray();
 		for (EClassifier classifier : ModelPackage.eINSTANCE.getEClassifiers()) {
 			if (classifier instanceof EClass variant && !variant.isAbstract() && type.isSuperTypeOf(variant)) {
@@ -119,6 +128,7 @@ class FilterSchemaTest {
 						: object(variant, name.keySet().iterator().next(), name.values().iterator().next()));
 			}
 		}
+		JsonObject schema = new JsonObject();
 		schema.add("oneOf", variants);
 		return schema;
 	}
