@@ -28,6 +28,7 @@ import org.eclipse.ui.IPageLayout;
 import org.eclipse.ui.IWorkbenchPage;
 import org.eclipse.ui.PlatformUI;
 import org.eclipse.ui.ide.IDE;
+import org.eclipse.ui.navigator.CommonNavigator;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 
@@ -59,6 +60,7 @@ class ScreensTest {
 		Waiting.until("the portfolio", project::isOpen);
 		Waiting.until("the evidence", () -> PortfolioProject.of(project).filter(found -> !found.evidence().isEmpty()).isPresent());
 		window.setBounds(0, 0, 1600, 1000);
+		((CommonNavigator) page.showView("org.eclipse.ui.navigator.ProjectExplorer")).getCommonViewer().expandToLevel(project, 1);
 		for (String theme : List.of(LIGHT, DARK)) {
 			page.closeAllEditors(false); // what is open keeps some colours of the theme before
 			theme(theme);

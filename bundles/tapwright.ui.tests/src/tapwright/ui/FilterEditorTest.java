@@ -20,6 +20,7 @@ import org.eclipse.swt.widgets.Display;
 import org.eclipse.swt.widgets.Event;
 import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Text;
+import org.eclipse.swt.widgets.ToolBar;
 import org.eclipse.ui.IWorkbenchCommandConstants;
 import org.eclipse.ui.ide.IDE;
 import org.junit.jupiter.api.AfterEach;
@@ -98,6 +99,22 @@ class FilterEditorTest {
 		var editor = (FilterEditor) IDE.openEditor(Ui.page(), sample.problem());
 		assertEquals("requirements", editor.getActivePageInstance().getId());
 		assertEquals("-3", Ui.field(container(editor), Text.class, "max").getText());
+	}
+
+	@Test
+	void aRequirementIsAddedAndRemovedByCommandsThatCanBeUndone() throws Exception {
+		FilterEditor editor = open();
+		editor.showRequirement("ceiling");
+		var tools = Ui.all(container(editor), ToolBar.class).stream()
+				.filter(bar -> bar.getItemCount() == 5 && "Add".equals(bar.getItem(0).getText())).findFirst().orElseThrow();
+		tools.getItem(1).notifyListeners(SWT.Selection, new Event()); // duplicate
+		assertEquals(2, editor.document().root().getRequirements().size());
+		assertEquals("ceiling-2", editor.document().root().getRequirements().get(1).getId());
+		tools.getItem(2).notifyListeners(SWT.Selection, new Event()); // remove
+		assertEquals(1, editor.document().root().getRequirements().size());
+		Ui.execute(IWorkbenchCommandConstants.EDIT_UNDO);
+		Ui.execute(IWorkbenchCommandConstants.EDIT_UNDO);
+		assertFalse(editor.isDirty(), "undone to the saved state");
 	}
 
 	@Test

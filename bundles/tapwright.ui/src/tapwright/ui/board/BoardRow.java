@@ -47,6 +47,9 @@ final class BoardRow {
 	}
 
 	private static double relativeMargin(RequirementEvidence found) {
+		if (Verdicts.isExact(found)) {
+			return Double.POSITIVE_INFINITY; // it has no margin that could wear away
+		}
 		double margin = found.proof().margin().middle();
 		double limit = Math.abs(found.proof().limit());
 		return limit > 0 && Double.isFinite(limit) ? margin / limit : margin;

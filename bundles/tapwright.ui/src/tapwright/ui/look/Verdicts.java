@@ -45,8 +45,17 @@ public final class Verdicts {
 		if (!isKnown(margin)) {
 			return "";
 		}
+		if (isExact(evidence)) {
+			return "exact";
+		}
 		double middle = margin.middle();
 		return (middle > 0 ? "+" : "") + Words.of(middle, evidence.valueUnit(), MARGIN_DIGITS).replace('-', '−');
+	}
+
+	/** Whether a statement holds with nothing to spare and nothing to lose, as statements of equality do. */
+	public static boolean isExact(RequirementEvidence evidence) {
+		Proof proof = evidence.proof();
+		return proof.verdict() == Verdict.MET && proof.margin().lo() == 0 && proof.margin().hi() == 0;
 	}
 
 	/** The worst value with its unit. */

@@ -118,11 +118,14 @@ public final class FirstStart extends WorkspaceJob {
 	private static void openFirstProblem(PortfolioProject portfolio) {
 		IWorkbenchWindow window = PlatformUI.getWorkbench().getActiveWorkbenchWindow();
 		IWorkbenchPage page = window == null ? null : window.getActivePage();
-		if (page == null || page.getActiveEditor() != null) {
-			return; // the person has begun something already
+		if (page == null) {
+			return; // the window was closed in between
 		}
 		if (page.findView(ProjectExplorer.VIEW_ID) instanceof CommonNavigator explorer) {
 			explorer.getCommonViewer().expandToLevel(portfolio.project(), 1);
+		}
+		if (page.getActiveEditor() != null) {
+			return; // the person has begun something already
 		}
 		List<IFile> wrong = new ArrayList<>(portfolio.evidence().stream()
 				.filter(found -> found.evidence().evidence().verdict() == Verdict.MISSED).map(PortfolioProject.FileEvidence::file)
