@@ -26,12 +26,10 @@ import tapwright.ui.proof.Proven;
 final class EvidenceTable {
 
 	private final TableViewer viewer;
-	private final Consumer<Optional<RequirementEvidence>> selected;
 	private boolean stale;
 	private boolean filling;
 
 	EvidenceTable(FormToolkit toolkit, Composite parent, Consumer<Optional<RequirementEvidence>> selected) {
-		this.selected = selected;
 		var table = toolkit.createTable(parent, SWT.FULL_SELECTION | SWT.SINGLE | SWT.BORDER);
 		table.setHeaderVisible(true);
 		GridDataFactory.fillDefaults().grab(true, true).hint(400, 4 * table.getItemHeight()).applyTo(table);
