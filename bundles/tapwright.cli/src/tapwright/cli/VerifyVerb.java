@@ -38,6 +38,7 @@ final class VerifyVerb implements Verb {
 	public String help() {
 		return """
 				usage: tapwright verify PATH... [--format FORMAT] [--output FILE] [--shard I/N] [--time-limit SECONDS]
+				                         [--against BASELINE] [--since GITREV]
 
 				Each PATH is a portfolio or any other folder (all its filters), a NAME.filter file, or an interchange
 				JSON file. A requirement is met or missed only when that is proven for exactly the numbers stored.
@@ -46,19 +47,22 @@ final class VerifyVerb implements Verb {
 				  --output FILE         writes there instead of the terminal
 				  --shard I/N           verifies only the I-th of N parts, to share the work between machines
 				  --time-limit SECONDS  gives up on a requirement after that time and calls it unproven; 10 by default
+				  --against BASELINE    also lists what was met in that baseline of the portfolio and stands worse now
+				  --since GITREV        the same for the portfolio as that git commit has it; the work tree is not touched
 
 				examples:
 				  tapwright verify sample-workspace
 				  tapwright verify marram/antialias.filter --format json
 				  tapwright verify . --format junit --output target/filters.xml
+				  tapwright verify marram --since origin/main
 
-				exit codes: 0 all met; 1 something missed or unproven; 2 bad usage or input""";
+				exit codes: 0 all met; 1 something missed, unproven or regressed; 2 bad usage or input""";
 	}
 
 	@Override
 	public List<Option> options() {
 		return List.of(new Option("--format", true), new Option("--output", true), new Option("--shard", true),
-				new Option("--time-limit", true));
+				new Option("--time-limit", true), new Option("--against", true), new Option("--since", true));
 	}
 
 	@Override
@@ -77,6 +81,7 @@ final class VerifyVerb implements Verb {
 		if (arguments.has("--output")) {
 			output = Optional.of(path(arguments.option("--output").get()));
 		}
+		var past = new RegressionCheck(arguments, paths);
 		List<FilterSource> sources = shard.of(Sources.read(paths));
 		VerificationRun run;
 		try (var progress = new TerminalProgress(console)) {
@@ -92,7 +97,8 @@ final class VerifyVerb implements Verb {
 		if (output.isPresent() || !format.name().equals("table")) { // the table shows them itself
 			problems.forEach(problem -> console.err().println("tapwright verify: " + problem));
 		}
-		return problems.isEmpty() ? run.allMet() ? Main.OK : Main.NOT_MET : Main.BAD_USAGE;
+		boolean regressed = past.report(run, output.isEmpty() && format.name().equals("table") ? console.out() : console.err());
+		return problems.isEmpty() ? run.allMet() && !regressed ? Main.OK : Main.NOT_MET : Main.BAD_USAGE;
 	}
 
 	private static EvidenceFormat format(String name) throws InputException {
