@@ -15,11 +15,11 @@ import java.util.stream.Stream;
 import org.apache.commons.math3.fraction.BigFraction;
 import org.eclipse.emf.common.notify.Notifier;
 import org.eclipse.emf.ecore.EObject;
-import org.eclipse.emf.ecore.xmi.XMIResource;
 
 import tapwright.dsp.verify.Effort;
 import tapwright.model.ModelFactory;
 import tapwright.model.Revision;
+import tapwright.model.io.ModelResource;
 
 /** Adds revisions in a process of its own: folder, number of the process, number of revisions. Prints the hash of each that is there. */
 public final class RecordingProcess {
@@ -53,7 +53,7 @@ public final class RecordingProcess {
 	// By what is loaded here: a test launcher may hide the class path from the system property.
 	private static String classPath() {
 		return Stream.of(RecordingProcess.class, CanonicalForm.class, ModelFactory.class, Effort.class, EObject.class, Notifier.class,
-				XMIResource.class, BigFraction.class).map(RecordingProcess::location).distinct()
+				ModelResource.class.getSuperclass(), BigFraction.class).map(RecordingProcess::location).distinct()
 				.collect(Collectors.joining(File.pathSeparator));
 	}
 
