@@ -12,6 +12,8 @@ import java.security.NoSuchAlgorithmException;
 import java.util.Comparator;
 import java.util.HexFormat;
 import java.util.List;
+import java.util.Set;
+import java.util.function.Predicate;
 
 import org.eclipse.emf.common.util.Enumerator;
 import org.eclipse.emf.ecore.EObject;
@@ -58,25 +60,38 @@ public final class CanonicalForm {
 	 *             when a text holds half of a surrogate pair, which has no UTF-8
 	 */
 	public static byte[] of(EObject root) {
+		return of(root, feature -> true);
+	}
+
+	private static byte[] of(EObject root, Predicate<EStructuralFeature> included) {
 		var form = new CanonicalForm();
 		form.ascii(HEADER);
-		form.object(root);
+		form.object(root, included);
 		return form.bytes.toByteArray();
 	}
 
 	/** SHA-256 of the form, 64 hexadecimal digits in lower case. */
 	public static String hash(EObject root) {
+		return digest(of(root));
+	}
+
+	/** The hash of an object as if it had only the given features, and these in full. */
+	static String hash(EObject root, Set<? extends EStructuralFeature> features) {
+		return digest(of(root, features::contains));
+	}
+
+	private static String digest(byte[] form) {
 		try {
-			return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(of(root)));
+			return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(form));
 		} catch (NoSuchAlgorithmException e) {
 			throw new IllegalStateException("every Java platform has SHA-256", e);
 		}
 	}
 
-	private void object(EObject object) {
+	private void object(EObject object, Predicate<EStructuralFeature> included) {
 		ascii("(" + object.eClass().getName() + "\n");
 		List<EStructuralFeature> features = object.eClass().getEAllStructuralFeatures().stream()
-				.filter(feature -> !feature.isTransient() && object.eIsSet(feature))
+				.filter(feature -> !feature.isTransient() && included.test(feature) && object.eIsSet(feature))
 				.sorted(Comparator.comparing(EStructuralFeature::getName)).toList();
 		for (EStructuralFeature feature : features) {
 			List<?> values = feature.isMany() ? (List<?>) object.eGet(feature) : List.of(object.eGet(feature));
@@ -88,7 +103,7 @@ public final class CanonicalForm {
 
 	private void value(Object value) {
 		switch (value) {
-		case EObject object -> object(object);
+		case EObject object -> object(object, feature -> true);
 		case String text -> text(text);
 		case Integer number -> ascii("i " + number + "\n");
 		case BigInteger number -> ascii("i " + number + "\n");

@@ -34,6 +34,9 @@ public record RevisionStore(Path folder) {
 
 	private static final Pattern NAME = Pattern.compile("(\\d{4,7})-([0-9a-f]{12})\\." + EXTENSION);
 
+	private record Checked(Revision revision, String hash) {
+	}
+
 	private record Reading(RecordedRevision revision, HistoryProblem problem) {
 	}
 
@@ -64,11 +67,11 @@ public record RevisionStore(Path folder) {
 	 *             when it cannot be read or is not what was recorded
 	 */
 	public static Revision load(RecordedRevision recorded) throws IOException {
-		Revision revision = checked(Files.readAllBytes(recorded.file()), recorded.file());
-		if (!CanonicalForm.hash(revision).equals(recorded.hash())) {
+		Checked checked = check(Files.readAllBytes(recorded.file()), recorded.file());
+		if (!checked.hash().equals(recorded.hash())) {
 			throw damaged(recorded.file(), "it was changed since it was listed");
 		}
-		return revision;
+		return checked.revision();
 	}
 
 	/**
@@ -78,6 +81,10 @@ public record RevisionStore(Path folder) {
 	 *             when it is not what was recorded under that name
 	 */
 	public static Revision checked(byte[] content, Path file) throws ModelFileException {
+		return check(content, file).revision();
+	}
+
+	private static Checked check(byte[] content, Path file) throws ModelFileException {
 		Matcher name = NAME.matcher(file.getFileName().toString());
 		if (!name.matches()) {
 			throw damaged(file, "its name is not a sequence number and a hash, as in 0001-0123456789ab." + EXTENSION);
@@ -97,7 +104,7 @@ public record RevisionStore(Path folder) {
 			throw damaged(file, "its content has the hash " + hash.substring(0, RecordedRevision.SHORT_DIGITS) + ", not "
 					+ name.group(2) + ": it was edited, damaged or renamed");
 		}
-		return revision;
+		return new Checked(revision, hash);
 	}
 
 	/**
@@ -117,7 +124,7 @@ public record RevisionStore(Path folder) {
 		Path file = folder.resolve(
 				"%s-%s.%s".formatted(padded(sequence), hash.substring(0, RecordedRevision.SHORT_DIGITS), EXTENSION));
 		byte[] content = ModelFiles.toBytes(revision);
-		if (!CanonicalForm.hash(checked(content, file)).equals(hash)) {
+		if (!check(content, file).hash().equals(hash)) {
 			throw new IOException(file + ": the revision would not be read back as it is; nothing was recorded");
 		}
 		AddedFiles.add(file, content);
@@ -143,10 +150,10 @@ public record RevisionStore(Path folder) {
 
 	private static Reading reading(Path file) {
 		try {
-			Revision revision = checked(Files.readAllBytes(file), file);
+			Checked checked = check(Files.readAllBytes(file), file);
 			String name = file.getFileName().toString();
 			int sequence = Integer.parseInt(name.substring(0, name.indexOf('-')));
-			return new Reading(RecordedRevision.of(revision, CanonicalForm.hash(revision), file, sequence), null);
+			return new Reading(RecordedRevision.of(checked.revision(), checked.hash(), file, sequence), null);
 		} catch (ModelFileException e) {
 			return new Reading(null, new HistoryProblem(file,
 					(e.line() > 0 ? "line " + e.line() + ": " : "") + e.reason() + "; bring the file back from version control"));

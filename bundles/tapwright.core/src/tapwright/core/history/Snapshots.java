@@ -14,6 +14,7 @@ import java.util.regex.Pattern;
 import org.apache.commons.math3.fraction.BigFraction;
 import org.eclipse.emf.ecore.EAttribute;
 import org.eclipse.emf.ecore.EObject;
+import org.eclipse.emf.ecore.EReference;
 import org.eclipse.emf.ecore.util.EcoreUtil;
 
 import tapwright.core.InputException;
@@ -27,6 +28,7 @@ import tapwright.dsp.verify.Proof;
 import tapwright.model.Evidence;
 import tapwright.model.Filter;
 import tapwright.model.ModelFactory;
+import tapwright.model.ModelPackage;
 import tapwright.model.Parameter;
 import tapwright.model.Result;
 import tapwright.model.Revision;
@@ -36,6 +38,9 @@ import tapwright.model.Verdict;
 public final class Snapshots {
 
 	private static final Pattern NAME = Pattern.compile("[A-Za-z][A-Za-z0-9_]*");
+
+	private static final Set<EReference> CONTENT = Set.of(ModelPackage.Literals.REVISION__FILTER,
+			ModelPackage.Literals.REVISION__PARAMETERS);
 
 	private Snapshots() {
 	}
@@ -69,10 +74,7 @@ public final class Snapshots {
 
 	/** Hash of filter and parameters alone. */
 	public static String contentHash(Revision revision) {
-		Revision content = ModelFactory.eINSTANCE.createRevision();
-		content.setFilter(EcoreUtil.copy(revision.getFilter()));
-		content.getParameters().addAll(EcoreUtil.copyAll(revision.getParameters()));
-		return CanonicalForm.hash(content);
+		return CanonicalForm.hash(revision, CONTENT);
 	}
 
 	/** What was proven, as it is kept. */
