@@ -132,9 +132,12 @@ public final class PlotSvg {
 		switch (curve.style()) {
 		case LINE, GUIDE -> line("<path d=\"%s\" fill=\"none\" stroke=\"%s\" stroke-width=\"%s\" stroke-dasharray=\"%s\"/>",
 				joined(curve), color, curve.style() == Curve.Style.GUIDE ? "0.7" : "1.6", DASHES[index % DASHES.length]);
-		case STEMS -> each(curve, (x, y) -> line("<path d=\"M%s %sV%s\" stroke=\"%s\"/>", n(x), n(projection.row(0)), n(y), color));
-		case CIRCLES -> each(curve, (x, y) -> line("<circle cx=\"%s\" cy=\"%s\" r=\"4\" fill=\"none\" stroke=\"%s\"/>", n(x), n(y), color));
-		case CROSSES -> each(curve, (x, y) -> line("<path d=\"M%s %sl8 8m0 -8l-8 8\" stroke=\"%s\"/>", n(x - 4), n(y - 4), color));
+		case STEMS -> each(curve,
+				(x, y) -> line("<path d=\"M%s %sV%s\" stroke=\"%s\"/>", n(x), n(projection.row(0)), n(y), color));
+		case CIRCLES -> each(curve,
+				(x, y) -> line("<circle cx=\"%s\" cy=\"%s\" r=\"4\" fill=\"none\" stroke=\"%s\"/>", n(x), n(y), color));
+		case CROSSES -> each(curve,
+				(x, y) -> line("<path d=\"M%s %sl8 8m0 -8l-8 8\" stroke=\"%s\"/>", n(x - 4), n(y - 4), color));
 		}
 	}
 

@@ -22,6 +22,7 @@ import org.eclipse.swt.widgets.Label;
 import org.eclipse.swt.widgets.Text;
 import org.eclipse.swt.widgets.ToolBar;
 import org.eclipse.ui.IWorkbenchCommandConstants;
+import org.eclipse.ui.forms.widgets.ImageHyperlink;
 import org.eclipse.ui.ide.IDE;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
@@ -99,6 +100,9 @@ class FilterEditorTest {
 		var editor = (FilterEditor) IDE.openEditor(Ui.page(), sample.problem());
 		assertEquals("requirements", editor.getActivePageInstance().getId());
 		assertEquals("-3", Ui.field(container(editor), Text.class, "max").getText());
+		editor.setActivePage("filter");
+		Ui.waitUntil("the problem among what needs attention", () -> Ui.all(container(editor), ImageHyperlink.class).stream()
+				.anyMatch(link -> link.getText().startsWith("ceiling: ") && link.getSize().y > 0));
 	}
 
 	@Test

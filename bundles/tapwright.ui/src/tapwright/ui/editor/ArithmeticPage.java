@@ -46,7 +46,8 @@ final class ArithmeticPage extends FilterEditorPage {
 		GridDataFactory.fillDefaults().grab(true, true).applyTo(stack);
 		without = toolkit.createComposite(stack);
 		GridLayoutFactory.swtDefaults().applyTo(without);
-		toolkit.createLabel(without, "The filter runs with the stored numbers as they are. Word lengths, overflow and noise are not considered.");
+		toolkit.createLabel(without, "The filter runs with the stored numbers as they are. "
+				+ "Word lengths, overflow and noise are not considered.");
 		Button state = toolkit.createButton(without, "State the Arithmetic", SWT.PUSH);
 		state.addListener(SWT.Selection, event -> set(start()));
 		with = toolkit.createComposite(stack);
@@ -60,7 +61,7 @@ final class ArithmeticPage extends FilterEditorPage {
 		cost = toolkit.createLabel(right, "", SWT.WRAP);
 		GridDataFactory.fillDefaults().grab(true, true).hint(200, SWT.DEFAULT).applyTo(cost);
 		Composite below = Sections.create(toolkit, with, "Number formats",
-				"An empty word means exact numbers. Coefficients are rounded to the nearest step; that is what ships and what is proven.",
+				"An empty word means exact numbers. Coefficients are rounded to the nearest step: so they ship, so they are proven.",
 				true);
 		GridDataFactory.fillDefaults().grab(true, true).span(2, 1).applyTo(below.getParent());
 		formats = new FormatTable(getEditor().document(), toolkit, below);

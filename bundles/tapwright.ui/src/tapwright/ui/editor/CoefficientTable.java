@@ -53,7 +53,8 @@ final class CoefficientTable {
 		GridLayoutFactory.fillDefaults().margins(2, 2).spacing(0, 2).applyTo(parent);
 		var tools = new ToolBar(parent, SWT.FLAT | SWT.RIGHT);
 		item(tools, Icons.COPY, "Copy", "Copy all numbers, one a line", this::copy);
-		item(tools, Icons.PASTE, "Replace by pasted", "Replace all numbers by those on the clipboard; can be undone", this::paste);
+		item(tools, Icons.PASTE, "Replace by pasted", "Replace all numbers by those on the clipboard; can be undone",
+				this::paste);
 		var table = toolkit.createTable(parent, SWT.VIRTUAL | SWT.FULL_SELECTION | SWT.BORDER);
 		table.setHeaderVisible(true);
 		GridDataFactory.fillDefaults().grab(true, true).hint(300, 5 * table.getItemHeight()).applyTo(table);

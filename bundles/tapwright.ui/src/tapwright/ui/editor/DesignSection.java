@@ -151,7 +151,8 @@ final class DesignSection {
 	private void run(Designer designer) {
 		compute.setEnabled(false);
 		say("Computing...");
-		Job job = Job.create("Computing the coefficients of " + page.filter().getName(), (IJobFunction) monitor -> run(designer, monitor));
+		Job job = Job.create("Computing the coefficients of " + page.filter().getName(),
+				(IJobFunction) monitor -> run(designer, monitor));
 		job.setUser(true);
 		job.schedule();
 	}

@@ -97,11 +97,13 @@ final class FilterPage extends FilterEditorPage {
 		}
 		problems.stream().limit(LONGEST_LIST).forEach(problem -> link(Icons.get(Verdicts.icon(Verdict.UNPROVEN)),
 				problem.describe(), problem.requirement()));
-		open.stream().limit(LONGEST_LIST).forEach(found -> link(Verdicts.image(found.proof().verdict()), found.message(), found.id()));
+		open.stream().limit(LONGEST_LIST)
+				.forEach(found -> link(Verdicts.image(found.proof().verdict()), found.message(), found.id()));
 		int more = open.size() + problems.size() - 2 * LONGEST_LIST;
 		if (more > 0) {
 			toolkit.createLabel(attention, more + " more on the page Evidence");
 		}
+		attention.requestLayout(); // a reflow alone is ignored before the form was first laid out
 		getManagedForm().reflow(true);
 	}
 

@@ -176,7 +176,8 @@ final class FormatTable {
 			} else if (typed.isEmpty() && attribute == Literals.FORMAT__WORD) {
 				execute(SetCommand.create(document.domain(), arithmetic, place, SetCommand.UNSET_VALUE));
 			} else {
-				execute(SetCommand.create(document.domain(), format.get(), attribute, typed.isEmpty() ? SetCommand.UNSET_VALUE : typed));
+				Object next = typed.isEmpty() ? SetCommand.UNSET_VALUE : typed;
+				execute(SetCommand.create(document.domain(), format.get(), attribute, next));
 			}
 		}
 	}

@@ -48,7 +48,8 @@ final class PortfolioPage extends FormPage {
 		Composite numbers = Sections.create(toolkit, body, "Parameters",
 				"Numbers that filters share. A change is proven in every filter that uses them as soon as it is saved.", true);
 		parameters = new ObjectTable(editor.document(), toolkit, numbers, ModelPackage.Literals.PORTFOLIO__PARAMETERS);
-		Composite targets = Sections.create(toolkit, body, "Processors", "What the filters run on, and what it offers them.", false);
+		Composite targets = Sections.create(toolkit, body, "Processors",
+				"What the filters run on, and what it offers them.", false);
 		processors = new ObjectTable(editor.document(), toolkit, targets, ModelPackage.Literals.PORTFOLIO__PROCESSORS);
 		GridDataFactory.fillDefaults().grab(true, false).span(2, 1).applyTo(targets.getParent());
 		refresh();

@@ -54,7 +54,8 @@ public final class RowsField {
 		String header = columns.stream().map(FeatureWords::label).collect(Collectors.joining("; "));
 		text.setToolTipText(Meta.documentation(feature) + "\nOne row each: " + header);
 		text.setData("feature", feature.getName());
-		GridDataFactory.fillDefaults().grab(true, false).indent(GAP, 0).span(2, 1).hint(90, ROWS * text.getLineHeight()).applyTo(text);
+		GridDataFactory.fillDefaults().grab(true, false).indent(GAP, 0).span(2, 1)
+				.hint(90, ROWS * text.getLineHeight()).applyTo(text);
 		toolkit.createLabel(parent, "");
 		Label hint = toolkit.createLabel(parent, header);
 		GridDataFactory.fillDefaults().indent(GAP, 0).span(2, 1).applyTo(hint);
@@ -127,7 +128,8 @@ public final class RowsField {
 
 	private Optional<String> problem(int number, String[] cells) {
 		if (cells.length > columns.size()) {
-			return Optional.of("row " + number + " has " + cells.length + " numbers, but there are " + columns.size() + " columns");
+			return Optional.of(
+					"row " + number + " has " + cells.length + " numbers, but there are " + columns.size() + " columns");
 		}
 		for (int k = 0; k < cells.length; k++) {
 			Optional<String> problem = QuantityCheck.problem(access, columns.get(k), cells[k]);

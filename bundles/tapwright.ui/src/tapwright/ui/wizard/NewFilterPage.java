@@ -82,8 +82,8 @@ final class NewFilterPage extends WizardPage {
 
 	private static Text text(Composite parent, int style, int lines) {
 		var text = new Text(parent, style | SWT.BORDER);
-		GridDataFactory.fillDefaults().grab(true, lines > 1).hint(SWT.DEFAULT, lines > 1 ? lines * text.getLineHeight() : SWT.DEFAULT)
-				.applyTo(text);
+		int height = lines > 1 ? lines * text.getLineHeight() : SWT.DEFAULT;
+		GridDataFactory.fillDefaults().grab(true, lines > 1).hint(SWT.DEFAULT, height).applyTo(text);
 		return text;
 	}
 
