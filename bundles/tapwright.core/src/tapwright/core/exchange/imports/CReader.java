@@ -4,11 +4,13 @@ package tapwright.core.exchange.imports;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 
 import tapwright.core.InputException;
 import tapwright.core.exchange.imports.CTokens.Kind;
 import tapwright.core.exchange.imports.CTokens.Token;
+import tapwright.dsp.arithmetic.NumberFormat;
 
 /**
  * Initialiser lists of a C or C++ source. Lists that begin with something else than a number are no coefficients and are passed
@@ -40,6 +42,11 @@ final class CReader {
 		int at = 0;
 		while (at < reader.tokens.size()) {
 			at = reader.tokens.get(at).is("{") ? reader.list(at) : at + 1;
+		}
+		Optional<Integer> step = TextReader.step(source.text());
+		if (step.isPresent() && reader.tables.size() == 1 && reader.tables.getFirst().format().isPresent()) {
+			NumberFormat type = reader.tables.getFirst().format().get();
+			return List.of(reader.tables.getFirst().with(Optional.of(new NumberFormat(type.word(), step.get(), type.signed())), List.of()));
 		}
 		return reader.tables;
 	}
@@ -98,6 +105,8 @@ final class CReader {
 				opening--;
 			}
 			name = opening;
+		} else if (assigned && !tokens.get(Math.max(name - 1, 0)).is(">")) {
+			return null; // a structure; containers have their type in angle brackets
 		}
 		if (name <= start || tokens.get(name).kind() != Kind.NAME || NO_NAMES.contains(tokens.get(name).text()) || !assigned && name == start + 1) {
 			return null;

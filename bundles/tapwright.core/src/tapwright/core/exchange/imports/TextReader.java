@@ -17,7 +17,7 @@ import tapwright.dsp.arithmetic.NumberFormat;
  */
 final class TextReader {
 
-	private static final Pattern STEP = Pattern.compile("(?m)^(?:#|//) one step (?:of the integers )?is worth: 2\\^(-?\\d{1,4})$");
+	private static final Pattern STEP = Pattern.compile("(?m)^(?:(?:#|//) one step (?:of the integers )?is worth: |/\\* Integers in steps of )2\\^(-?\\d{1,3})(?:\\. \\*/)?$");
 	private static final Pattern DECIMAL_COMMA = Pattern.compile("[-+]?\\d*,\\d+([eE][-+]?\\d{1,4})?");
 	/** More columns than this without names are the lines of one list. */
 	private static final int MOST_COLUMNS = 3;
