@@ -43,7 +43,7 @@ final class VerifyVerb implements Verb {
 				Each PATH is a portfolio or any other folder (all its filters), a NAME.filter file, or an interchange
 				JSON file. A requirement is met or missed only when that is proven for exactly the numbers stored.
 
-				  --format FORMAT       table (for reading; the default), json or junit
+				  --format FORMAT       table (for reading; the default), json, junit or sarif
 				  --output FILE         writes there instead of the terminal
 				  --shard I/N           verifies only the I-th of N parts, to share the work between machines
 				  --time-limit SECONDS  gives up on a requirement after that time and calls it unproven; 10 by default

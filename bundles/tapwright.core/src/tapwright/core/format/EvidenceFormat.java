@@ -17,7 +17,7 @@ public interface EvidenceFormat {
 
 	/** All formats. */
 	static List<EvidenceFormat> all() {
-		return List.of(new TableFormat(), new JsonFormat(), new JUnitFormat());
+		return List.of(new TableFormat(), new JsonFormat(), new JUnitFormat(), new SarifFormat());
 	}
 
 	/** The format of a name. */
