@@ -48,10 +48,7 @@ public final class EvidenceCache {
 				keep(known);
 			}
 		}
-		// What is wrong with the input may depend on parameters that have no value, which the hash does not cover.
-		if (known.problems().isEmpty()) {
-			answers.put(question.hash(), known);
-		}
+		answers.put(question.hash(), known);
 		return known;
 	}
 
@@ -89,7 +86,7 @@ public final class EvidenceCache {
 
 	// A faster machine, or more time, may prove what this one could not: so 'unproven' lasts for a session only.
 	private static boolean isFinal(FilterEvidence evidence) {
-		return evidence.problems().isEmpty() && evidence.requirements().stream()
+		return evidence.requirements().stream()
 				.noneMatch(requirement -> requirement.proof().verdict() == Verdict.UNPROVEN);
 	}
 }

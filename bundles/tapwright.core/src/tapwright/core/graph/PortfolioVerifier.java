@@ -3,6 +3,7 @@ package tapwright.core.graph;
 
 import java.io.IOException;
 import java.nio.file.NoSuchFileException;
+import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Collections;
 import java.util.List;
@@ -16,17 +17,24 @@ import java.util.stream.Collectors;
 import java.util.stream.Stream;
 
 import tapwright.core.InputException;
+import tapwright.core.load.Demands;
+import tapwright.core.load.Loads;
+import tapwright.core.path.VerifiedPath;
 import tapwright.core.portfolio.FilePartners;
 import tapwright.core.portfolio.PortfolioContent;
+import tapwright.core.problem.Contradictions;
+import tapwright.core.problem.DesignProblems;
 import tapwright.core.problem.Problem;
 import tapwright.core.problem.Problems;
 import tapwright.core.quantity.Expression;
+import tapwright.core.quantity.Numbers;
 import tapwright.core.quantity.Parameters;
 import tapwright.core.verify.FilterEvidence;
 import tapwright.core.verify.FilterQuestion;
 import tapwright.dsp.Progress;
 import tapwright.dsp.verify.Effort;
 import tapwright.model.Filter;
+import tapwright.model.ModelFactory;
 import tapwright.model.Portfolio;
 import tapwright.model.io.ModelFileException;
 import tapwright.model.io.ModelFiles;
@@ -34,7 +42,7 @@ import tapwright.model.io.ModelFiles;
 /** Takes a portfolio from one verified state to the next, verifying only what a change can have touched. */
 public final class PortfolioVerifier {
 
-	private record Root(Expression.Names parameters, List<Problem> problems) {
+	private record Root(Portfolio portfolio, Expression.Names parameters, List<Problem> problems) {
 	}
 
 	private final PortfolioContent content;
@@ -64,8 +72,7 @@ public final class PortfolioVerifier {
 	 *             when the folder cannot be listed
 	 */
 	public VerifiedPortfolio update(VerifiedPortfolio before, Change change, Progress progress) throws IOException {
-		Root root = change.everything() || touches(change, ModelFiles.PORTFOLIO_FILE) ? readRoot()
-				: new Root(before.parameters(), before.portfolioProblems());
+		Root root = readRoot();
 		Collection<String> affected = affected(before, change, root.parameters());
 		SortedMap<String, VerifiedFilter> filters = new TreeMap<>();
 		if (!change.everything()) {
@@ -75,7 +82,17 @@ public final class PortfolioVerifier {
 		for (VerifiedFilter filter : verify(List.copyOf(affected), root.parameters(), progress)) {
 			filters.put(filter.path(), filter);
 		}
-		var after = new VerifiedPortfolio(root.parameters(), root.problems(), filters);
+		boolean rootMayDiffer = change.everything() || touches(change, ModelFiles.PORTFOLIO_FILE);
+		var portfolio = new PortfolioWide(root.portfolio(), root.parameters(), filters.values());
+		Loads loads = portfolio.loads();
+		Set<String> touched = Stream.concat(affected.stream(), change.removed().stream())
+				.flatMap(path -> Stream.of(before.filter(path), Optional.ofNullable(filters.get(path))))
+				.flatMap(Optional::stream).map(VerifiedFilter::name).collect(Collectors.toSet());
+		List<VerifiedPath> paths = portfolio.paths(rootMayDiffer ? List.of() : before.paths(), touched, question -> {
+			progress.checkCancelled();
+			return cache.answer(question, new Effort(progress, Effort.STANDARD.timeLimit()));
+		});
+		var after = new VerifiedPortfolio(root.parameters(), root.problems(), filters, loads, paths);
 		forgetUnused(after, change.everything());
 		return after;
 	}
@@ -131,11 +148,11 @@ public final class PortfolioVerifier {
 			Portfolio portfolio = ModelFiles.parse(content.read(ModelFiles.PORTFOLIO_FILE), ModelFiles.PORTFOLIO_FILE,
 					Portfolio.class);
 			var parameters = new Parameters(portfolio.getParameters());
-			return new Root(parameters, Problems.of(parameters));
+			return new Root(portfolio, parameters, Problems.of(parameters));
 		} catch (NoSuchFileException e) {
-			return new Root(Parameters.NONE, List.of());
+			return new Root(ModelFactory.eINSTANCE.createPortfolio(), Parameters.NONE, List.of());
 		} catch (IOException e) {
-			return new Root(name -> {
+			return new Root(ModelFactory.eINSTANCE.createPortfolio(), name -> {
 				throw new InputException("", "the parameter '" + name + "' is not known, because " + ModelFiles.PORTFOLIO_FILE
 						+ " cannot be read");
 			}, List.of(unreadable(e)));
@@ -160,19 +177,34 @@ public final class PortfolioVerifier {
 		try {
 			filter = ModelFiles.parse(content.read(path), path, Filter.class);
 		} catch (IOException e) {
-			return new VerifiedFilter(path, "", "", Set.of(), Set.of(), Optional.empty(), List.of(unreadable(e)));
+			return VerifiedFilter.unreadable(path, unreadable(e));
 		}
 		if (filter.getName() == null) {
 			filter.setName(FilePartners.nameOf(path));
 		}
 		FilterQuestion question = FilterQuestion.of(filter, parameters, new FilePartners(content, parameters));
 		FilterEvidence evidence = cache.answer(question, effort);
-		return new VerifiedFilter(path, question.name(), filter.getIdentity() == null ? "" : filter.getIdentity(),
-				question.parameters(), question.partners(), Optional.of(evidence), Problems.of(evidence));
+		var problems = new ArrayList<>(Problems.of(evidence));
+		Set<String> used = new TreeSet<>(question.parameters());
+		Expression.Names recorder = name -> {
+			used.add(name); // also when it has no value: it may get one
+			return parameters.value(name);
+		};
+		problems.addAll(DesignProblems.of(filter, question.name(), recorder));
+		problems.addAll(Contradictions.of(filter, question.name(), new Numbers(parameters)));
+		Optional<Demands> demands = question.subject()
+				.map(subject -> Demands.of(filter, question.name(), subject, new Numbers(recorder)));
+		demands.ifPresent(found -> problems.addAll(found.problems()));
+		return new VerifiedFilter(path, question.name(), filter.getIdentity() == null ? "" : filter.getIdentity(), used,
+				question.partners(), Optional.of(evidence), question.subject(), demands.map(Demands::demands).orElse(List.of()),
+				problems);
 	}
 
 	private void forgetUnused(VerifiedPortfolio state, boolean everything) {
-		Set<String> used = state.filters().stream().flatMap(filter -> filter.evidence().stream()).map(FilterEvidence::hash)
+		Set<String> used = Stream
+				.concat(state.filters().stream().flatMap(filter -> filter.evidence().stream()),
+						state.paths().stream().flatMap(path -> path.evidence().stream()))
+				.map(FilterEvidence::hash)
 				.collect(Collectors.toSet());
 		cache.retain(used);
 		if (everything) {

@@ -10,6 +10,9 @@ import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 
+import tapwright.core.load.Loads;
+import tapwright.core.load.ProcessorLoad;
+import tapwright.core.path.VerifiedPath;
 import tapwright.core.problem.Duplicates;
 import tapwright.core.problem.Problem;
 import tapwright.core.quantity.Expression;
@@ -19,17 +22,23 @@ import tapwright.model.io.ModelFiles;
 public final class VerifiedPortfolio {
 
 	/** No files. */
-	public static final VerifiedPortfolio EMPTY = new VerifiedPortfolio(Expression.Names.NONE, List.of(), new TreeMap<>());
+	public static final VerifiedPortfolio EMPTY = new VerifiedPortfolio(Expression.Names.NONE, List.of(), new TreeMap<>(),
+			Loads.NONE, List.of());
 
 	private final Expression.Names parameters;
 	private final List<Problem> portfolioProblems;
 	private final SortedMap<String, VerifiedFilter> filters;
+	private final Loads loads;
+	private final List<VerifiedPath> paths;
 	private final Map<String, List<Problem>> problems;
 
-	VerifiedPortfolio(Expression.Names parameters, List<Problem> portfolioProblems, SortedMap<String, VerifiedFilter> filters) {
+	VerifiedPortfolio(Expression.Names parameters, List<Problem> portfolioProblems, SortedMap<String, VerifiedFilter> filters,
+			Loads loads, List<VerifiedPath> paths) {
 		this.parameters = parameters;
 		this.portfolioProblems = List.copyOf(portfolioProblems);
 		this.filters = Collections.unmodifiableSortedMap(filters);
+		this.loads = loads;
+		this.paths = List.copyOf(paths);
 		this.problems = collect();
 	}
 
@@ -53,6 +62,16 @@ public final class VerifiedPortfolio {
 		return filters.values().stream().filter(filter -> filter.parameters().contains(parameter)).map(VerifiedFilter::path).toList();
 	}
 
+	/** Every processor with what its filters ask of it, in the order of the portfolio. */
+	public List<ProcessorLoad> loads() {
+		return loads.loads();
+	}
+
+	/** All signal paths in the order of the portfolio. */
+	public List<VerifiedPath> paths() {
+		return paths;
+	}
+
 	/** The problems of a file: of a filter, or of the portfolio's root file. */
 	public List<Problem> problems(String path) {
 		return problems.getOrDefault(path, List.of());
@@ -63,19 +82,20 @@ public final class VerifiedPortfolio {
 		return problems;
 	}
 
-	List<Problem> portfolioProblems() {
-		return portfolioProblems;
-	}
-
 	private Map<String, List<Problem>> collect() {
 		var collected = new TreeMap<String, List<Problem>>();
-		if (!portfolioProblems.isEmpty()) {
-			collected.put(ModelFiles.PORTFOLIO_FILE, portfolioProblems);
+		var ofRoot = new ArrayList<Problem>(portfolioProblems);
+		ofRoot.addAll(loads.problems());
+		paths.forEach(path -> ofRoot.addAll(path.problems()));
+		if (!ofRoot.isEmpty()) {
+			collected.put(ModelFiles.PORTFOLIO_FILE, ofRoot);
 		}
 		var claims = new ArrayList<Duplicates.Claim>();
 		for (VerifiedFilter filter : filters.values()) {
-			if (!filter.ownProblems().isEmpty()) {
-				collected.put(filter.path(), new ArrayList<>(filter.ownProblems()));
+			var ofFilter = new ArrayList<Problem>(filter.ownProblems());
+			ofFilter.addAll(loads.problems(filter.demands()));
+			if (!ofFilter.isEmpty()) {
+				collected.put(filter.path(), ofFilter);
 			}
 			if (filter.evidence().isPresent()) {
 				claims.add(new Duplicates.Claim(filter.path(), filter.name(), filter.identity()));

@@ -17,7 +17,19 @@ public enum ProblemKind {
 	/** Two filters have the same identity or the same name. */
 	DUPLICATE,
 	/** A parameter of the portfolio has no value. */
-	PARAMETER;
+	PARAMETER,
+	/** The coefficients were not computed by the design as it is now. */
+	STALE,
+	/** Two gain limits that no filter can meet together. */
+	CONTRADICTORY,
+	/** A filter that nothing is asked of. */
+	EMPTY,
+	/** A filter is deployed where it cannot run as it is stated. */
+	DEPLOYMENT,
+	/** A processor has more to do, or more to keep, than it can. */
+	OVERLOAD,
+	/** A signal path is not proven from end to end. */
+	PATH;
 
 	/** The code: the name in lower case. */
 	public String code() {

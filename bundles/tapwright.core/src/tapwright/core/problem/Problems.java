@@ -36,7 +36,7 @@ public final class Problems {
 			}
 		}
 		if (evidence.requirements().isEmpty() && evidence.problems().isEmpty()) {
-			problems.add(new Problem(ProblemKind.UNPROVEN, Severity.SHOULD, evidence.name(), "",
+			problems.add(new Problem(ProblemKind.EMPTY, Severity.SHOULD, evidence.name(), "",
 					"the filter has no requirements, so nothing is proven of it; state what it is meant to do", location(""), 0,
 					Optional.empty()));
 		}

@@ -61,7 +61,7 @@ public final class FilterQuestion {
 	private FilterQuestion(Filter filter, Numbers numbers, Map<String, ExactTaps> partners, Optional<Platform> platform,
 			Optional<Subject> subject, List<Statement> statements, List<InputProblem> problems) {
 		this.name = filter.getName() == null ? "" : filter.getName();
-		this.hash = hash(filter, numbers.used(), partners);
+		this.hash = hash(filter, numbers.used(), partners, problems);
 		this.parameters = Set.copyOf(numbers.used().keySet());
 		this.partners = Set.copyOf(partners.keySet());
 		this.platform = platform;
@@ -134,7 +134,7 @@ public final class FilterQuestion {
 
 	/**
 	 * SHA-256 of all that the answer depends on, in hexadecimal digits: content of the filter, values of its parameters,
-	 * coefficients of its partners.
+	 * coefficients of its partners, and what is wrong with any of them.
 	 */
 	public String hash() {
 		return hash;
@@ -225,13 +225,15 @@ public final class FilterQuestion {
 		}
 	}
 
-	private static String hash(Filter filter, Map<String, Quantity> parameters, Map<String, ExactTaps> partners) {
+	private static String hash(Filter filter, Map<String, Quantity> parameters, Map<String, ExactTaps> partners,
+			List<InputProblem> problems) {
 		try {
 			MessageDigest digest = MessageDigest.getInstance("SHA-256");
 			digest.update(ModelFiles.toBytes(filter));
 			parameters.forEach((name, value) -> digest
 					.update((name + "=" + value.value() + "\n").getBytes(StandardCharsets.UTF_8)));
 			partners.forEach((name, taps) -> digest.update((name + "=" + taps + "\n").getBytes(StandardCharsets.UTF_8)));
+			problems.forEach(problem -> digest.update((problem.describe() + "\n").getBytes(StandardCharsets.UTF_8)));
 			return HexFormat.of().formatHex(digest.digest());
 		} catch (NoSuchAlgorithmException e) {
 			throw new IllegalStateException("every Java platform has SHA-256", e);

@@ -40,7 +40,7 @@ class ProblemsTest {
 	@Test
 	void speaksOfAFilterThatNothingIsAskedOf() throws InputException {
 		Problem problem = problems("\"coefficients\": {\"values\": [1]}").getFirst();
-		assertEquals(ProblemKind.UNPROVEN, problem.kind());
+		assertEquals(ProblemKind.EMPTY, problem.kind());
 		assertEquals(Severity.SHOULD, problem.severity());
 	}
 
