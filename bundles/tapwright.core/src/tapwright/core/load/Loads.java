@@ -27,6 +27,9 @@ import tapwright.model.Severity;
  */
 public record Loads(List<ProcessorLoad> loads, List<Problem> problems) {
 
+	/** Sums and differences of whole numbers below a million stay exact. */
+	private static final int DIGITS = 6;
+
 	/** No processors. */
 	public static final Loads NONE = new Loads(List.of(), List.of());
 
@@ -113,6 +116,6 @@ public record Loads(List<ProcessorLoad> loads, List<Problem> problems) {
 	}
 
 	private static String count(double number) {
-		return number >= 1e6 ? Words.of(number / 1e6, "") + " million" : Words.of(number, "");
+		return number >= 1e6 ? Words.of(number / 1e6, "", DIGITS) + " million" : Words.of(number, "", DIGITS);
 	}
 }
