@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
+import java.nio.file.attribute.PosixFileAttributeView;
 import java.nio.file.attribute.PosixFilePermissions;
 
 /** Writes files so that a reader, or a crash, finds the old content or the new, never a part. */
@@ -43,7 +44,7 @@ public final class AtomicFiles {
 
 	// Temporary files are private to their owner; the target keeps, or gets, what files usually have.
 	private static void keepPermissions(Path target, Path temporary) throws IOException {
-		if (!Files.getFileStore(target.getParent()).supportsFileAttributeView("posix")) {
+		if (Files.getFileAttributeView(temporary, PosixFileAttributeView.class) == null) {
 			return;
 		}
 		Files.setPosixFilePermissions(temporary, Files.exists(target) ? Files.getPosixFilePermissions(target)
