@@ -10,6 +10,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.nio.file.StandardOpenOption;
+import java.nio.file.attribute.PosixFileAttributeView;
 import java.nio.file.attribute.PosixFilePermissions;
 
 /** Adds files so that a reader, or a crash, finds the whole file or none, and so that nothing that exists is ever replaced. */
@@ -36,7 +37,7 @@ final class AddedFiles {
 				}
 				channel.force(true);
 			}
-			if (Files.getFileStore(folder).supportsFileAttributeView("posix")) {
+			if (Files.getFileAttributeView(temporary, PosixFileAttributeView.class) != null) {
 				Files.setPosixFilePermissions(temporary, PosixFilePermissions.fromString("rw-r--r--"));
 			}
 			name(temporary, file);
