@@ -67,7 +67,8 @@ final class ApplyVerb implements Verb {
 		FilterSource source = sources.getFirst();
 		Filter filter = source.filter().orElseThrow(() -> new InputException("", source.problem()));
 		Subject subject = FilterQuestion.of(filter, source.parameters(), source.partners()).subject()
-				.orElseThrow(() -> new InputException(file.toString(), "has no usable coefficients; 'tapwright verify' says why"));
+				.orElseThrow(() -> new InputException(file.toString(),
+						"has no usable coefficients; 'tapwright verify' says why"));
 		Path output = VerifyVerb.path(arguments.option("--output").orElseThrow());
 		SignalRun run;
 		try (var progress = new TerminalProgress(console)) {

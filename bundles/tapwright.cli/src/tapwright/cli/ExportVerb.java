@@ -39,7 +39,8 @@ final class ExportVerb implements Verb {
 
 	@Override
 	public String help() {
-		String formats = ExportFormat.all().stream().map(format -> "  %-16s %s".formatted(format.name(), format.label()))
+		String formats = ExportFormat.all().stream()
+				.map(format -> "  %-16s %s".formatted(format.name(), format.label()))
 				.collect(Collectors.joining("\n"));
 		return """
 				usage: tapwright export PATH... --as FORMAT[,FORMAT...] [--output DIR] [--check]
@@ -136,7 +137,8 @@ final class ExportVerb implements Verb {
 				for (ExportedFile file : format.write(filter)) {
 					Path other = owners.put(file.name(), result.source().file());
 					if (other != null && !other.equals(result.source().file())) {
-						throw new InputException(file.name(), "would be written for both " + other + " and " + result.source().file()
+						throw new InputException(file.name(), "would be written for both " + other + " and "
+								+ result.source().file()
 								+ "; rename one filter");
 					}
 					files.putIfAbsent(file, filter);
@@ -159,8 +161,10 @@ final class ExportVerb implements Verb {
 	private static List<ExportFormat> formats(String names) throws InputException {
 		var formats = new ArrayList<ExportFormat>();
 		for (String name : names.split(",", -1)) {
-			formats.add(ExportFormat.of(name.strip()).orElseThrow(() -> new InputException("--as", "there is no format '" + name
-					+ "'; known are " + ExportFormat.all().stream().map(ExportFormat::name).collect(Collectors.joining(", ")))));
+			formats.add(ExportFormat.of(name.strip())
+					.orElseThrow(() -> new InputException("--as", "there is no format '" + name
+					+ "'; known are " + ExportFormat.all().stream().map(ExportFormat::name)
+							.collect(Collectors.joining(", ")))));
 		}
 		return formats;
 	}

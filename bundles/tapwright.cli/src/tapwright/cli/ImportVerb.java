@@ -60,13 +60,16 @@ final class ImportVerb implements Verb {
 				  tapwright import table.bin --as binary --word 24 --fraction 23 --big-endian --into marram
 
 				exit codes: 0 done; 2 bad usage or input, nothing was written"""
-				.formatted(Arrays.stream(ImportFormat.values()).map(ImportFormat::key).collect(Collectors.joining(", ")));
+				.formatted(Arrays.stream(ImportFormat.values()).map(ImportFormat::key)
+						.collect(Collectors.joining(", ")));
 	}
 
 	@Override
 	public List<Option> options() {
-		return List.of(new Option("--into", true), new Option("--as", true), new Option("--word", true), new Option("--fraction", true),
-				new Option("--unsigned", false), new Option("--big-endian", false), new Option("--real", false), new Option("--rate", true));
+		return List.of(new Option("--into", true), new Option("--as", true), new Option("--word", true),
+				new Option("--fraction", true),
+				new Option("--unsigned", false), new Option("--big-endian", false), new Option("--real", false),
+						new Option("--rate", true));
 	}
 
 	@Override
@@ -82,7 +85,8 @@ final class ImportVerb implements Verb {
 		for (Planned planned : plan.filters()) {
 			console.out().println(describe(planned));
 		}
-		plan.skipped().forEach(file -> console.err().println("tapwright import: " + file + ": no array of numbers; skipped"));
+		plan.skipped().forEach(file -> console.err()
+				.println("tapwright import: " + file + ": no array of numbers; skipped"));
 		if (arguments.has("--into")) {
 			List<Path> written = plan.write(VerifyVerb.path(arguments.option("--into").orElseThrow()));
 			console.out().println(written.size() + (written.size() == 1 ? " file" : " files") + " written");
@@ -96,8 +100,10 @@ final class ImportVerb implements Verb {
 			return line.append(", a filter with all its requirements").toString();
 		}
 		ImportedTable table = planned.table().get();
-		line.append(table.name().isEmpty() ? "" : ", " + table.name()).append(", ").append(table.length()).append(" coefficients, ")
-				.append(table.isWhole() ? "integers of " + table.format().map(NumberFormat::text).orElse("") : "real numbers");
+		line.append(table.name().isEmpty() ? "" : ", " + table.name()).append(", ").append(table.length())
+				.append(" coefficients, ")
+				.append(table.isWhole() ? "integers of " + table.format().map(NumberFormat::text).orElse("")
+						: "real numbers");
 		if (table.symmetry() != Symmetry.NONE) {
 			line.append(", ").append(table.symmetry().name().toLowerCase(Locale.ROOT)).append(" symmetry");
 		}
@@ -110,10 +116,12 @@ final class ImportVerb implements Verb {
 		Optional<ImportFormat> format = Optional.empty();
 		if (arguments.has("--as")) {
 			String key = arguments.option("--as").orElseThrow();
-			format = Optional.of(ImportFormat.of(key).orElseThrow(() -> new InputException("--as", "there is no format '" + key + "'; known are "
+			format = Optional.of(ImportFormat.of(key)
+					.orElseThrow(() -> new InputException("--as", "there is no format '" + key + "'; known are "
 					+ Arrays.stream(ImportFormat.values()).map(ImportFormat::key).collect(Collectors.joining(", ")))));
 		}
-		return new ImportOptions(format, integer(arguments, "--word"), integer(arguments, "--fraction"), !arguments.has("--unsigned"),
+		return new ImportOptions(format, integer(arguments, "--word"), integer(arguments, "--fraction"),
+				!arguments.has("--unsigned"),
 				arguments.has("--big-endian"), arguments.has("--real"), rate(arguments));
 	}
 

@@ -19,8 +19,9 @@ public final class Main {
 	/** Exit code: the command line or its input was not understood. */
 	public static final int BAD_USAGE = 2;
 
-	private static final List<Verb> VERBS = List.of(new VerifyVerb(), new DesignVerb(), new ImportVerb(), new ExportVerb(), new ApplyVerb(), new ReportVerb(),
-			new RecordVerb(), new HistoryVerb(), new CompareVerb(), new BaselineVerb());
+	private static final List<Verb> VERBS = List.of(
+			new VerifyVerb(), new DesignVerb(), new ImportVerb(), new ExportVerb(), new ApplyVerb(),
+			new ReportVerb(), new RecordVerb(), new HistoryVerb(), new CompareVerb(), new BaselineVerb());
 
 	private Main() {
 	}

@@ -57,13 +57,15 @@ final class ReportVerb implements Verb {
 		if (!format.equals("html") && !format.equals("markdown")) {
 			throw new InputException("--format", "there is no format '" + format + "'; known are html, markdown");
 		}
-		Optional<Path> output = arguments.has("--output") ? Optional.of(VerifyVerb.path(arguments.option("--output").orElseThrow())) : Optional.empty();
+		Optional<Path> output = arguments.has("--output")
+				? Optional.of(VerifyVerb.path(arguments.option("--output").orElseThrow())) : Optional.empty();
 		if (format.equals("html") && output.isEmpty()) {
 			throw new InputException("--output", "is missing; give the folder of the report");
 		}
 		Report report;
 		try (var progress = new TerminalProgress(console)) {
-			report = Report.of(VerifyVerb.path(arguments.operands().getFirst()), new Effort(progress, Effort.STANDARD.timeLimit()));
+			report = Report.of(VerifyVerb.path(arguments.operands().getFirst()),
+					new Effort(progress, Effort.STANDARD.timeLimit()));
 		}
 		if (format.equals("html")) {
 			report.write(output.orElseThrow());

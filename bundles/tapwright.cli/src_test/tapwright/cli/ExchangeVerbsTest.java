@@ -40,7 +40,8 @@ class ExchangeVerbsTest {
 		assertTrue(out.toString().contains("8192, 16384, 8192"), out.toString());
 		assertEquals(Main.BAD_USAGE, run("export", file, "--as", "c,csv"));
 		assertTrue(err.toString().contains("--output"), err.toString());
-		assertEquals(Main.OK, run("export", file, "--as", "c-routine,csv", "--output", folder.resolve("out").toString()));
+		assertEquals(Main.OK, run("export", file, "--as", "c-routine,csv", "--output", folder.resolve("out")
+				.toString()));
 		assertEquals(List.of("smooth.c", "smooth.csv", "smooth.h", "smooth_selftest.c"), names("out"));
 	}
 
@@ -67,9 +68,11 @@ class ExchangeVerbsTest {
 		file("src/empty.h", "#define X 1\n");
 		String sources = folder.resolve("src").toString();
 		assertEquals(Main.OK, run("import", sources), err::toString);
-		assertTrue(out.toString().contains("even symmetry") && out.toString().contains("the binary point is a guess"), out.toString());
+		assertTrue(out.toString().contains("even symmetry") && out.toString().contains("the binary point is a guess"),
+				out.toString());
 		assertFalse(Files.exists(folder.resolve("new")));
-		assertEquals(Main.OK, run("import", sources, "--into", folder.resolve("new").toString(), "--rate", "8000"), err::toString);
+		assertEquals(Main.OK, run("import", sources, "--into", folder.resolve("new").toString(), "--rate", "8000"),
+				err::toString);
 		assertEquals(List.of("b.filter", "high.filter", "low.filter", "portfolio.tapwright"), names("new"));
 		assertTrue(err.toString().contains("empty.h"), err.toString());
 		assertEquals(Main.OK, run("export", folder.resolve("new/low.filter").toString(), "--as", "csv"), err::toString);
@@ -80,7 +83,8 @@ class ExchangeVerbsTest {
 	void nothingIsImportedWhenOneFileIsWrong() throws IOException {
 		file("src/a.c", "float good[] = { 1, 2 };\n");
 		file("src/b.c", "float bad[] = {\n 1, oops };\n");
-		assertEquals(Main.BAD_USAGE, run("import", folder.resolve("src").toString(), "--into", folder.resolve("new").toString()));
+		assertEquals(Main.BAD_USAGE, run("import", folder.resolve("src").toString(), "--into", folder.resolve("new")
+				.toString()));
 		assertTrue(err.toString().contains("b.c:2:5: 'oops' is no macro"), err.toString());
 		assertFalse(Files.exists(folder.resolve("new")));
 	}
@@ -98,7 +102,8 @@ class ExchangeVerbsTest {
 	void aSignalIsFilteredBitForBit() throws IOException {
 		String signal = file("in.csv", "32767\n0\n0\n");
 		String output = folder.resolve("out.csv").toString();
-		assertEquals(Main.OK, run("apply", file("a.json", FILTER), "--input", signal, "--output", output), err::toString);
+		assertEquals(Main.OK, run("apply", file("a.json", FILTER), "--input", signal, "--output", output),
+				err::toString);
 		// Computed by hand: 32767 / 4 = 8191.75 and 32767 / 2 = 16383.5, which ties to even.
 		assertEquals("8192\n16384\n8192\n", Files.readString(Path.of(output)));
 		assertTrue(out.toString().contains("bit for bit"), out.toString());
@@ -117,9 +122,12 @@ class ExchangeVerbsTest {
 	}
 
 	@ParameterizedTest
-	@CsvSource(delimiter = '|', value = { "export . | --as FORMAT", "export nowhere --as c | no such file", "export . --as z | known are",
-			"export . --as c --check | --output", "import | at least one file", "import nowhere | no such file", "import . --as z | known are",
-			"import . --word x | number of bits", "import . --rate 0 | positive", "apply x | --input", "report . | --output",
+	@CsvSource(delimiter = '|', value = { "export . | --as FORMAT", "export nowhere --as c | no such file",
+			"export . --as z | known are",
+			"export . --as c --check | --output", "import | at least one file", "import nowhere | no such file",
+					"import . --as z | known are",
+			"import . --word x | number of bits", "import . --rate 0 | positive", "apply x | --input",
+					"report . | --output",
 			"report nowhere --output x | no such folder", "report . --format z | known are" })
 	void whatIsWrongOnTheCommandLineIsNamed(String arguments, String reason) {
 		assertEquals(Main.BAD_USAGE, run(arguments.split(" ")));
@@ -141,7 +149,8 @@ class ExchangeVerbsTest {
 	private int run(String... arguments) {
 		out.reset();
 		err.reset();
-		try (var output = new PrintStream(out, true, StandardCharsets.UTF_8); var error = new PrintStream(err, true, StandardCharsets.UTF_8)) {
+		try (var output = new PrintStream(out, true, StandardCharsets.UTF_8); var error = new PrintStream(err, true,
+				StandardCharsets.UTF_8)) {
 			return Main.run(List.of(arguments), new Console(output, error, false));
 		}
 	}

@@ -60,8 +60,10 @@ public record HandOver(String name, String revision, List<String> requirements, 
 	public static HandOver of(Filter filter, FilterQuestion question, FilterEvidence evidence, String revision)
 			throws InputException {
 		if (question.subject().isEmpty()) {
-			throw new InputException(question.name(), filter.getCoefficients() == null ? "there are no coefficients; design or import them"
-					: evidence.problems().isEmpty() ? "the coefficients cannot be used" : evidence.problems().getFirst().describe());
+			throw new InputException(question.name(), filter.getCoefficients() == null
+					? "there are no coefficients; design or import them"
+					: evidence.problems().isEmpty() ? "the coefficients cannot be used" : evidence.problems().getFirst()
+							.describe());
 		}
 		Subject subject = question.subject().get();
 		boolean whole = filter.getCoefficients() instanceof IntegerCoefficients
@@ -70,7 +72,8 @@ public record HandOver(String name, String revision, List<String> requirements, 
 				.map(requirement -> requirement.proof().verdict().name().toLowerCase(Locale.ROOT) + ": "
 						+ requirement.message())
 				.toList();
-		return new HandOver(question.name(), revision, requirements, subject.taps(), subject.sampleRate(), subject.arithmetic(),
+		return new HandOver(question.name(), revision, requirements, subject.taps(), subject.sampleRate(),
+				subject.arithmetic(),
 				whole);
 	}
 
@@ -95,7 +98,8 @@ public record HandOver(String name, String revision, List<String> requirements, 
 		}
 		int bits = integers().stream().mapToInt(integer -> integer.bitLength() + 1).max().orElse(1);
 		if (bits > NumberFormat.MAX_WORD) {
-			throw new InputException(name, "a coefficient needs " + bits + " bits; words have at most " + NumberFormat.MAX_WORD);
+			throw new InputException(name, "a coefficient needs " + bits + " bits; words have at most "
+					+ NumberFormat.MAX_WORD);
 		}
 		return new NumberFormat(bits, 0);
 	}
@@ -121,7 +125,8 @@ public record HandOver(String name, String revision, List<String> requirements, 
 	public List<String> formats() {
 		var lines = new ArrayList<String>();
 		arithmetic.ifPresent(formats -> {
-			lines.add("structure " + words(formats.structure()) + (formats.factor() > 1 ? ", factor " + formats.factor() : ""));
+			lines.add("structure " + words(formats.structure())
+					+ (formats.factor() > 1 ? ", factor " + formats.factor() : ""));
 			formats.coefficient().ifPresent(format -> lines.add("coefficients " + format.text()));
 			formats.input().ifPresent(format -> lines.add("input " + format.text()));
 			formats.product().ifPresent(format -> lines.add("products " + format.text()));

@@ -30,7 +30,8 @@ public final class HandOvers {
 	 */
 	public static HandOver of(FilterSource source, FilterEvidence evidence) throws InputException, IOException {
 		Filter filter = source.filter().orElseThrow(() -> new InputException("", source.problem()));
-		return HandOver.of(filter, FilterQuestion.of(filter, source.parameters(), source.partners()), evidence, revision(source.file()));
+		return HandOver.of(filter, FilterQuestion.of(filter, source.parameters(), source.partners()), evidence,
+				revision(source.file()));
 	}
 
 	/** Short hash of the newest recorded revision with the content that the file has now; empty when there is none. */

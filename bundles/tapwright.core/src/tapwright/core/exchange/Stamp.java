@@ -51,7 +51,8 @@ public final class Stamp {
 
 	private static String textHash(String text) {
 		Matcher matcher = TEXT.matcher(text);
-		String blank = matcher.find() ? text.substring(0, matcher.start(2)) + ZEROS + text.substring(matcher.end(2)) : text;
+		String blank = matcher.find() ? text.substring(0, matcher.start(2)) + ZEROS + text.substring(matcher.end(2))
+				: text;
 		return sha256(blank.replace("\r\n", "\n").getBytes(StandardCharsets.UTF_8));
 	}
 

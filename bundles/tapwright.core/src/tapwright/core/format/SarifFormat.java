@@ -89,12 +89,14 @@ final class SarifFormat implements EvidenceFormat {
 	}
 
 	private static void rule(JsonWriter json, String kind) throws IOException {
-		EClass type = Meta.requirementKinds().stream().filter(candidate -> Meta.kind(candidate).equals(kind)).findFirst().orElseThrow();
+		EClass type = Meta.requirementKinds().stream().filter(candidate -> Meta.kind(candidate).equals(kind))
+				.findFirst().orElseThrow();
 		json.beginObject();
 		json.name("id").value(kind);
 		json.name("name").value(type.getName());
 		message(json, "shortDescription", Meta.label(type));
-		message(json, "fullDescription", Meta.documentation(type).isEmpty() ? Meta.label(type) : Meta.documentation(type));
+		message(json, "fullDescription", Meta.documentation(type).isEmpty() ? Meta.label(type)
+				: Meta.documentation(type));
 		json.endObject();
 	}
 
@@ -114,7 +116,8 @@ final class SarifFormat implements EvidenceFormat {
 		json.endArray().endObject().endArray();
 	}
 
-	private static void result(JsonWriter json, Path file, RequirementEvidence requirement, int rule) throws IOException {
+	private static void result(JsonWriter json, Path file, RequirementEvidence requirement,
+			int rule) throws IOException {
 		Verdict verdict = requirement.proof().verdict();
 		json.beginObject();
 		json.name("ruleId").value(requirement.kind());
@@ -124,7 +127,8 @@ final class SarifFormat implements EvidenceFormat {
 		case MISSED -> "fail";
 		case UNPROVEN -> "open";
 		});
-		json.name("level").value(verdict != Verdict.MISSED ? "none" : requirement.severity() == Severity.MUST ? "error" : "warning");
+		json.name("level").value(verdict != Verdict.MISSED ? "none" : requirement.severity() == Severity.MUST ? "error"
+				: "warning");
 		message(json, "message", requirement.message());
 		locations(json, file);
 		json.name("partialFingerprints").beginObject();

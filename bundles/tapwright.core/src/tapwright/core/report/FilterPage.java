@@ -44,11 +44,14 @@ final class FilterPage {
 	}
 
 	private void write(String portfolio) {
-		html.raw("<nav aria-label=\"Report\"><a href=\"../index.html\">" + Html.escape(portfolio) + "</a></nav>\n<main>");
+		html.raw("<nav aria-label=\"Report\"><a href=\"../index.html\">" + Html.escape(portfolio)
+				+ "</a></nav>\n<main>");
 		html.element("h1", filter.name());
 		Optional<Filter> model = filter.result().source().filter();
-		html.raw("<p>" + Html.badge(filter.verdict()) + " " + Html.escape(model.map(Filter::getPurpose).orElse("")) + "</p>");
-		filter.result().problems().forEach(problem -> html.raw("<p class=\"missed\"><strong>Problem:</strong> " + Html.escape(fileName(problem)) + "</p>"));
+		html.raw("<p>" + Html.badge(filter.verdict()) + " " + Html.escape(model.map(Filter::getPurpose).orElse(""))
+				+ "</p>");
+		filter.result().problems().forEach(problem -> html.raw("<p class=\"missed\"><strong>Problem:</strong> "
+				+ Html.escape(fileName(problem)) + "</p>"));
 		identity();
 		requirements();
 		filter.subject().ifPresent(this::pictures);
@@ -61,7 +64,8 @@ final class FilterPage {
 
 	// Folders differ between machines; the report does not.
 	private String fileName(String problem) {
-		return problem.replace(filter.result().source().file().toString(), filter.result().source().file().getFileName().toString());
+		return problem.replace(filter.result().source().file().toString(), filter.result().source().file().getFileName()
+				.toString());
 	}
 
 	private void identity() {
@@ -71,13 +75,15 @@ final class FilterPage {
 			html.entry("sample rate", Words.exactly(subject.sampleRate(), "Hz"));
 			html.entry("coefficients", subject.taps().length() + symmetry(subject.taps().symmetry()));
 		});
-		html.entry("revision", history.revisions().isEmpty() ? "none recorded" : history.present().isEmpty() ? "unrecorded changes" : history.present());
+		html.entry("revision", history.revisions().isEmpty() ? "none recorded" : history.present().isEmpty()
+				? "unrecorded changes" : history.present());
 		html.entry("content hash", filter.result().evidence() == null ? "" : filter.result().evidence().hash());
 		html.raw("</dl>");
 	}
 
 	private static String symmetry(Symmetry symmetry) {
-		return symmetry == Symmetry.NONE ? ", no symmetry" : ", " + symmetry.name().toLowerCase(Locale.ROOT) + " symmetry";
+		return symmetry == Symmetry.NONE ? ", no symmetry" : ", " + symmetry.name().toLowerCase(Locale.ROOT)
+				+ " symmetry";
 	}
 
 	private void requirements() {
@@ -92,9 +98,12 @@ final class FilterPage {
 		}
 		html.raw("</tr></thead><tbody>");
 		for (RequirementEvidence requirement : filter.requirements()) {
-			html.raw("<tr><td>" + Html.badge(requirement.proof().verdict()) + "</td><th scope=\"row\">" + Html.escape(requirement.id())
-					+ (requirement.severity() == Severity.SHOULD ? " <span class=\"dim\">(should)</span>" : "") + "</th><td>"
-					+ Html.escape(requirement.description()) + "</td><td>" + Html.escape(requirement.result()) + "</td></tr>");
+			html.raw("<tr><td>" + Html.badge(requirement.proof().verdict()) + "</td><th scope=\"row\">"
+					+ Html.escape(requirement.id())
+					+ (requirement.severity() == Severity.SHOULD ? " <span class=\"dim\">(should)</span>" : "")
+							+ "</th><td>"
+					+ Html.escape(requirement.description()) + "</td><td>" + Html.escape(requirement.result())
+							+ "</td></tr>");
 		}
 		html.raw("</tbody></table></div>");
 	}
@@ -104,7 +113,8 @@ final class FilterPage {
 		var response = new ResponsePicture(subject, filter.limits());
 		figure(response.whole(filter.name()), "Gain over frequency. Forbidden regions are shaded, limits dashed. The verdicts do not rest on this picture.");
 		response.detail(filter.name()).ifPresent(picture -> figure(picture, "The bands with close limits, enlarged."));
-		figure(ImpulsePicture.of(filter.name(), subject.taps().toDoubles()), "The coefficients, which are the impulse response.");
+		figure(ImpulsePicture.of(filter.name(), subject.taps().toDoubles()),
+				"The coefficients, which are the impulse response.");
 	}
 
 	private void figure(String picture, String caption) {
@@ -117,7 +127,9 @@ final class FilterPage {
 		boolean words = subject.arithmetic().flatMap(Arithmetic::coefficient).isPresent();
 		ExactTaps stored = words ? subject.arithmetic().orElseThrow().stored(taps) : taps;
 		double[] values = taps.toDoubles();
-		html.raw("<details><summary>" + taps.length() + (words ? " integers in steps of 2^" + -subject.arithmetic().orElseThrow().coefficient().orElseThrow().fraction() : " numbers")
+		html.raw("<details><summary>" + taps.length()
+				+ (words ? " integers in steps of 2^" + -subject.arithmetic().orElseThrow().coefficient().orElseThrow()
+				.fraction() : " numbers")
 				+ "</summary><ol class=\"coefficients\" start=\"0\">");
 		for (int k = 0; k < Math.min(taps.length(), MOST_LISTED); k++) {
 			html.raw("<li>" + (words ? stored.integer(k) : values[k]) + "</li>");
@@ -130,7 +142,8 @@ final class FilterPage {
 
 	private void arithmetic(Subject subject) {
 		html.element("h2", "Arithmetic and cost");
-		var handed = new HandOver(filter.name(), "", List.of(), subject.taps(), subject.sampleRate(), subject.arithmetic(), false);
+		var handed = new HandOver(filter.name(), "", List.of(), subject.taps(), subject.sampleRate(),
+				subject.arithmetic(), false);
 		if (handed.formats().isEmpty()) {
 			html.element("p", "No arithmetic is stated; verdicts are for the stored numbers.");
 			return;
@@ -138,9 +151,11 @@ final class FilterPage {
 		html.raw("<ul>");
 		handed.formats().forEach(line -> html.element("li", line));
 		Cost cost = Cost.of(subject.taps(), subject.arithmetic().orElseThrow());
-		html.element("li", cost.multiplies() + " multiplications and " + cost.adds() + " additions for " + cost.inputs() + (cost.inputs() == 1 ? " input" : " inputs") + " and "
+		html.element("li", cost.multiplies() + " multiplications and " + cost.adds() + " additions for " + cost.inputs()
+				+ (cost.inputs() == 1 ? " input" : " inputs") + " and "
 				+ cost.outputs() + (cost.outputs() == 1 ? " output" : " outputs"));
-		html.element("li", cost.coefficientWords() + " words for coefficients, " + cost.delayWords() + " for the delay line");
+		html.element("li", cost.coefficientWords() + " words for coefficients, " + cost.delayWords()
+				+ " for the delay line");
 		html.raw("</ul>");
 	}
 
@@ -150,7 +165,8 @@ final class FilterPage {
 		}
 		html.element("h2", "Where it runs").raw("<ul>");
 		for (Deployment deployment : model.getDeployments()) {
-			html.element("li", deployment.getProcessor() + ": channels " + deployment.getChannels() + ", copies " + deployment.getCopies()
+			html.element("li", deployment.getProcessor() + ": channels " + deployment.getChannels() + ", copies "
+					+ deployment.getCopies()
 					+ (deployment.getInputRate() == null ? "" : ", input rate " + deployment.getInputRate()));
 		}
 		html.raw("</ul>");
@@ -158,13 +174,15 @@ final class FilterPage {
 
 	private void history() {
 		html.element("h2", "Revisions and decisions");
-		history.problems().forEach(problem -> html.raw("<p class=\"missed\"><strong>Problem:</strong> " + Html.escape(problem) + "</p>"));
+		history.problems().forEach(problem -> html.raw("<p class=\"missed\"><strong>Problem:</strong> "
+				+ Html.escape(problem) + "</p>"));
 		if (history.revisions().isEmpty()) {
 			html.element("p", "No revision is recorded.");
 			return;
 		}
 		html.raw("<div class=\"wide\" tabindex=\"0\" role=\"region\" aria-label=\"Revisions\"><table><thead><tr>");
-		for (String head : new String[] { "number", "revision", "verdict then", "author", "time", "message", "decisions" }) {
+		for (String head : new String[] { "number", "revision", "verdict then", "author", "time", "message",
+				"decisions" }) {
 			html.raw("<th scope=\"col\">" + head + "</th>");
 		}
 		html.raw("</tr></thead><tbody>");
@@ -172,12 +190,15 @@ final class FilterPage {
 			var decisions = new StringBuilder();
 			for (SignOffs.Recorded decision : history.decisions()) {
 				if (decision.revision().equals(revision.hash())) {
-					decisions.append(decisions.isEmpty() ? "" : "; ").append(decision.decision().getLiteral()).append(" by ").append(decision.reviewer().name())
+					decisions.append(decisions.isEmpty() ? "" : "; ").append(decision.decision().getLiteral())
+							.append(" by ").append(decision.reviewer().name())
 							.append(decision.comment().isEmpty() ? "" : ": " + decision.comment());
 				}
 			}
-			html.raw("<tr><td class=\"number\">" + revision.sequence() + "</td><th scope=\"row\"><code>" + revision.shortHash() + "</code></th><td>"
-					+ revision.verdict().getLiteral() + "</td><td>" + Html.escape(revision.author().name()) + "</td><td>" + Html.escape(revision.time()) + "</td><td>"
+			html.raw("<tr><td class=\"number\">" + revision.sequence() + "</td><th scope=\"row\"><code>"
+					+ revision.shortHash() + "</code></th><td>"
+					+ revision.verdict().getLiteral() + "</td><td>" + Html.escape(revision.author().name())
+							+ "</td><td>" + Html.escape(revision.time()) + "</td><td>"
 					+ Html.escape(revision.message()) + "</td><td>" + Html.escape(decisions.toString()) + "</td></tr>");
 		}
 		html.raw("</tbody></table></div>");

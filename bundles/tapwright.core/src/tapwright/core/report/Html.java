@@ -21,7 +21,8 @@ final class Html {
 
 	/** A name and its value in a list of both. */
 	Html entry(String name, String value) {
-		return value == null || value.isBlank() ? this : raw("<dt>" + escape(name) + "</dt><dd>" + escape(value) + "</dd>");
+		return value == null || value.isBlank() ? this
+				: raw("<dt>" + escape(name) + "</dt><dd>" + escape(value) + "</dd>");
 	}
 
 	/** The verdict as sign and word, so that colour is never needed. */

@@ -28,15 +28,20 @@ final class ImpulsePicture {
 		double room = high == low ? 1 : (high - low) * 0.06;
 		var x = new Axis(-0.5, taps.length - 0.5, LEFT, WIDTH - RIGHT);
 		var y = new Axis(low - (low < 0 ? room : 0), high + room, HEIGHT - BOTTOM, TOP);
-		var svg = new StringBuilder("<svg class=\"picture\" role=\"img\" viewBox=\"0 0 " + WIDTH + " " + HEIGHT + "\" aria-label=\"The " + taps.length
+		var svg = new StringBuilder("<svg class=\"picture\" role=\"img\" viewBox=\"0 0 " + WIDTH + " " + HEIGHT
+				+ "\" aria-label=\"The " + taps.length
 				+ " coefficients of " + Html.escape(name) + "\">\n");
 		for (double tick : y.ticks(4)) {
-			svg.append(String.format(Locale.ROOT, "<path class=\"grid\" d=\"M%.1f %.1fH%.1f\"/><text class=\"tick\" x=\"%.1f\" y=\"%.1f\" text-anchor=\"end\">%s</text>\n",
-					x.first(), y.place(tick), x.last(), x.first() - 6, y.place(tick) + 4, Words.of(tick, "1").replace("-", "−")));
+			svg.append(String.format(Locale.ROOT,
+					"<path class=\"grid\" d=\"M%.1f %.1fH%.1f\"/><text class=\"tick\" x=\"%.1f\" y=\"%.1f\" text-anchor=\"end\">%s</text>\n",
+					x.first(), y.place(tick), x.last(), x.first() - 6, y.place(tick) + 4, Words.of(tick, "1")
+							.replace("-", "−")));
 		}
 		for (double tick : x.ticks(8)) {
 			if (tick == Math.rint(tick)) {
-				svg.append(String.format(Locale.ROOT, "<text class=\"tick\" x=\"%.1f\" y=\"%.1f\" text-anchor=\"middle\">%d</text>\n", x.place(tick), y.first() + 16, (long) tick));
+				svg.append(String.format(Locale.ROOT,
+						"<text class=\"tick\" x=\"%.1f\" y=\"%.1f\" text-anchor=\"middle\">%d</text>\n", x.place(tick),
+						y.first() + 16, (long) tick));
 			}
 		}
 		svg.append("<path class=\"stem\" d=\"");
@@ -47,7 +52,8 @@ final class ImpulsePicture {
 		for (int k = 0; k < taps.length; k++) {
 			svg.append(String.format(Locale.ROOT, "M%.1f %.1fh0", x.place(k), y.place(taps[k])));
 		}
-		svg.append("\"/>\n<text class=\"label\" x=\"" + (LEFT + WIDTH - RIGHT) / 2 + "\" y=\"" + (HEIGHT - 6) + "\" text-anchor=\"middle\">coefficient</text>\n");
+		svg.append("\"/>\n<text class=\"label\" x=\"" + (LEFT + WIDTH - RIGHT) / 2 + "\" y=\"" + (HEIGHT - 6)
+				+ "\" text-anchor=\"middle\">coefficient</text>\n");
 		return svg.append("</svg>").toString();
 	}
 }

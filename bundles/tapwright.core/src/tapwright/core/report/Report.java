@@ -43,7 +43,8 @@ public final class Report {
 		this.run = run;
 		var taken = new HashSet<String>();
 		for (Result result : run.results()) {
-			String stem = FilePartners.nameOf(result.source().file().getFileName().toString()).toLowerCase(Locale.ROOT).replaceAll("[^a-z0-9]+", "-");
+			String stem = FilePartners.nameOf(result.source().file().getFileName().toString()).toLowerCase(Locale.ROOT)
+					.replaceAll("[^a-z0-9]+", "-");
 			String page = stem + ".html";
 			for (int k = 2; !taken.add(page); k++) {
 				page = stem + "-" + k + ".html";
@@ -71,7 +72,8 @@ public final class Report {
 			return new Report(name, "", run);
 		}
 		Portfolio portfolio = PortfolioFolder.read(folder);
-		return new Report(portfolio.getName() == null ? name : portfolio.getName(), portfolio.getDescription() == null ? "" : portfolio.getDescription(), run);
+		return new Report(portfolio.getName() == null ? name : portfolio.getName(), portfolio.getDescription() == null
+				? "" : portfolio.getDescription(), run);
 	}
 
 	/** What the report rests on. */
@@ -102,9 +104,11 @@ public final class Report {
 		var histories = new ArrayList<ReportedHistory>();
 		for (ReportedFilter filter : filters) {
 			boolean readable = filter.result().source().filter().isPresent();
-			ReportedHistory history = readable ? ReportedHistory.of(filter.result().source().file()) : ReportedHistory.NONE;
+			ReportedHistory history = readable ? ReportedHistory.of(filter.result().source().file())
+					: ReportedHistory.NONE;
 			histories.add(history);
-			files.put("filters/" + filter.page(), FilterPage.of(filter, history, name).getBytes(StandardCharsets.UTF_8));
+			files.put("filters/" + filter.page(), FilterPage.of(filter, history, name)
+					.getBytes(StandardCharsets.UTF_8));
 		}
 		files.put("index.html", index(histories).getBytes(StandardCharsets.UTF_8));
 		return files;
@@ -116,14 +120,17 @@ public final class Report {
 		html.raw("<ul class=\"counts\" aria-label=\"Summary\">");
 		count(html, filters.size(), "filters");
 		for (Verdict verdict : Verdict.values()) {
-			count(html, filters.stream().filter(filter -> filter.verdict() == verdict).count(), ReportedFilter.word(verdict));
+			count(html, filters.stream().filter(filter -> filter.verdict() == verdict).count(),
+					ReportedFilter.word(verdict));
 		}
 		count(html, filters.stream().mapToLong(filter -> filter.requirements().size()).sum(), "requirements");
 		html.raw("</ul>");
 		html.element("h2", "Filters");
 		html.raw("<div class=\"wide\" tabindex=\"0\" role=\"region\" aria-label=\"Filters\"><table class=\"sortable\"><thead><tr>");
-		for (String head : List.of("filter", "verdict", "look at first", "response", "sample rate", "taps", "word", "revision")) {
-			html.raw("<th scope=\"col\"" + (List.of("sample rate", "taps", "word").contains(head) ? " class=\"number\"" : "") + ">" + head + "</th>");
+		for (String head : List.of("filter", "verdict", "look at first", "response", "sample rate", "taps", "word",
+				"revision")) {
+			html.raw("<th scope=\"col\"" + (List.of("sample rate", "taps", "word").contains(head) ? " class=\"number\""
+					: "") + ">" + head + "</th>");
 		}
 		html.raw("</tr></thead><tbody>");
 		for (int k = 0; k < filters.size(); k++) {
@@ -131,7 +138,8 @@ public final class Report {
 		}
 		html.raw("</tbody></table></div>");
 		html.raw("<aside aria-label=\"Caution\"><p>" + Html.escape(FilterPage.CAUTION) + "</p></aside>");
-		html.raw("</main>\n<footer><p class=\"dim\">" + Tool.NAME + ". Met and missed are proven for exactly the numbers stored; unproven means that neither was.</p></footer>");
+		html.raw("</main>\n<footer><p class=\"dim\">" + Tool.NAME
+				+ ". Met and missed are proven for exactly the numbers stored; unproven means that neither was.</p></footer>");
 		return Html.page(name + ": digital filters", "", html);
 	}
 
@@ -140,19 +148,25 @@ public final class Report {
 	}
 
 	private static void row(Html html, ReportedFilter filter, ReportedHistory history) {
-		String first = filter.result().problems().isEmpty() ? filter.first().map(Report::attention).orElse("no requirement") : "cannot be verified completely";
-		html.raw("<tr><th scope=\"row\"><a href=\"filters/" + filter.page() + "\">" + Html.escape(filter.name()) + "</a></th>");
-		html.raw("<td data-key=\"" + rank(filter.verdict()) + "\">" + Html.badge(filter.verdict()) + "</td><td>" + Html.escape(first) + "</td>");
+		String first = filter.result().problems().isEmpty() ? filter.first().map(Report::attention)
+				.orElse("no requirement") : "cannot be verified completely";
+		html.raw("<tr><th scope=\"row\"><a href=\"filters/" + filter.page() + "\">" + Html.escape(filter.name())
+				+ "</a></th>");
+		html.raw("<td data-key=\"" + rank(filter.verdict()) + "\">" + Html.badge(filter.verdict()) + "</td><td>"
+				+ Html.escape(first) + "</td>");
 		if (filter.subject().isEmpty()) {
 			html.raw("<td></td><td class=\"number\" data-key=\"-1\"></td><td class=\"number\" data-key=\"-1\"></td><td class=\"number\" data-key=\"-1\"></td>");
 		} else {
 			var subject = filter.subject().get();
 			int word = subject.arithmetic().flatMap(Arithmetic::coefficient).map(format -> format.word()).orElse(-1);
-			html.raw("<td>" + new ResponsePicture(subject, List.of()).spark() + "</td><td class=\"number\" data-key=\"" + subject.sampleRate() + "\">"
-					+ Words.exactly(subject.sampleRate(), "Hz") + "</td><td class=\"number\">" + subject.taps().length() + "</td><td class=\"number\" data-key=\"" + word + "\">"
+			html.raw("<td>" + new ResponsePicture(subject, List.of()).spark() + "</td><td class=\"number\" data-key=\""
+					+ subject.sampleRate() + "\">"
+					+ Words.exactly(subject.sampleRate(), "Hz") + "</td><td class=\"number\">" + subject.taps().length()
+							+ "</td><td class=\"number\" data-key=\"" + word + "\">"
 					+ (word < 0 ? "" : word + " bit") + "</td>");
 		}
-		html.raw("<td>" + (history.revisions().isEmpty() ? "none" : history.present().isEmpty() ? "unrecorded changes" : "<code>" + history.present() + "</code>") + "</td></tr>");
+		html.raw("<td>" + (history.revisions().isEmpty() ? "none" : history.present().isEmpty() ? "unrecorded changes"
+				: "<code>" + history.present() + "</code>") + "</td></tr>");
 	}
 
 	private static String attention(RequirementEvidence requirement) {
@@ -172,15 +186,20 @@ public final class Report {
 		var text = new StringBuilder("# ").append(markdown(name)).append(": digital filters\n\n");
 		text.append(filters.size()).append(" filters");
 		for (Verdict verdict : Verdict.values()) {
-			text.append(verdict.ordinal() == 0 ? ": " : ", ").append(filters.stream().filter(filter -> filter.verdict() == verdict).count()).append(' ')
+			text.append(verdict.ordinal() == 0 ? ": " : ", ")
+					.append(filters.stream().filter(filter -> filter.verdict() == verdict).count()).append(' ')
 					.append(ReportedFilter.word(verdict));
 		}
 		text.append(".\n");
 		var open = new StringBuilder();
 		for (ReportedFilter filter : filters) {
-			filter.result().problems().forEach(problem -> open.append("- **").append(markdown(filter.name())).append("**: ").append(markdown(problem)).append('\n'));
-			filter.requirements().stream().filter(requirement -> requirement.proof().verdict() != Verdict.MET).forEach(requirement -> open.append("- **")
-					.append(markdown(filter.name())).append("** ").append(ReportedFilter.word(requirement.proof().verdict())).append(" ").append(markdown(requirement.message())).append('\n'));
+			filter.result().problems().forEach(problem -> open.append("- **").append(markdown(filter.name()))
+					.append("**: ").append(markdown(problem)).append('\n'));
+			filter.requirements().stream().filter(requirement -> requirement.proof().verdict() != Verdict.MET)
+					.forEach(requirement -> open.append("- **")
+					.append(markdown(filter.name())).append("** ")
+							.append(ReportedFilter.word(requirement.proof().verdict())).append(" ")
+							.append(markdown(requirement.message())).append('\n'));
 		}
 		if (!open.isEmpty()) {
 			text.append("\n## Needs attention\n\n").append(open);

@@ -39,7 +39,8 @@ record ReportedFilter(String name, String page, Result result, Optional<Subject>
 	static ReportedFilter of(Result result, String page) {
 		Optional<Filter> filter = result.source().filter();
 		if (filter.isEmpty()) {
-			return new ReportedFilter(result.source().file().getFileName().toString(), page, result, Optional.empty(), List.of());
+			return new ReportedFilter(result.source().file().getFileName().toString(), page, result, Optional.empty(),
+					List.of());
 		}
 		var question = FilterQuestion.of(filter.get(), result.source().parameters(), result.source().partners());
 		var limits = new ArrayList<GainLimit>();
@@ -80,7 +81,8 @@ record ReportedFilter(String name, String page, Result result, Optional<Subject>
 		case MISSED -> 0;
 		case UNPROVEN -> 1;
 		case MET -> 2;
-		}).thenComparingDouble(requirement -> requirement.valueUnit().equals("dB") ? requirement.proof().margin().middle() : Double.MAX_VALUE));
+		}).thenComparingDouble(requirement -> requirement.valueUnit().equals("dB") ? requirement.proof().margin()
+				.middle() : Double.MAX_VALUE));
 	}
 
 	long count(Verdict verdict) {

@@ -26,7 +26,8 @@ import tapwright.model.io.ModelFiles;
  * @param problems
  *            of files that are damaged
  */
-record ReportedHistory(String present, List<RecordedRevision> revisions, List<SignOffs.Recorded> decisions, List<String> problems) {
+record ReportedHistory(String present, List<RecordedRevision> revisions, List<SignOffs.Recorded> decisions,
+		List<String> problems) {
 
 	static final ReportedHistory NONE = new ReportedHistory("", List.of(), List.of(), List.of());
 
@@ -37,9 +38,11 @@ record ReportedHistory(String present, List<RecordedRevision> revisions, List<Si
 		RevisionStore store = RevisionStore.of(file);
 		History history = store.read();
 		List<RecordedRevision> revisions = history.graph().revisions().stream()
-				.sorted(Comparator.comparingInt(RecordedRevision::sequence).reversed().thenComparing(RecordedRevision::hash)).toList();
+				.sorted(Comparator.comparingInt(RecordedRevision::sequence).reversed()
+						.thenComparing(RecordedRevision::hash)).toList();
 		SignOffs.Reading reading = new SignOffs(store).read();
 		return new ReportedHistory(revisions.isEmpty() ? "" : HandOvers.revision(file), revisions, reading.decisions(),
-				history.problems().stream().map(problem -> problem.file().getFileName() + " " + problem.reason()).toList());
+				history.problems().stream().map(problem -> problem.file().getFileName() + " " + problem.reason())
+						.toList());
 	}
 }

@@ -58,7 +58,8 @@ final class ResponsePicture {
 	private double reference(GainReference reference, double[] taps, double sampleRate) {
 		return switch (reference) {
 		case GainReference.Absolute absolute -> 0;
-		case GainReference.AtFrequency at -> FrequencyResponse.of(taps, sampleRate, new double[] { at.frequency() }).decibels()[0];
+		case GainReference.AtFrequency at -> FrequencyResponse.of(taps, sampleRate, new double[] { at.frequency() })
+				.decibels()[0];
 		case GainReference.LargestIn in -> largest(in.from(), in.to());
 		};
 	}
@@ -78,13 +79,16 @@ final class ResponsePicture {
 		for (int k = 0; k < parts; k++) {
 			double s = (double) k / parts;
 			double t = (double) (k + 1) / parts;
-			limits.add(new Limit(frequency(a, b, s, bent), frequency(a, b, t, bent), reference + between(a.lower(), b.lower(), s),
-					reference + between(a.lower(), b.lower(), t), reference + between(a.upper(), b.upper(), s), reference + between(a.upper(), b.upper(), t)));
+			limits.add(new Limit(frequency(a, b, s, bent), frequency(a, b, t, bent), reference
+					+ between(a.lower(), b.lower(), s),
+					reference + between(a.lower(), b.lower(), t), reference + between(a.upper(), b.upper(), s),
+							reference + between(a.upper(), b.upper(), t)));
 		}
 	}
 
 	private static double frequency(Breakpoint a, Breakpoint b, double t, boolean bent) {
-		return bent ? a.frequency() * Math.pow(b.frequency() / a.frequency(), t) : a.frequency() + t * (b.frequency() - a.frequency());
+		return bent ? a.frequency() * Math.pow(b.frequency() / a.frequency(), t) : a.frequency()
+				+ t * (b.frequency() - a.frequency());
 	}
 
 	private static double between(double a, double b, double t) {
@@ -98,9 +102,11 @@ final class ResponsePicture {
 		for (Limit limit : limits) {
 			double level = Math.min(finite(limit.upperFrom, 0), finite(limit.upperTo, 0));
 			low = Math.min(low, 10 * Math.floor((level - 25) / 10));
-			high = Math.max(high, 10 * Math.ceil((Math.max(finite(limit.lowerFrom, high), finite(limit.lowerTo, high)) + 2) / 10));
+			high = Math.max(high, 10 * Math.ceil((Math.max(finite(limit.lowerFrom, high), finite(limit.lowerTo, high))
+					+ 2) / 10));
 		}
-		return picture("Gain of " + name + " from 0 to " + Words.of(hertz[POINTS - 1], "Hz") + ", forbidden regions shaded", 0, hertz[POINTS - 1],
+		return picture("Gain of " + name + " from 0 to " + Words.of(hertz[POINTS - 1], "Hz")
+				+ ", forbidden regions shaded", 0, hertz[POINTS - 1],
 				Math.max(low, -250), high);
 	}
 
@@ -111,7 +117,8 @@ final class ResponsePicture {
 		double low = Double.POSITIVE_INFINITY;
 		double high = Double.NEGATIVE_INFINITY;
 		for (Limit limit : limits) {
-			if (limit.to > limit.from && limit.upperFrom - limit.lowerFrom <= DETAIL && limit.upperTo - limit.lowerTo <= DETAIL) {
+			if (limit.to > limit.from && limit.upperFrom - limit.lowerFrom <= DETAIL
+					&& limit.upperTo - limit.lowerTo <= DETAIL) {
 				from = Math.min(from, limit.from);
 				to = Math.max(to, limit.to);
 				low = Math.min(low, Math.min(limit.lowerFrom, limit.lowerTo));
@@ -122,7 +129,8 @@ final class ResponsePicture {
 			return Optional.empty();
 		}
 		double room = (high - low) * 0.4;
-		return Optional.of(picture("Detail: gain of " + name + " " + Words.band(from, to), from, Math.min(to + (to - from) * 0.05, hertz[POINTS - 1]),
+		return Optional.of(picture("Detail: gain of " + name + " " + Words.band(from, to), from,
+				Math.min(to + (to - from) * 0.05, hertz[POINTS - 1]),
 				low - room, high + room));
 	}
 
@@ -136,7 +144,8 @@ final class ResponsePicture {
 	private String picture(String title, double from, double to, double low, double high) {
 		var x = new Axis(from, to, LEFT, WIDTH - RIGHT);
 		var y = new Axis(low, high, HEIGHT - BOTTOM, TOP);
-		var svg = new StringBuilder("<svg class=\"picture\" role=\"img\" viewBox=\"0 0 " + WIDTH + " " + HEIGHT + "\" aria-label=\"" + Html.escape(title) + "\">\n");
+		var svg = new StringBuilder("<svg class=\"picture\" role=\"img\" viewBox=\"0 0 " + WIDTH + " " + HEIGHT
+				+ "\" aria-label=\"" + Html.escape(title) + "\">\n");
 		for (double tick : y.ticks(6)) {
 			svg.append(format("<path class=\"grid\" d=\"M%.1f %.1fH%.1f\"/><text class=\"tick\" x=\"%.1f\" y=\"%.1f\" text-anchor=\"end\">%s</text>%n", x.first(), y.place(tick),
 					x.last(), x.first() - 6, y.place(tick) + 4, number(tick)));
@@ -149,7 +158,8 @@ final class ResponsePicture {
 			shade(svg, x, y, limit);
 		}
 		svg.append("<path class=\"line\" d=\"").append(path(x, y, 1)).append("\"/>\n");
-		svg.append(format("<text class=\"label\" x=\"%d\" y=\"%d\" text-anchor=\"middle\">frequency</text>%n", (LEFT + WIDTH - RIGHT) / 2, HEIGHT - 8));
+		svg.append(format("<text class=\"label\" x=\"%d\" y=\"%d\" text-anchor=\"middle\">frequency</text>%n",
+				(LEFT + WIDTH - RIGHT) / 2, HEIGHT - 8));
 		svg.append(format("<text class=\"label\" x=\"14\" y=\"%d\" text-anchor=\"middle\" transform=\"rotate(-90 14 %d)\">gain in dB</text>%n", (TOP + HEIGHT - BOTTOM) / 2,
 				(TOP + HEIGHT - BOTTOM) / 2));
 		return svg.append("</svg>").toString();
@@ -178,13 +188,15 @@ final class ResponsePicture {
 		var path = new StringBuilder();
 		int margin = 2;
 		for (int k = 0; k < POINTS; k += step) {
-			boolean near = hertz[Math.min(k + margin, POINTS - 1)] >= x.low() && hertz[Math.max(k - margin, 0)] <= x.high();
+			boolean near = hertz[Math.min(k + margin, POINTS - 1)] >= x.low()
+					&& hertz[Math.max(k - margin, 0)] <= x.high();
 			if (near) {
 				double level = gain[k];
 				for (int j = k + 1; j < Math.min(k + step, POINTS); j++) {
 					level = Math.max(level, gain[j]);
 				}
-				path.append(path.isEmpty() ? 'M' : 'L').append(format("%.1f %.1f", x.place(hertz[k]), y.place(Double.isNaN(level) ? y.low() : level)));
+				path.append(path.isEmpty() ? 'M' : 'L')
+						.append(format("%.1f %.1f", x.place(hertz[k]), y.place(Double.isNaN(level) ? y.low() : level)));
 			}
 		}
 		return path.toString();

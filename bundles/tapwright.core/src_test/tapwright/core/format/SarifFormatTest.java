@@ -36,15 +36,18 @@ class SarifFormatTest {
 	void everyRequirementIsAResultOfTheRuleOfItsKind() throws Exception {
 		JsonObject run = run(FILTER);
 		List<JsonElement> results = run.getAsJsonArray("results").asList();
-		assertEquals(List.of("pass none", "fail error", "fail warning"), results.stream().map(JsonElement::getAsJsonObject)
+		assertEquals(List.of("pass none", "fail error", "fail warning"), results.stream()
+				.map(JsonElement::getAsJsonObject)
 				.map(result -> result.get("kind").getAsString() + " " + result.get("level").getAsString()).toList());
 		for (JsonElement element : results) {
 			JsonObject result = element.getAsJsonObject();
-			JsonElement rule = run.getAsJsonObject("tool").getAsJsonObject("driver").getAsJsonArray("rules").get(result.get("ruleIndex").getAsInt());
+			JsonElement rule = run.getAsJsonObject("tool").getAsJsonObject("driver").getAsJsonArray("rules")
+					.get(result.get("ruleIndex").getAsInt());
 			assertEquals(result.get("ruleId"), rule.getAsJsonObject().get("id")); // clause 3.27.6
 			assertTrue(uri(result).endsWith("a%20b.json"), uri(result));
 		}
-		assertTrue(run.getAsJsonArray("invocations").get(0).getAsJsonObject().get("executionSuccessful").getAsBoolean());
+		assertTrue(run.getAsJsonArray("invocations").get(0).getAsJsonObject().get("executionSuccessful")
+				.getAsBoolean());
 	}
 
 	@Test
@@ -58,7 +61,8 @@ class SarifFormatTest {
 
 	private JsonObject run(String content) throws Exception {
 		Path file = Files.writeString(folder.resolve("a b.json"), content);
-		String text = EvidenceFormat.of("sarif").orElseThrow().write(VerificationRun.of(Sources.read(List.of(file)), Effort.STANDARD));
+		String text = EvidenceFormat.of("sarif").orElseThrow()
+				.write(VerificationRun.of(Sources.read(List.of(file)), Effort.STANDARD));
 		JsonObject log = JsonParser.parseString(text).getAsJsonObject();
 		assertEquals("2.1.0", log.get("version").getAsString());
 		return log.getAsJsonArray("runs").get(0).getAsJsonObject();

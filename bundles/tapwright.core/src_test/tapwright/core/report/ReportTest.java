@@ -53,7 +53,8 @@ class ReportTest {
 		for (Path page : pages) {
 			String text = Files.readString(page);
 			// XML has no void elements and no boolean attributes; the rest of these pages is the same in both.
-			String xml = text.replace("<!DOCTYPE html>", "").replaceAll("<(meta|link)([^>]*)>", "<$1$2/>").replace(" defer>", " defer=\"\">");
+			String xml = text.replace("<!DOCTYPE html>", "").replaceAll("<(meta|link)([^>]*)>", "<$1$2/>")
+					.replace(" defer>", " defer=\"\">");
 			DocumentBuilderFactory.newInstance().newDocumentBuilder().parse(new InputSource(new StringReader(xml)));
 			Matcher link = Pattern.compile("(?:href|src)=\"([^\"]+)\"").matcher(text);
 			while (link.find()) {
@@ -68,10 +69,12 @@ class ReportTest {
 	void whatNeedsAttentionComesFirstAndNothingIsLeftOut() throws Exception {
 		Report.of(folder, Effort.STANDARD).write(folder.resolve("out"));
 		String index = Files.readString(folder.resolve("out/index.html"));
-		assertTrue(index.indexOf("filters/b.html") < index.indexOf("filters/c.html") && index.indexOf("filters/c.html") < index.indexOf("filters/a.html"), index);
+		assertTrue(index.indexOf("filters/b.html") < index.indexOf("filters/c.html")
+				&& index.indexOf("filters/c.html") < index.indexOf("filters/a.html"), index);
 		assertTrue(index.contains("a &lt;b&gt;&amp;|"), index);
 		String page = Files.readString(folder.resolve("out/filters/b.html"));
-		for (String expected : List.of("✗", "class=\"forbidden\"", "Detail: gain", "<li>16384</li>", "steps of 2^-15", "structure folded", "conformity is decided")) {
+		for (String expected : List.of("✗", "class=\"forbidden\"", "Detail: gain", "<li>16384</li>", "steps of 2^-15",
+				"structure folded", "conformity is decided")) {
 			assertTrue(page.contains(expected), expected);
 		}
 		assertTrue(Files.readString(folder.resolve("out/filters/c.html")).contains("oops"));

@@ -63,16 +63,19 @@ final class CDatapath {
 		sum = added.code;
 		Node finished = step(path.output(), new Node("sum", added.size), "an output");
 		output = finished.code;
-		outputType = arithmetic.output().isPresent() ? CTypes.type(arithmetic.output().get(), "output samples") : "int64_t";
+		outputType = arithmetic.output().isPresent() ? CTypes.type(arithmetic.output().get(), "output samples")
+				: "int64_t";
 	}
 
 	// A bound of the sum of all products, one by one, so that small coefficients count little.
-	private BigInteger total(ExactTaps taps, ExactTaps stored, Arithmetic arithmetic, BigInteger sample, BigInteger most) {
+	private BigInteger total(ExactTaps taps, ExactTaps stored, Arithmetic arithmetic, BigInteger sample,
+			BigInteger most) {
 		BigInteger largest = BigInteger.ZERO;
 		for (int phase = 0; phase < arithmetic.interpolation(); phase++) {
 			BigInteger sum = BigInteger.ZERO;
 			for (Term term : arithmetic.terms(taps, phase)) {
-				BigInteger exact = stored.integer(term.tap()).abs().multiply(term.isFolded() ? sample.shiftLeft(1) : sample);
+				BigInteger exact = stored.integer(term.tap()).abs()
+						.multiply(term.isFolded() ? sample.shiftLeft(1) : sample);
 				sum = sum.add(after(path.align(), after(path.product(), exact)).min(most));
 			}
 			largest = largest.max(sum);
@@ -91,7 +94,8 @@ final class CDatapath {
 	}
 
 	private Node step(Requantizer step, Node before, String what) throws InputException {
-		int shift = step.shift().orElseThrow(() -> new InputException("", "from one step size to the next there is a factor of "
+		int shift = step.shift().orElseThrow(() -> new InputException("",
+				"from one step size to the next there is a factor of "
 				+ step.ratio() + "; the routine can only shift by powers of two"));
 		Node after = before;
 		if (shift > 0) {
@@ -99,20 +103,24 @@ final class CDatapath {
 				throw new InputException("", what + " is rounded by " + shift + NO_ROOM);
 			}
 			rounds = true;
-			after = new Node("shift_right(" + before.code + ", " + shift + ")", step.round(before.size).add(BigInteger.ONE));
+			after = new Node("shift_right(" + before.code + ", " + shift + ")", step.round(before.size)
+					.add(BigInteger.ONE));
 		} else if (shift < 0) {
-			after = new Node("(" + before.code + ") * " + CTypes.literal(BigInteger.ONE.shiftLeft(-shift)), before.size.shiftLeft(-shift));
+			after = new Node("(" + before.code + ") * " + CTypes.literal(BigInteger.ONE.shiftLeft(-shift)),
+					before.size.shiftLeft(-shift));
 			check(BigInteger.ONE.shiftLeft(-shift), "the shift of " + what);
 			check(after.size, what);
 		}
-		return step.range().isPresent() && !holds(step.range().get(), after.size) ? limited(step.range().get(), after) : after;
+		return step.range().isPresent() && !holds(step.range().get(), after.size) ? limited(step.range().get(), after)
+				: after;
 	}
 
 	private Node limited(NumberFormat format, Node node) throws InputException {
 		if (overflow == Overflow.SATURATE) {
 			saturates = true;
 			BigInteger highest = format.max().min(BigInteger.valueOf(Long.MAX_VALUE));
-			return new Node("saturate(" + node.code + ", " + CTypes.literal(format.min()) + ", " + CTypes.literal(highest) + ")",
+			return new Node("saturate(" + node.code + ", " + CTypes.literal(format.min()) + ", "
+					+ CTypes.literal(highest) + ")",
 					largest(format).min(node.size));
 		}
 		if (format.word() >= Long.SIZE) {
@@ -120,7 +128,8 @@ final class CDatapath {
 		}
 		wrapsSigned |= format.signed();
 		wrapsUnsigned |= !format.signed();
-		return new Node((format.signed() ? "wrap_signed(" : "wrap_unsigned(") + node.code + ", " + format.word() + ")", largest(format));
+		return new Node((format.signed() ? "wrap_signed(" : "wrap_unsigned(") + node.code + ", " + format.word() + ")",
+				largest(format));
 	}
 
 	private static BigInteger after(Requantizer step, BigInteger size) {

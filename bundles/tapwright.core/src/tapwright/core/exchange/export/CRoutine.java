@@ -69,17 +69,20 @@ final class CRoutine implements ExportFormat {
 		values.put("sum", List.of(path.sum()));
 		values.put("output", List.of(path.output()));
 		values.put("helpers", helpers(path, arithmetic, values));
-		values.put("state", text(transposed ? "c-state-transposed" : arithmetic.decimation() > 1 ? "c-state-decimator" : "c-state-line", values));
+		values.put("state", text(transposed ? "c-state-transposed" : arithmetic.decimation() > 1 ? "c-state-decimator"
+				: "c-state-line", values));
 		values.put("rest", List.of(transposed ? "" : arithmetic.decimation() > 1 ? ", 0, 0" : ", 0"));
 		values.put("accept", transposed ? List.of() : text("c-accept", values));
 		values.put("body", body(filter, arithmetic, values));
 		ExportedFile header = CTable.header(filter, text("c-declarations", values));
 		String identifier = values.get("identifier").getFirst();
-		return List.of(header, new ExportedFile(identifier + ".c", Stamp.seal(Template.named("c-routine").fill(values))),
+		return List.of(header, new ExportedFile(identifier + ".c",
+				Stamp.seal(Template.named("c-routine").fill(values))),
 				selfTest(filter, arithmetic, identifier, values));
 	}
 
-	private static ExportedFile selfTest(HandOver filter, Arithmetic arithmetic, String identifier, Map<String, List<String>> values) {
+	private static ExportedFile selfTest(HandOver filter, Arithmetic arithmetic, String identifier, Map<String,
+			List<String>> values) {
 		TestVectors vectors = TestVectors.of(filter.taps(), arithmetic);
 		List<BigInteger> input = vectors.input();
 		List<BigInteger> output = vectors.output();
@@ -92,14 +95,16 @@ final class CRoutine implements ExportFormat {
 
 	private static String rate(Arithmetic arithmetic) {
 		return arithmetic.interpolation() > 1 ? arithmetic.factor() + " outputs for each sample"
-				: arithmetic.decimation() > 1 ? "one output for the first and every further " + arithmetic.factor() + " samples"
+				: arithmetic.decimation() > 1 ? "one output for the first and every further " + arithmetic.factor()
+						+ " samples"
 						: "one output for each sample";
 	}
 
 	private static List<String> helpers(CDatapath path, Arithmetic arithmetic, Map<String, List<String>> values) {
 		var lines = new ArrayList<String>();
 		if (path.rounds()) {
-			lines.addAll(text("c-round-" + arithmetic.rounding().name().toLowerCase(Locale.ROOT).replace('_', '-'), values));
+			lines.addAll(text("c-round-" + arithmetic.rounding().name().toLowerCase(Locale.ROOT).replace('_', '-'),
+					values));
 		}
 		if (path.saturates()) {
 			lines.addAll(text("c-saturate", values));

@@ -21,7 +21,8 @@ final class CTypes {
 				return (format.signed() ? "int" : "uint") + bits + "_t";
 			}
 		}
-		throw new InputException("", what + " of " + format.word() + " bits are longer than the longest type of portable C, which has "
+		throw new InputException("", what + " of " + format.word()
+				+ " bits are longer than the longest type of portable C, which has "
 				+ LONGEST);
 	}
 
@@ -30,7 +31,8 @@ final class CTypes {
 		if (value.equals(BigInteger.valueOf(Long.MIN_VALUE))) {
 			return "(-INT64_C(9223372036854775807) - 1)";
 		}
-		return value.bitLength() >= Long.SIZE ? "UINT64_C(" + value + ")" : value.bitLength() < Integer.SIZE ? value.toString()
+		return value.bitLength() >= Long.SIZE ? "UINT64_C(" + value + ")" : value.bitLength() < Integer.SIZE
+				? value.toString()
 				: value.signum() < 0 ? "-INT64_C(" + value.negate() + ")" : "INT64_C(" + value + ")";
 	}
 }

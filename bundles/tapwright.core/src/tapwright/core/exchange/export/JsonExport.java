@@ -63,7 +63,8 @@ final class JsonExport implements ExportFormat {
 		} catch (IOException e) {
 			throw new UncheckedIOException("writing to memory", e);
 		}
-		return List.of(new ExportedFile(Values.identifier(filter.name()) + ".json", Stamp.seal(text.append('\n').toString())));
+		return List.of(new ExportedFile(Values.identifier(filter.name()) + ".json",
+				Stamp.seal(text.append('\n').toString())));
 	}
 
 	private static void lines(JsonWriter json, String name, List<String> lines) throws IOException {

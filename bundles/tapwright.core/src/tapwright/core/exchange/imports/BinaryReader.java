@@ -29,14 +29,16 @@ final class BinaryReader {
 			return List.of();
 		}
 		if (content.length % bytes != 0) {
-			throw new InputException(file, "has " + content.length + " bytes, which is no whole number of words of " + bytes
+			throw new InputException(file, "has " + content.length + " bytes, which is no whole number of words of "
+					+ bytes
 					+ " bytes; state another word length");
 		}
 		if (content.length / bytes > ImportedTable.MOST) {
 			throw new InputException(file, "has more than " + ImportedTable.MOST + " words");
 		}
 		return List.of(options.real() ? reals(file, content, bits, options.bigEndian())
-				: ImportedTable.whole("", 0, integers(content, bits, options), Optional.of(new NumberFormat(bits, 0, options.signed()))));
+				: ImportedTable.whole("", 0, integers(content, bits, options),
+						Optional.of(new NumberFormat(bits, 0, options.signed()))));
 	}
 
 	private static ImportedTable reals(String file, byte[] content, int bits, boolean bigEndian) throws InputException {
@@ -46,7 +48,8 @@ final class BinaryReader {
 			int at = buffer.position();
 			double value = bits == Float.SIZE ? buffer.getFloat() : buffer.getDouble();
 			if (!Double.isFinite(value)) {
-				throw new InputException(file, "the number at byte " + at + " is " + value + "; is the word length or the order of bytes another?");
+				throw new InputException(file, "the number at byte " + at + " is " + value
+						+ "; is the word length or the order of bytes another?");
 			}
 			values.add(value);
 		}

@@ -19,7 +19,8 @@ final class CExpression {
 	private static final int LONGEST = 2000;
 	/** Macros that use macros can multiply; a file of coefficients never comes near. */
 	private static final int MOST_STEPS = 20_000_000;
-	private static final Set<String> TYPE_WORDS = Set.of("float", "double", "char", "short", "int", "long", "signed", "unsigned", "const",
+	private static final Set<String> TYPE_WORDS = Set.of("float", "double", "char", "short", "int", "long", "signed",
+			"unsigned", "const",
 			"int8_t", "int16_t", "int32_t", "int64_t", "uint8_t", "uint16_t", "uint32_t", "uint64_t");
 
 	private final Places source;
@@ -49,7 +50,8 @@ final class CExpression {
 	}
 
 	private Token peek() {
-		return at < tokens.size() ? tokens.get(at) : new Token(Kind.END, "", tokens.isEmpty() ? 0 : tokens.getLast().offset());
+		return at < tokens.size() ? tokens.get(at)
+				: new Token(Kind.END, "", tokens.isEmpty() ? 0 : tokens.getLast().offset());
 	}
 
 	private CNumber sum() throws InputException {
@@ -68,7 +70,8 @@ final class CExpression {
 		}
 		Token sign = tokens.get(at++);
 		CNumber right = unary();
-		if (peek().is("+") || peek().is("-") || peek().is("*") || peek().is("/") || peek().is("<<") || peek().is(">>")) {
+		if (peek().is("+") || peek().is("-") || peek().is("*") || peek().is("/") || peek().is("<<") || peek()
+				.is(">>")) {
 			throw source.error(peek().offset(), "put parentheses around the shift");
 		}
 		return combine(sign, left, right);
@@ -102,7 +105,8 @@ final class CExpression {
 		at++;
 		if (token.is("-") || token.is("+")) {
 			CNumber value = unary();
-			return token.is("+") ? value : value.isWhole() ? CNumber.of(value.integer().negate()) : CNumber.of(-value.real());
+			return token.is("+") ? value : value.isWhole() ? CNumber.of(value.integer().negate())
+					: CNumber.of(-value.real());
 		}
 		if (token.is("(")) {
 			if (isCast()) {
@@ -116,13 +120,15 @@ final class CExpression {
 			return value;
 		}
 		if (token.kind() == Kind.NUMBER) {
-			return CNumber.parse(token.text()).orElseThrow(() -> source.error(token.offset(), Places.quote(token.text()) + " is not a number that C knows"));
+			return CNumber.parse(token.text()).orElseThrow(() -> source.error(token.offset(), Places.quote(token.text())
+					+ " is not a number that C knows"));
 		}
 		if (token.kind() == Kind.NAME && macros.containsKey(token.text())) {
 			return macro(token);
 		}
 		throw source.error(token.offset(), token.kind() == Kind.END ? "the file ends inside a list of numbers"
-				: Places.quote(token.text()) + (token.kind() == Kind.NAME ? " is no macro that this file defines as a number" : " is not a number"));
+				: Places.quote(token.text()) + (token.kind() == Kind.NAME
+						? " is no macro that this file defines as a number" : " is not a number"));
 	}
 
 	private boolean isCast() {

@@ -43,13 +43,15 @@ record CNumber(BigInteger integer, double real) {
 		if (!real.matches()) {
 			return Optional.empty();
 		}
-		double value = real.group(2).equalsIgnoreCase("f") ? Float.parseFloat(real.group(1)) : Double.parseDouble(real.group(1));
+		double value = real.group(2).equalsIgnoreCase("f") ? Float.parseFloat(real.group(1))
+				: Double.parseDouble(real.group(1));
 		return Double.isFinite(value) ? Optional.of(of(value)) : Optional.empty();
 	}
 
 	private static Optional<CNumber> integer(String digits) {
 		if (digits.length() > 2 && Character.isLetter(digits.charAt(1))) {
-			return Optional.of(of(new BigInteger(digits.substring(2), Character.toLowerCase(digits.charAt(1)) == 'x' ? 16 : 2)));
+			return Optional.of(of(new BigInteger(digits.substring(2), Character.toLowerCase(digits.charAt(1)) == 'x'
+					? 16 : 2)));
 		}
 		if (digits.length() > 1 && digits.charAt(0) == '0') {
 			return digits.matches("[0-7]+") ? Optional.of(of(new BigInteger(digits, 8))) : Optional.empty();

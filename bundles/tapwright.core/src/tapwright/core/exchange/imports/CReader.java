@@ -18,7 +18,8 @@ import tapwright.dsp.arithmetic.NumberFormat;
  */
 final class CReader {
 
-	private static final Set<String> NO_NAMES = Set.of("return", "else", "do", "try", "struct", "union", "enum", "class", "namespace");
+	private static final Set<String> NO_NAMES = Set.of("return", "else", "do", "try", "struct", "union", "enum",
+			"class", "namespace");
 
 	private final Places source;
 	private final CTokens words;
@@ -46,7 +47,8 @@ final class CReader {
 		Optional<Integer> step = TextReader.step(source.text());
 		if (step.isPresent() && reader.tables.size() == 1 && reader.tables.getFirst().format().isPresent()) {
 			NumberFormat type = reader.tables.getFirst().format().get();
-			return List.of(reader.tables.getFirst().with(Optional.of(new NumberFormat(type.word(), step.get(), type.signed())), List.of()));
+			return List.of(reader.tables.getFirst()
+					.with(Optional.of(new NumberFormat(type.word(), step.get(), type.signed())), List.of()));
 		}
 		return reader.tables;
 	}
@@ -76,7 +78,7 @@ final class CReader {
 	}
 
 	// Looks back from the brace: NAME [LENGTH] ATTRIBUTES = {  or  NAME {
-	private Declaration declaration(int brace) throws InputException {
+	private Declaration declaration(int brace) {
 		int at = brace - 1;
 		boolean assigned = at >= 0 && tokens.get(at).is("=");
 		if (assigned) {
@@ -108,7 +110,8 @@ final class CReader {
 		} else if (assigned && !tokens.get(Math.max(name - 1, 0)).is(">")) {
 			return null; // a structure; containers have their type in angle brackets
 		}
-		if (name <= start || tokens.get(name).kind() != Kind.NAME || NO_NAMES.contains(tokens.get(name).text()) || !assigned && name == start + 1) {
+		if (name <= start || tokens.get(name).kind() != Kind.NAME || NO_NAMES.contains(tokens.get(name).text())
+				|| !assigned && name == start + 1) {
 			return null;
 		}
 		var type = new StringBuilder();
@@ -130,7 +133,8 @@ final class CReader {
 		}
 	}
 
-	private int numbers(int brace, Declaration declaration, List<List<CNumber>> lists, List<Integer> offsets) throws InputException {
+	private int numbers(int brace, Declaration declaration, List<List<CNumber>> lists,
+			List<Integer> offsets) throws InputException {
 		int depth = 0;
 		int at = brace;
 		boolean separated = true;
@@ -178,7 +182,8 @@ final class CReader {
 		int length = declaration.dimensions() == 1 ? declaration.length() : -1;
 		var notes = new ArrayList<String>();
 		if (length >= 0 && length < numbers.size()) {
-			throw source.error(offset, "the array has " + length + " elements, but " + numbers.size() + " numbers follow");
+			throw source.error(offset, "the array has " + length + " elements, but " + numbers.size()
+					+ " numbers follow");
 		}
 		if (length > ImportedTable.MOST) {
 			throw source.error(offset, "the array has more than " + ImportedTable.MOST + " elements");
@@ -192,7 +197,8 @@ final class CReader {
 		}
 		boolean whole = !declaration.type().real() && numbers.stream().allMatch(CNumber::isWhole);
 		int line = source.line(offset);
-		ImportedTable table = whole ? ImportedTable.whole(name, line, numbers.stream().map(CNumber::integer).toList(), declaration.type().format())
+		ImportedTable table = whole ? ImportedTable.whole(name, line, numbers.stream().map(CNumber::integer).toList(),
+				declaration.type().format())
 				: ImportedTable.real(name, line, numbers.stream().map(CNumber::toDouble).toList());
 		tables.add(table.with(table.format(), notes));
 	}

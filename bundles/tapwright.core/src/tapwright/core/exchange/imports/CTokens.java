@@ -30,7 +30,8 @@ final class CTokens {
 			(?<space>[\\s\\\\]++|//[^\\n]*+)|(?<comment>/\\*)|(?<directive>\\#)\
 			|(?<number>\\.?[0-9](?:[eEpP][-+]|'[0-9A-Za-z]|[.\\w])*+)|(?<name>[A-Za-z_]\\w*+)\
 			|(?<quote>["'])|(?<sign><<|>>|.)""", Pattern.DOTALL);
-	private static final Pattern DEFINITION = Pattern.compile("#\\s*define\\s+([A-Za-z_]\\w*)[ \\t]+(.+)", Pattern.DOTALL);
+	private static final Pattern DEFINITION = Pattern.compile("#\\s*define\\s+([A-Za-z_]\\w*)[ \\t]+(.+)",
+			Pattern.DOTALL);
 
 	private final Places source;
 	private final List<Token> tokens = new ArrayList<>();
@@ -68,7 +69,8 @@ final class CTokens {
 				next = literal(at, matcher.group().charAt(0), to);
 				into.add(new Token(Kind.TEXT, text.substring(at, next), at));
 			} else if (matcher.group("space") == null) {
-				Kind kind = matcher.group("number") != null ? Kind.NUMBER : matcher.group("name") != null ? Kind.NAME : Kind.SIGN;
+				Kind kind = matcher.group("number") != null ? Kind.NUMBER : matcher.group("name") != null ? Kind.NAME
+						: Kind.SIGN;
 				into.add(new Token(kind, matcher.group(), at));
 			}
 		}

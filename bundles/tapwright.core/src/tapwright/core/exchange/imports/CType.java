@@ -48,7 +48,8 @@ record CType(boolean real, boolean single, Optional<NumberFormat> format) {
 		if (words.contains("short")) {
 			return integers(16, signed);
 		}
-		return words.contains("int") && !words.contains("long") ? integers(32, signed) : new CType(false, false, Optional.empty());
+		return words.contains("int") && !words.contains("long") ? integers(32, signed)
+				: new CType(false, false, Optional.empty());
 	}
 
 	private static CType integers(int bits, boolean signed) {

@@ -33,19 +33,23 @@ final class Formats {
 			return table;
 		}
 		Optional<NumberFormat> found = table.format();
-		int word = options.word().orElse(found.map(NumberFormat::word).orElse(usual(table.integers(), options.signed())));
+		int word = options.word().orElse(found.map(NumberFormat::word)
+				.orElse(usual(table.integers(), options.signed())));
 		boolean signed = options.signed() && found.map(NumberFormat::signed).orElse(true);
 		boolean stated = options.fraction().isPresent() || found.filter(format -> format.fraction() != 0).isPresent();
-		int fraction = options.fraction().orElse(found.map(NumberFormat::fraction).filter(bits -> bits != 0).orElse(signed ? word - 1 : word));
+		int fraction = options.fraction().orElse(found.map(NumberFormat::fraction).filter(bits -> bits != 0)
+				.orElse(signed ? word - 1 : word));
 		try {
 			var format = new NumberFormat(word, fraction, signed);
 			var integers = new ArrayList<BigInteger>();
 			for (int k = 0; k < table.length(); k++) {
 				BigInteger integer = table.integers().get(k);
-				boolean bits = signed && integer.signum() > 0 && integer.bitLength() == word; // written without its sign
+				boolean bits = signed && integer.signum() > 0
+						&& integer.bitLength() == word; // written without its sign
 				BigInteger held = bits ? format.fit(integer, Overflow.WRAP) : integer;
 				if (!format.contains(held)) {
-					throw new InputException(place, "number " + (k + 1) + " of " + Places.quote(table.name()) + ", " + integer + ", is no number of "
+					throw new InputException(place, "number " + (k + 1) + " of " + Places.quote(table.name()) + ", "
+							+ integer + ", is no number of "
 							+ format.text() + "; state another word length");
 				}
 				integers.add(held);
@@ -54,7 +58,8 @@ final class Formats {
 			if (!stated) {
 				notes.add("the binary point is a guess: " + format.text());
 			}
-			return new ImportedTable(table.name(), table.line(), integers, List.of(), Optional.of(format), table.sampleRate(), notes);
+			return new ImportedTable(table.name(), table.line(), integers, List.of(), Optional.of(format),
+					table.sampleRate(), notes);
 		} catch (IllegalArgumentException e) {
 			throw new InputException(place, e.getMessage());
 		}

@@ -48,12 +48,14 @@ final class HexReader {
 				String plain = word.startsWith("0x") || word.startsWith("0X") ? word.substring(2) : word;
 				if (word.startsWith("@") && word.matches("@[0-9A-Fa-f]{1,16}")) {
 					if (!digits.isEmpty()) {
-						throw source.error(from + matcher.start(), "the image has a gap; split it into one file for each filter");
+						throw source.error(from + matcher.start(),
+								"the image has a gap; split it into one file for each filter");
 					}
 					continue;
 				}
 				if (!plain.matches("[0-9A-Fa-f]{1,32}")) {
-					throw source.error(from + matcher.start(), Places.quote(matcher.group()) + " is not a word of up to 32 hexadecimal digits");
+					throw source.error(from + matcher.start(), Places.quote(matcher.group())
+							+ " is not a word of up to 32 hexadecimal digits");
 				}
 				first = first < 0 ? from + matcher.start() : first;
 				digits.add(plain);
@@ -76,7 +78,8 @@ final class HexReader {
 
 	private static Optional<Integer> stated(String text) {
 		Matcher matcher = BITS.matcher(text);
-		return matcher.find() && Integer.parseInt(matcher.group(1)) >= 1 && Integer.parseInt(matcher.group(1)) <= NumberFormat.MAX_WORD
+		return matcher.find() && Integer.parseInt(matcher.group(1)) >= 1
+				&& Integer.parseInt(matcher.group(1)) <= NumberFormat.MAX_WORD
 				? Optional.of(Integer.parseInt(matcher.group(1))) : Optional.empty();
 	}
 
@@ -119,7 +122,8 @@ final class HexReader {
 		}
 		byte[] content = HexFormat.of().parseHex(record.substring(1));
 		if (content.length != (content[0] & 0xff) + FEWEST_BYTES) {
-			throw source.error(at, "the record says it has " + (content[0] & 0xff) + " bytes, but " + (content.length - FEWEST_BYTES) + " follow");
+			throw source.error(at, "the record says it has " + (content[0] & 0xff) + " bytes, but "
+					+ (content.length - FEWEST_BYTES) + " follow");
 		}
 		int sum = 0;
 		for (byte value : content) {

@@ -79,7 +79,8 @@ public enum ImportFormat {
 		if (text.contains("{")) {
 			return C;
 		}
-		boolean words = text.chars().anyMatch(c -> c >= 'A' && c <= 'F' || c >= 'a' && c <= 'f') && text.lines().allMatch(line -> WORDS.matcher(line).matches());
+		boolean words = text.chars().anyMatch(c -> c >= 'A' && c <= 'F' || c >= 'a' && c <= 'f') && text.lines()
+				.allMatch(line -> WORDS.matcher(line).matches());
 		return text.startsWith(":") || words ? HEX : TEXT;
 	}
 

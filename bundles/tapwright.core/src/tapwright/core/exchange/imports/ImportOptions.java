@@ -27,6 +27,7 @@ public record ImportOptions(Optional<ImportFormat> format, OptionalInt word, Opt
 		boolean bigEndian, boolean real, OptionalDouble sampleRate) {
 
 	/** Nothing is known. */
-	public static final ImportOptions NONE = new ImportOptions(Optional.empty(), OptionalInt.empty(), OptionalInt.empty(), true, false,
+	public static final ImportOptions NONE = new ImportOptions(Optional.empty(), OptionalInt.empty(),
+			OptionalInt.empty(), true, false,
 			false, OptionalDouble.empty());
 }

@@ -73,7 +73,8 @@ public record ImportPlan(List<Planned> filters, List<Path> skipped) {
 				ImportedFile found = ImportedFile.read(file.toString(), Files.readAllBytes(file), options);
 				if (found.filter().isEmpty() && found.tables().isEmpty()) {
 					if (!folder) {
-						throw new InputException(file.toString(), "holds no array of numbers, read as " + found.format().label()
+						throw new InputException(file.toString(), "holds no array of numbers, read as " + found.format()
+								.label()
 								+ "; state the format if it is another");
 					}
 					skipped.add(file);
@@ -98,7 +99,8 @@ public record ImportPlan(List<Planned> filters, List<Path> skipped) {
 	public List<Path> write(Path folder) throws InputException, IOException {
 		for (Planned planned : filters) {
 			if (Files.exists(folder.resolve(planned.fileName()))) {
-				throw new InputException(folder.resolve(planned.fileName()).toString(), "exists already; nothing was imported");
+				throw new InputException(folder.resolve(planned.fileName()).toString(),
+						"exists already; nothing was imported");
 			}
 		}
 		var written = new ArrayList<Path>();
@@ -127,11 +129,13 @@ public record ImportPlan(List<Planned> filters, List<Path> skipped) {
 
 	private static List<Path> usual(Path folder) throws IOException {
 		try (Stream<Path> files = Files.walk(folder)) {
-			return files.filter(Files::isRegularFile).filter(file -> ImportFormat.isUsual(file.getFileName().toString())).sorted().toList();
+			return files.filter(Files::isRegularFile)
+					.filter(file -> ImportFormat.isUsual(file.getFileName().toString())).sorted().toList();
 		}
 	}
 
-	private static void add(Path file, ImportedFile found, ImportOptions options, TreeMap<String, Path> taken, List<Planned> into) {
+	private static void add(Path file, ImportedFile found, ImportOptions options, TreeMap<String, Path> taken,
+			List<Planned> into) {
 		String base = FilePartners.nameOf(file.getFileName().toString());
 		if (found.filter().isPresent()) {
 			Filter filter = found.filter().get();
@@ -140,7 +144,8 @@ public record ImportPlan(List<Planned> filters, List<Path> skipped) {
 		}
 		for (ImportedTable table : found.tables()) {
 			String name = table.name().isEmpty() || table.name().equals("integer") ? base
-					: table.name().startsWith("column ") || table.name().startsWith("channel ") ? base + " " + table.name() : table.name();
+					: table.name().startsWith("column ") || table.name().startsWith("channel ") ? base + " "
+							+ table.name() : table.name();
 			Filter filter = filter(name, file, table, options);
 			into.add(new Planned(file, fileName(name, file, taken), filter, Optional.of(table)));
 		}
@@ -162,7 +167,8 @@ public record ImportPlan(List<Planned> filters, List<Path> skipped) {
 		table.sampleRate().ifPresent(rate -> filter.setSampleRate(number(rate)));
 		options.sampleRate().ifPresent(rate -> filter.setSampleRate(number(rate)));
 		GivenDesign design = ModelFactory.eINSTANCE.createGivenDesign();
-		design.setSource(file.getFileName() + (table.name().isEmpty() ? "" : ", " + table.name()) + (table.line() > 0 ? ", line " + table.line() : ""));
+		design.setSource(file.getFileName() + (table.name().isEmpty() ? "" : ", " + table.name())
+				+ (table.line() > 0 ? ", line " + table.line() : ""));
 		filter.setDesign(design);
 		if (table.isWhole()) {
 			NumberFormat format = table.format().orElseThrow();
@@ -186,6 +192,7 @@ public record ImportPlan(List<Planned> filters, List<Path> skipped) {
 	}
 
 	private static String number(double value) {
-		return value == Math.rint(value) && Math.abs(value) < 1e15 ? String.valueOf((long) value) : String.valueOf(value);
+		return value == Math.rint(value) && Math.abs(value) < 1e15 ? String.valueOf((long) value)
+				: String.valueOf(value);
 	}
 }

@@ -28,7 +28,8 @@ import tapwright.dsp.exact.Symmetry;
  * @param notes
  *            what a person should check
  */
-public record ImportedTable(String name, int line, List<BigInteger> integers, List<Double> values, Optional<NumberFormat> format,
+public record ImportedTable(String name, int line, List<BigInteger> integers, List<Double> values,
+		Optional<NumberFormat> format,
 		OptionalDouble sampleRate, List<String> notes) {
 
 	/** Most coefficients that are read. */
@@ -69,7 +70,8 @@ public record ImportedTable(String name, int line, List<BigInteger> integers, Li
 
 	/** The numbers; integers in steps of their format. */
 	public ExactTaps taps() {
-		return isWhole() ? ExactTaps.ofIntegers(integers, format.map(NumberFormat::step).orElse(ExactTaps.powerOfTwo(0)))
+		return isWhole() ? ExactTaps.ofIntegers(integers, format.map(NumberFormat::step)
+				.orElse(ExactTaps.powerOfTwo(0)))
 				: ExactTaps.ofDoubles(values.stream().mapToDouble(Double::doubleValue).toArray());
 	}
 

@@ -38,15 +38,19 @@ final class JsonReader {
 
 	private void find(String name, Object value) throws InputException {
 		switch (value) {
-		case List<?> list when !list.isEmpty() && list.stream().allMatch(NumberLiteral.class::isInstance) -> tables.add(table(name, list, Optional.empty()));
-		case List<?> list when list.stream().anyMatch(NumberLiteral.class::isInstance) -> throw new InputException(name, "holds numbers and other things");
+		case List<?> list when !list.isEmpty() && list.stream()
+				.allMatch(NumberLiteral.class::isInstance) -> tables.add(table(name, list, Optional.empty()));
+		case List<?> list when list.stream().anyMatch(NumberLiteral.class::isInstance) -> throw new InputException(name,
+				"holds numbers and other things");
 		case List<?> list -> {
 			for (int k = 0; k < list.size(); k++) {
 				find(name + "[" + k + "]", list.get(k));
 			}
 		}
-		case Map<?, ?> members when members.get("integers") instanceof List<?> integers && scale(members).isPresent() -> {
-			ImportedTable table = table(members.get("name") instanceof String given ? given : name, integers, scale(members));
+		case Map<?, ?> members when members.get("integers") instanceof List<?> integers && scale(members)
+				.isPresent() -> {
+			ImportedTable table = table(members.get("name") instanceof String given ? given : name, integers,
+					scale(members));
 			boolean rated = members.get("sampleRate") instanceof NumberLiteral;
 			tables.add(rated ? table.atRate(number((NumberLiteral) members.get("sampleRate"))) : table);
 		}
@@ -77,7 +81,8 @@ final class JsonReader {
 		}
 		if (!texts.isEmpty() && texts.stream().allMatch(text -> text.matches("-?\\d{1,400}"))) {
 			List<BigInteger> integers = texts.stream().map(BigInteger::new).toList();
-			return new ImportedTable(name, 0, integers, List.of(), fraction.map(bits -> Formats.shortest(integers, bits, true)),
+			return new ImportedTable(name, 0, integers, List.of(),
+					fraction.map(bits -> Formats.shortest(integers, bits, true)),
 					OptionalDouble.empty(), List.of());
 		}
 		var values = new ArrayList<Double>();

@@ -69,14 +69,16 @@ final class TextReader {
 		}
 		for (Field field : fields) {
 			if (number(field.text()).isEmpty()) {
-				throw source.error(field.offset(), field.text().isEmpty() ? "a number is missing" : Places.quote(field.text()) + " is not a finite number");
+				throw source.error(field.offset(), field.text().isEmpty() ? "a number is missing"
+						: Places.quote(field.text()) + " is not a finite number");
 			}
 		}
 		rows.add(fields);
 	}
 
 	private static String separator(String text) {
-		String data = text.lines().map(TextReader::withoutComment).reduce("", (all, line) -> all.length() < 10_000 ? all + line + "\n" : all);
+		String data = text.lines().map(TextReader::withoutComment)
+				.reduce("", (all, line) -> all.length() < 10_000 ? all + line + "\n" : all);
 		return data.contains(";") ? ";" : data.contains(",") ? "," : data.contains("\t") ? "\t" : " ";
 	}
 
@@ -121,7 +123,8 @@ final class TextReader {
 		boolean equal = rows.stream().allMatch(row -> row.size() == columns);
 		if (!names.isEmpty() && (!equal || names.size() != columns)) {
 			List<Field> odd = rows.stream().filter(row -> row.size() != names.size()).findFirst().orElseThrow();
-			throw source.error(odd.getFirst().offset(), "this line has " + odd.size() + " numbers, but there are " + names.size() + " columns");
+			throw source.error(odd.getFirst().offset(), "this line has " + odd.size() + " numbers, but there are "
+					+ names.size() + " columns");
 		}
 		int line = source.line(rows.getFirst().getFirst().offset());
 		if (names.isEmpty() && (!equal || trailingSeparators || columns > MOST_COLUMNS || rows.size() == 1)) {
@@ -146,7 +149,8 @@ final class TextReader {
 			return tables;
 		}
 		return tables.stream().filter(table -> table.name().equals("integer") && table.isWhole())
-				.map(table -> table.with(Optional.of(Formats.shortest(table.integers(), fraction.get(), true)), List.of())).toList();
+				.map(table -> table.with(Optional.of(Formats.shortest(table.integers(), fraction.get(), true)),
+						List.of())).toList();
 	}
 
 	// A first column 0, 1, 2, ... or 1, 2, 3, ... numbers the lines.
@@ -165,7 +169,8 @@ final class TextReader {
 
 	private static ImportedTable table(String name, int line, List<String> texts) {
 		if (texts.stream().allMatch(text -> text.matches("[-+]?\\d{1,400}"))) {
-			return ImportedTable.whole(name, line, texts.stream().map(BigInteger::new).toList(), Optional.<NumberFormat>empty());
+			return ImportedTable.whole(name, line, texts.stream().map(BigInteger::new).toList(),
+					Optional.<NumberFormat>empty());
 		}
 		return ImportedTable.real(name, line, texts.stream().map(text -> number(text).orElseThrow()).toList());
 	}

@@ -30,7 +30,8 @@ final class WavImport {
 			long length = Math.min(header.dataBytes(), bytes.available());
 			int frames = (int) (length / header.frameBytes());
 			if (length < header.dataBytes()) {
-				throw new InputException(file, "states " + header.dataBytes() + " bytes of samples, but only " + length + " follow");
+				throw new InputException(file, "states " + header.dataBytes() + " bytes of samples, but only " + length
+						+ " follow");
 			}
 			if ((long) frames * header.channels() > ImportedTable.MOST) {
 				throw new InputException(file, "has more than " + ImportedTable.MOST + " samples");
@@ -46,7 +47,8 @@ final class WavImport {
 		}
 	}
 
-	private static ImportedTable channel(String file, String name, byte[] content, int from, int frames, WavHeader header) throws InputException {
+	private static ImportedTable channel(String file, String name, byte[] content, int from, int frames,
+			WavHeader header) throws InputException {
 		ByteBuffer buffer = ByteBuffer.wrap(content).order(ByteOrder.LITTLE_ENDIAN);
 		var integers = new ArrayList<BigInteger>();
 		var values = new ArrayList<Double>();
@@ -68,7 +70,8 @@ final class WavImport {
 			}
 		}
 		ImportedTable table = header.real() ? ImportedTable.real(name, 0, values)
-				: ImportedTable.whole(name, 0, integers, Optional.of(new NumberFormat(header.bits(), header.bits() - 1)));
+				: ImportedTable.whole(name, 0, integers,
+						Optional.of(new NumberFormat(header.bits(), header.bits() - 1)));
 		return table.atRate(header.sampleRate());
 	}
 }

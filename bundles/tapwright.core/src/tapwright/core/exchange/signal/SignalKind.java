@@ -27,7 +27,8 @@ public enum SignalKind {
 		case "wav" -> WAV;
 		case "csv", "txt" -> CSV;
 		case "raw", "bin" -> RAW;
-		default -> throw new InputException(file.toString(), "the name must end with .wav, .csv, .txt, .raw or .bin, which tells the kind of file");
+		default -> throw new InputException(file.toString(),
+				"the name must end with .wav, .csv, .txt, .raw or .bin, which tells the kind of file");
 		};
 	}
 }

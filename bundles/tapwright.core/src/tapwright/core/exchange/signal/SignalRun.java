@@ -41,14 +41,16 @@ public record SignalRun(long moments, long outputs, boolean exact) {
 	 * @throws InputException
 	 *             when a file or the filter cannot be used; nothing was written then
 	 */
-	public static SignalRun of(Subject filter, Path input, Path output, Progress progress) throws InputException, IOException {
+	public static SignalRun of(Subject filter, Path input, Path output, Progress progress) throws InputException,
+			IOException {
 		if (!Files.isRegularFile(input)) {
 			throw new InputException(input.toString(), "there is no such file");
 		}
 		if (Files.exists(output) && Files.isSameFile(input, output)) {
 			throw new InputException(output.toString(), "is the input; give another file");
 		}
-		Optional<Arithmetic> exact = filter.arithmetic().filter(formats -> formats.input().isPresent() && formats.output().isPresent());
+		Optional<Arithmetic> exact = filter.arithmetic()
+				.filter(formats -> formats.input().isPresent() && formats.output().isPresent());
 		SignalKind inputKind = SignalKind.of(input);
 		SignalKind outputKind = SignalKind.of(output);
 		if (exact.isPresent()) {
@@ -70,7 +72,8 @@ public record SignalRun(long moments, long outputs, boolean exact) {
 		int channels = reader.channels();
 		var filters = new SampleFilter[channels];
 		for (int channel = 0; channel < channels; channel++) {
-			filters[channel] = exact.isPresent() ? new SampleFilter.Exact(new BitTrue(filter.taps(), exact.get())) : new SampleFilter.Real(filter);
+			filters[channel] = exact.isPresent() ? new SampleFilter.Exact(new BitTrue(filter.taps(), exact.get()))
+					: new SampleFilter.Real(filter);
 		}
 		double[][] block = new double[channels][BLOCK];
 		double[][] outputs = new double[channels][];
@@ -93,15 +96,18 @@ public record SignalRun(long moments, long outputs, boolean exact) {
 
 	private static void checkWord(NumberFormat format, String what, SignalKind kind) throws InputException {
 		if (format.word() > LONGEST_WORD) {
-			throw new InputException("arithmetic: " + what, "words of " + format.word() + " bits cannot be read from files or written; at most "
+			throw new InputException("arithmetic: " + what, "words of " + format.word()
+					+ " bits cannot be read from files or written; at most "
 					+ LONGEST_WORD);
 		}
 		if (kind == SignalKind.WAV && (!format.signed() || what.equals("output") && format.word() > LONGEST_WAV)) {
-			throw new InputException("arithmetic: " + what, format.text() + " does not fit the samples of a WAV file; use .csv or .raw");
+			throw new InputException("arithmetic: " + what, format.text()
+					+ " does not fit the samples of a WAV file; use .csv or .raw");
 		}
 	}
 
-	private static SignalReader reader(Path input, SignalKind kind, Optional<Arithmetic> exact) throws InputException, IOException {
+	private static SignalReader reader(Path input, SignalKind kind, Optional<Arithmetic> exact) throws InputException,
+			IOException {
 		return switch (kind) {
 		case WAV -> WordReader.wav(input);
 		case CSV -> new TextSignalReader(input);
@@ -110,18 +116,22 @@ public record SignalRun(long moments, long outputs, boolean exact) {
 		};
 	}
 
-	private static WavHeader words(Subject filter, Optional<Arithmetic> exact, SignalReader reader, SignalKind kind) throws InputException {
+	private static WavHeader words(Subject filter, Optional<Arithmetic> exact, SignalReader reader,
+			SignalKind kind) throws InputException {
 		double rate = reader.sampleRate().orElse(filter.sampleRate());
-		double outputRate = filter.arithmetic().map(formats -> rate * formats.interpolation() / formats.decimation()).orElse(rate);
+		double outputRate = filter.arithmetic().map(formats -> rate * formats.interpolation() / formats.decimation())
+				.orElse(rate);
 		long whole = Math.round(outputRate);
 		if (kind == SignalKind.WAV && (whole < 1 || whole > Integer.MAX_VALUE)) {
-			throw new InputException("", "a WAV file cannot have a sample rate of " + outputRate + " Hz; write .csv or .raw");
+			throw new InputException("", "a WAV file cannot have a sample rate of " + outputRate
+					+ " Hz; write .csv or .raw");
 		}
 		if (exact.isEmpty()) {
 			return new WavHeader(reader.channels(), whole, kind == SignalKind.WAV ? Float.SIZE : Double.SIZE, true, 0);
 		}
 		int word = exact.get().output().orElseThrow().word();
-		return new WavHeader(reader.channels(), whole, kind == SignalKind.WAV ? wavBits(word) : (word + 7) / 8 * 8, false, 0);
+		return new WavHeader(reader.channels(), whole, kind == SignalKind.WAV ? wavBits(word) : (word + 7) / 8 * 8,
+				false, 0);
 	}
 
 	private static int wavBits(int word) {
@@ -129,7 +139,8 @@ public record SignalRun(long moments, long outputs, boolean exact) {
 	}
 
 	// From what the file holds to integers of the input format, or to real numbers.
-	private static void take(double[] samples, int count, Optional<Arithmetic> exact, SignalReader reader, Path file, long before)
+	private static void take(double[] samples, int count, Optional<Arithmetic> exact, SignalReader reader, Path file,
+			long before)
 			throws InputException {
 		boolean scaled = reader.fullScaleBits() > 0;
 		if (exact.isEmpty()) {
@@ -144,7 +155,8 @@ public record SignalRun(long moments, long outputs, boolean exact) {
 				double steps = Math.scalb(samples[n], format.word() - (scaled ? reader.fullScaleBits() : 1));
 				samples[n] = SampleFilter.convert(steps, format, exact.get().rounding());
 			} else if (samples[n] != Math.rint(samples[n]) || Math.abs(samples[n]) > Math.scalb(1.0, LONGEST_WORD)) {
-				throw new InputException(file.toString(), "sample " + (before + n) + " is " + samples[n] + "; the filter runs on integers of "
+				throw new InputException(file.toString(), "sample " + (before + n) + " is " + samples[n]
+						+ "; the filter runs on integers of "
 						+ format.text());
 			}
 		}

@@ -69,7 +69,8 @@ final class SignalWriter implements Closeable {
 		for (int n = 0; n < count; n++) {
 			for (double[] channel : block) {
 				long word = !words.real() ? (long) channel[n]
-						: size == Float.BYTES ? Float.floatToRawIntBits((float) channel[n]) : Double.doubleToRawLongBits(channel[n]);
+						: size == Float.BYTES ? Float.floatToRawIntBits((float) channel[n])
+								: Double.doubleToRawLongBits(channel[n]);
 				for (int k = 0; k < size; k++) {
 					bytes[at++] = (byte) (word >> 8 * k);
 				}
@@ -77,7 +78,8 @@ final class SignalWriter implements Closeable {
 		}
 		written += bytes.length;
 		if (kind == SignalKind.WAV && written > LONGEST) {
-			throw new InputException(target.toString(), "the output is longer than a WAV file can be; write .raw or .csv");
+			throw new InputException(target.toString(),
+					"the output is longer than a WAV file can be; write .raw or .csv");
 		}
 		output.write(bytes);
 	}
@@ -103,7 +105,8 @@ final class SignalWriter implements Closeable {
 		header.put(tag("RIFF")).putInt((int) (written + written % 2 + HEADER - 8)).put(tag("WAVEfmt ")).putInt(16);
 		header.putShort((short) (words.real() ? 3 : 1)).putShort((short) words.channels());
 		header.putInt((int) words.sampleRate()).putInt((int) (words.sampleRate() * words.frameBytes()));
-		header.putShort((short) words.frameBytes()).putShort((short) words.bits()).put(tag("data")).putInt((int) written);
+		header.putShort((short) words.frameBytes()).putShort((short) words.bits()).put(tag("data"))
+				.putInt((int) written);
 		return header.array();
 	}
 

@@ -60,7 +60,8 @@ final class TextSignalReader implements SignalReader {
 		int count = 0;
 		while (next != null && count < block[0].length) {
 			if (next.length != block.length) {
-				throw new InputException(file + ":" + line, "there are " + next.length + " numbers, but " + block.length + " in the lines before");
+				throw new InputException(file + ":" + line, "there are " + next.length + " numbers, but " + block.length
+						+ " in the lines before");
 			}
 			for (int channel = 0; channel < block.length; channel++) {
 				block[channel][count] = next[channel];
@@ -89,7 +90,8 @@ final class TextSignalReader implements SignalReader {
 			for (int k = 0; k < fields.length && !named; k++) {
 				if (!fields[k].matches("[-+]?(\\d+(\\.\\d*)?|\\.\\d+)([eE][-+]?\\d{1,3})?")) {
 					if (!names) {
-						throw new InputException(file + ":" + line + ":" + (text.indexOf(fields[k]) + 1), "'" + fields[k] + "' is no number");
+						throw new InputException(file + ":" + line + ":" + (text.indexOf(fields[k]) + 1), "'"
+								+ fields[k] + "' is no number");
 					}
 					named = true;
 				} else {

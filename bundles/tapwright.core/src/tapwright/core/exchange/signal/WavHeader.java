@@ -93,7 +93,8 @@ public record WavHeader(int channels, long sampleRate, int bits, boolean real, l
 		boolean known = kind == PCM && (bits == 8 || bits == 16 || bits == 24 || bits == 32)
 				|| kind == IEEE_FLOAT && (bits == 32 || bits == 64);
 		if (!known || channels == 0 || rate == 0) {
-			throw new InputException(file, "has samples of kind " + kind + " with " + bits + " bits, " + channels + " channels at " + rate
+			throw new InputException(file, "has samples of kind " + kind + " with " + bits + " bits, " + channels
+					+ " channels at " + rate
 					+ " Hz; known are PCM of 8, 16, 24 or 32 bits and floating point of 32 or 64");
 		}
 		return new WavHeader(channels, rate, bits, kind == IEEE_FLOAT, 0);

@@ -74,7 +74,8 @@ final class WordReader implements SignalReader {
 		}
 		int read = input.readNBytes(bytes, 0, wanted);
 		if (read < wanted && wav) {
-			throw new InputException(file.toString(), "ends " + (left - read) + " bytes before the samples that it states");
+			throw new InputException(file.toString(), "ends " + (left - read)
+					+ " bytes before the samples that it states");
 		}
 		if (read % frame != 0) {
 			throw new InputException(file.toString(), "does not end with a whole sample of " + frame + " bytes");

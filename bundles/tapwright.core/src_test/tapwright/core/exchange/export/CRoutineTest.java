@@ -80,7 +80,8 @@ class CRoutineTest {
 	static void needsACompiler() throws InterruptedException {
 		boolean found = true;
 		try {
-			found = new ProcessBuilder("gcc", "--version").redirectOutput(ProcessBuilder.Redirect.DISCARD).start().waitFor() == 0;
+			found = new ProcessBuilder("gcc", "--version").redirectOutput(ProcessBuilder.Redirect.DISCARD).start()
+					.waitFor() == 0;
 		} catch (IOException e) {
 			found = false;
 		}
@@ -127,7 +128,8 @@ class CRoutineTest {
 		taps[7] = Double.MIN_VALUE;
 		taps[8] = -Double.MAX_VALUE;
 		taps[9] = -0.0;
-		var filter = new HandOver("probe", "", List.of("met: a */ comment ±1 /* end"), ExactTaps.ofDoubles(taps), 1000, Optional.empty(), false);
+		var filter = new HandOver("probe", "", List.of("met: a */ comment ±1 /* end"), ExactTaps.ofDoubles(taps), 1000,
+				Optional.empty(), false);
 		write(new CTable().write(filter));
 		Files.writeString(folder.resolve("print.c"), """
 				#include <stdio.h>
@@ -139,7 +141,8 @@ class CRoutineTest {
 				""");
 		run(command("print.c", "print"), new byte[0]);
 		double[] printed = new double[taps.length];
-		ByteBuffer.wrap(run(List.of("./print"), new byte[0])).order(ByteOrder.nativeOrder()).asDoubleBuffer().get(printed);
+		ByteBuffer.wrap(run(List.of("./print"), new byte[0])).order(ByteOrder.nativeOrder()).asDoubleBuffer()
+				.get(printed);
 		for (int k = 0; k < taps.length; k++) {
 			assertEquals(0, Double.compare(taps[k] + 0.0, printed[k] + 0.0), "coefficient " + k);
 		}
@@ -148,14 +151,16 @@ class CRoutineTest {
 	@Test
 	void whatDoesNotFitIsRefusedInWords() {
 		var wide = new NumberFormat(40, 39);
-		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(wide), Optional.of(wide), Optional.empty(), Optional.empty(),
+		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(wide), Optional.of(wide), Optional.empty(),
+				Optional.empty(),
 				Optional.empty(), Rounding.HALF_EVEN, Overflow.SATURATE);
 		var taps = ExactTaps.ofIntegers(List.of(wide.max()), wide.step());
 		var filter = new HandOver("probe", "", List.of(), taps, 1, Optional.of(arithmetic), true);
 		var refused = assertThrows(InputException.class, () -> new CRoutine().write(filter));
 		assertEquals("probe: a product may need 79 bits; the routine computes with 64", refused.describe());
 		var bare = new HandOver("probe", "", List.of(), taps, 1, Optional.empty(), true);
-		assertTrue(assertThrows(InputException.class, () -> new CRoutine().write(bare)).describe().contains("no arithmetic"));
+		assertTrue(assertThrows(InputException.class, () -> new CRoutine().write(bare)).describe()
+				.contains("no arithmetic"));
 	}
 
 	private void compare(HandOver filter, Random random, String what) throws Exception {
@@ -169,7 +174,8 @@ class CRoutineTest {
 		compile.addAll(List.of("-DINPUT=" + input, "-DOUTPUT=" + output));
 		run(compile, new byte[0]);
 		BigInteger[] samples = signal(filter, format, random);
-		long[] expected = Arrays.stream(new BitTrue(filter.taps(), arithmetic).filter(samples)).mapToLong(BigInteger::longValue).toArray();
+		long[] expected = Arrays.stream(new BitTrue(filter.taps(), arithmetic).filter(samples))
+				.mapToLong(BigInteger::longValue).toArray();
 		ByteBuffer bytes = ByteBuffer.allocate(8 * samples.length).order(ByteOrder.nativeOrder());
 		for (BigInteger sample : samples) {
 			bytes.putLong(sample.longValueExact());
@@ -213,7 +219,8 @@ class CRoutineTest {
 		BigInteger[] taps = new BigInteger[length];
 		int sign = structure == Structure.FOLDED && random.nextBoolean() ? -1 : 1;
 		for (int k = 0; k < length; k++) {
-			taps[k] = new BigInteger(word, random).subtract(BigInteger.ONE.shiftLeft(word - 1)).max(BigInteger.ONE.shiftLeft(word - 1).negate().add(BigInteger.ONE));
+			taps[k] = new BigInteger(word, random).subtract(BigInteger.ONE.shiftLeft(word - 1))
+					.max(BigInteger.ONE.shiftLeft(word - 1).negate().add(BigInteger.ONE));
 			boolean symmetric = structure == Structure.FOLDED || structure == Structure.HALF_BAND;
 			if (symmetric && k >= (length + 1) / 2) {
 				taps[k] = taps[length - 1 - k].multiply(BigInteger.valueOf(sign));
@@ -238,12 +245,15 @@ class CRoutineTest {
 		Optional<NumberFormat> sums = random.nextInt(4) == 0 ? Optional.empty()
 				: Optional.of(new NumberFormat(Math.min(62, word + inputWord + random.nextInt(10) - 5), accumulator));
 		Optional<NumberFormat> outputs = random.nextInt(4) == 0 ? Optional.empty()
-				: Optional.of(new NumberFormat(3 + random.nextInt(30), accumulator - random.nextInt(20), random.nextInt(5) > 0));
+				: Optional.of(new NumberFormat(3 + random.nextInt(30), accumulator - random.nextInt(20),
+						random.nextInt(5) > 0));
 		var arithmetic = new Arithmetic(structure, Optional.of(new NumberFormat(word, fraction)),
 				Optional.of(new NumberFormat(inputWord, inputFraction, random.nextInt(4) > 0)), products, sums, outputs,
-				Rounding.values()[random.nextInt(Rounding.values().length)], Overflow.values()[random.nextInt(2)], factor);
+				Rounding.values()[random.nextInt(Rounding.values().length)], Overflow.values()[random.nextInt(2)],
+						factor);
 		BigFraction unit = ExactTaps.powerOfTwo(-fraction);
-		return new HandOver("probe", "", List.of(), ExactTaps.ofIntegers(List.of(taps), unit), 1000, Optional.of(arithmetic), true);
+		return new HandOver("probe", "", List.of(), ExactTaps.ofIntegers(List.of(taps), unit), 1000,
+				Optional.of(arithmetic), true);
 	}
 
 	private void write(List<ExportedFile> files) throws IOException {
@@ -267,7 +277,8 @@ class CRoutineTest {
 		Path out = folder.resolve("stdout");
 		Path err = folder.resolve("stderr");
 		Files.write(in, input);
-		int code = new ProcessBuilder(command).directory(folder.toFile()).redirectInput(in.toFile()).redirectOutput(out.toFile())
+		int code = new ProcessBuilder(command).directory(folder.toFile()).redirectInput(in.toFile())
+				.redirectOutput(out.toFile())
 				.redirectError(err.toFile()).start().waitFor();
 		assertEquals(0, code, () -> String.join(" ", command) + "\n" + read(err) + read(out));
 		return Files.readAllBytes(out);

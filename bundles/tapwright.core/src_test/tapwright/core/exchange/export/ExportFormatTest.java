@@ -39,7 +39,8 @@ class ExportFormatTest {
 	void everyFileSaysWhatItIs() throws InputException {
 		for (ExportFormat format : ExportFormat.all()) {
 			for (ExportedFile file : format.write(filter(100))) {
-				assertTrue(Stream.of("wave low-pass", "0123456789ab", filter(100).numbersHash()).allMatch(file.text()::contains), file.text());
+				assertTrue(Stream.of("wave low-pass", "0123456789ab", filter(100).numbersHash())
+						.allMatch(file.text()::contains), file.text());
 			}
 			assertTrue(format.write(filter(100)).getFirst().text().contains("met: stop: gain"), format.name());
 		}
@@ -67,7 +68,8 @@ class ExportFormatTest {
 		assertTrue(text("vhdl").contains("\t\t0 => 12x\"064\", -- 100\n\t\t1 => 12x\"F9C\", -- -100\n"), text("vhdl"));
 		assertTrue(text("vhdl").contains("\t\t3 => 12x\"800\" -- -2048\n"), text("vhdl"));
 		assertTrue(text("systemverilog").contains("\t\t12'shF9C, // -100\n"), text("systemverilog"));
-		assertTrue(text("csv").contains("\nindex,integer,value\n0,100,0.048828125\n1,-100,-0.048828125\n"), text("csv"));
+		assertTrue(text("csv").contains("\nindex,integer,value\n0,100,0.048828125\n1,-100,-0.048828125\n"),
+				text("csv"));
 		assertTrue(text("c").contains("static const int16_t wave_low_pass_coefficients[WAVE_LOW_PASS_TAPS] = {\n\t100, -100, 2047, -2048\n};"), text("c"));
 	}
 
@@ -100,7 +102,8 @@ class ExportFormatTest {
 
 	private static HandOver filter(int first) {
 		List<BigInteger> integers = Stream.of(first, -100, 2047, -2048).map(BigInteger::valueOf).toList();
-		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(Q11), Optional.of(Q11), Optional.empty(), Optional.empty(),
+		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(Q11), Optional.of(Q11), Optional.empty(),
+				Optional.empty(),
 				Optional.of(Q11), Rounding.HALF_EVEN, Overflow.SATURATE);
 		return new HandOver("wave low-pass", "0123456789ab", List.of("met: stop: gain from 8 to 24 kHz at most -80 dB"),
 				ExactTaps.ofIntegers(integers, Q11.step()), 48000, Optional.of(arithmetic), true);

@@ -67,9 +67,11 @@ class HardwareTest {
 
 	private static HandOver filter(NumberFormat format) {
 		List<BigInteger> integers = Stream.of(format.min(), BigInteger.ONE.min(format.max()), format.max()).toList();
-		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(format), Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(),
+		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(format), Optional.empty(), Optional.empty(),
+				Optional.empty(), Optional.empty(),
 				Rounding.HALF_EVEN, Overflow.SATURATE);
-		return new HandOver("probe", "", List.of("met: within ±1 dB"), ExactTaps.ofIntegers(integers, format.step()), 1, Optional.of(arithmetic), true);
+		return new HandOver("probe", "", List.of("met: within ±1 dB"), ExactTaps.ofIntegers(integers, format.step()), 1,
+				Optional.of(arithmetic), true);
 	}
 
 	private void write(String format, HandOver filter) throws InputException, IOException {
@@ -80,7 +82,8 @@ class HardwareTest {
 
 	private static boolean found(String program) throws InterruptedException {
 		try {
-			return new ProcessBuilder(program, "--version").redirectOutput(ProcessBuilder.Redirect.DISCARD).start().waitFor() == 0;
+			return new ProcessBuilder(program, "--version").redirectOutput(ProcessBuilder.Redirect.DISCARD).start()
+					.waitFor() == 0;
 		} catch (IOException e) {
 			return false; // the machine does not have it
 		}

@@ -66,7 +66,8 @@ class ImportedFileTest {
 	@Test
 	void initialiserListsOfManyKindsAreFound() throws InputException {
 		List<ImportedTable> tables = read("a.cpp", SOURCE).tables();
-		assertEquals(List.of("low", "exact", "q15", "modern", "also", "two[0]", "two[1]", "padded"), tables.stream().map(ImportedTable::name).toList());
+		assertEquals(List.of("low", "exact", "q15", "modern", "also", "two[0]", "two[1]", "padded"), tables.stream()
+				.map(ImportedTable::name).toList());
 		assertEquals(List.of((double) 0.1f, -0.5, (double) 1e-3f, 0.25), tables.get(0).values());
 		assertEquals(List.of(0.1875, 0.5, 1.0 / 3, 7.0), tables.get(1).values());
 		assertEquals(integers(32767, -2, -3, 16, 16), tables.get(2).integers());
@@ -80,7 +81,8 @@ class ImportedFileTest {
 	}
 
 	@ParameterizedTest
-	@CsvSource(delimiter = '|', quoteCharacter = '`', value = { "float h[] = {1.0, 2.0 3.0}; | a.c:1:23 | ',' is missing",
+	@CsvSource(delimiter = '|', quoteCharacter = '`',
+			value = { "float h[] = {1.0, 2.0 3.0}; | a.c:1:23 | ',' is missing",
 			"float h[] = {1.0, x}; | a.c:1:19 | no macro", "int8_t h[] = {1, 300}; | a.c:1:18 | not in the range",
 			"int h[] = {1, 0.5}; | a.c:1:15 | lose its fraction", "float h[2] = {1, 2, 3}; | a.c:1:15 | has 2 elements",
 			"float h[] = {1, 2 | a.c:1:18 | file ends", "/* float h[] = {1}; | a.c:1:1 | does not end",
@@ -94,7 +96,8 @@ class ImportedFileTest {
 
 	@Test
 	void aMacroThatStandsForItselfIsAnError() {
-		var error = assertThrows(InputException.class, () -> read("a.c", "#define A B\n#define B A\nfloat h[] = { A };\n"));
+		var error = assertThrows(InputException.class,
+				() -> read("a.c", "#define A B\n#define B A\nfloat h[] = { A };\n"));
 		assertTrue(error.describe().contains("stands for itself"), error.describe());
 	}
 
@@ -110,42 +113,55 @@ class ImportedFileTest {
 	}
 
 	@ParameterizedTest
-	@CsvSource(delimiter = '|', value = { "1,2\\n3,x\\n | a.csv:2:3", "a,b\\n1,2\\n3\\n | a.csv:3:1", "1\\nNaN\\n | a.csv:2:1", "1,,2 | a.csv:1:3",
+	@CsvSource(delimiter = '|', value = { "1,2\\n3,x\\n | a.csv:2:3", "a,b\\n1,2\\n3\\n | a.csv:3:1",
+			"1\\nNaN\\n | a.csv:2:1", "1,,2 | a.csv:1:3",
 			"1e999 | a.csv:1:1" })
 	void whatIsNoNumberInATextIsNamedWithItsPlace(String text, String place) {
-		var error = assertThrows(InputException.class, () -> read("a.csv", (text.strip() + "\n").replace("\\n", "\n").replace("1e999", "1\n1e999")));
+		var error = assertThrows(InputException.class,
+				() -> read("a.csv", (text.strip() + "\n").replace("\\n", "\n").replace("1e999", "1\n1e999")));
 		assertEquals(text.startsWith("1e999") ? "a.csv:2:1" : place, error.place());
 	}
 
 	@Test
 	void arraysOfJsonAreFoundWhereverTheyStand() throws InputException {
 		assertEquals(integers(1, 2, 1), read("a.json", "[1, 2, 1]").tables().getFirst().integers());
-		var tables = read("a.json", "{\"bank\": {\"low\": [0.5, 0.5], \"high\": [0.5, -0.5]}, \"note\": \"x\"}").tables();
+		var tables = read("a.json", "{\"bank\": {\"low\": [0.5, 0.5], \"high\": [0.5, -0.5]}, \"note\": \"x\"}")
+				.tables();
 		assertEquals(List.of("low", "high"), tables.stream().map(ImportedTable::name).toList());
 		assertEquals(List.of(Symmetry.EVEN, Symmetry.ODD), tables.stream().map(ImportedTable::symmetry).toList());
 		assertThrows(InputException.class, () -> read("a.json", "[1, \"x\"]"));
-		assertTrue(read("a.json", "{\"format\": \"tapwright-filter/1\", \"coefficients\": {\"values\": [1]}}").filter().isPresent());
+		assertTrue(read("a.json", "{\"format\": \"tapwright-filter/1\", \"coefficients\": {\"values\": [1]}}").filter()
+				.isPresent());
 	}
 
 	@Test
 	void memoryImagesHaveWordsAndAnOrderOfBytes() throws InputException {
 		byte[] bytes = { 1, 0, (byte) 0xfe, (byte) 0xff };
-		assertEquals(integers(1, -2), ImportedFile.read("a.bin", bytes, ImportOptions.NONE).tables().getFirst().integers());
-		var big = new ImportOptions(Optional.of(ImportFormat.BINARY), OptionalInt.of(16), OptionalInt.of(8), false, true, false, OptionalDouble.of(8000));
+		assertEquals(integers(1, -2), ImportedFile.read("a.bin", bytes, ImportOptions.NONE).tables().getFirst()
+				.integers());
+		var big = new ImportOptions(Optional.of(ImportFormat.BINARY), OptionalInt.of(16), OptionalInt.of(8), false,
+				true, false, OptionalDouble.of(8000));
 		assertEquals(integers(256, 65279), ImportedFile.read("a.bin", bytes, big).tables().getFirst().integers());
-		assertEquals(Optional.of(new NumberFormat(16, 8, false)), ImportedFile.read("a.bin", bytes, big).tables().getFirst().format());
-		var real = new ImportOptions(Optional.of(ImportFormat.BINARY), OptionalInt.of(32), OptionalInt.empty(), true, false, true, OptionalDouble.empty());
+		assertEquals(Optional.of(new NumberFormat(16, 8, false)), ImportedFile.read("a.bin", bytes, big).tables()
+				.getFirst().format());
+		var real = new ImportOptions(Optional.of(ImportFormat.BINARY), OptionalInt.of(32), OptionalInt.empty(), true,
+				false, true, OptionalDouble.empty());
 		byte[] floats = ByteBuffer.allocate(8).order(ByteOrder.LITTLE_ENDIAN).putFloat(0.1f).putFloat(-2).array();
-		assertEquals(List.of((double) 0.1f, -2.0), ImportedFile.read("a.bin", floats, real).tables().getFirst().values());
-		assertThrows(InputException.class, () -> ImportedFile.read("a.bin", new byte[] { 0, 1, 2 }, ImportOptions.NONE));
+		assertEquals(List.of((double) 0.1f, -2.0), ImportedFile.read("a.bin", floats, real).tables().getFirst()
+				.values());
+		assertThrows(InputException.class, () -> ImportedFile.read("a.bin", new byte[] { 0, 1, 2 },
+				ImportOptions.NONE));
 	}
 
 	@Test
 	void hexadecimalWordsAreTwosComplement() throws InputException {
-		assertEquals(integers(100, -2, -32768), read("a.hex", "// table\n@0\n0064 FFFE\n8000\n").tables().getFirst().integers());
+		assertEquals(integers(100, -2, -32768), read("a.hex", "// table\n@0\n0064 FFFE\n8000\n").tables().getFirst()
+				.integers());
 		// Check sums computed by hand: the bytes of a record add up to 0 modulo 256.
-		assertEquals(integers(100, -2), read("a.hex", ":040000006400FEFF9B\n:00000001FF\n").tables().getFirst().integers());
-		assertTrue(assertThrows(InputException.class, () -> read("a.hex", ":040000006400FEFF9C\n:00000001FF\n")).describe()
+		assertEquals(integers(100, -2), read("a.hex", ":040000006400FEFF9B\n:00000001FF\n").tables().getFirst()
+				.integers());
+		assertTrue(assertThrows(InputException.class, () -> read("a.hex", ":040000006400FEFF9C\n:00000001FF\n"))
+				.describe()
 				.equals("a.hex:1:1: the check sum of the record is wrong"));
 		assertEquals("a.hex:2:3", assertThrows(InputException.class, () -> read("a.hex", "00 11\n  zz\n")).place());
 	}
@@ -153,9 +169,11 @@ class ImportedFileTest {
 	@Test
 	void whatWasExportedComesBack() throws InputException {
 		NumberFormat word = new NumberFormat(12, 11);
-		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(word), Optional.of(word), Optional.empty(), Optional.empty(), Optional.empty(),
+		var arithmetic = new Arithmetic(Structure.DIRECT, Optional.of(word), Optional.of(word), Optional.empty(),
+				Optional.empty(), Optional.empty(),
 				Rounding.HALF_EVEN, Overflow.SATURATE);
-		var filter = new HandOver("wave", "", List.of(), ExactTaps.ofIntegers(integers(100, -100, 2047, -2048), word.step()), 50, Optional.of(arithmetic), true);
+		var filter = new HandOver("wave", "", List.of(),
+				ExactTaps.ofIntegers(integers(100, -100, 2047, -2048), word.step()), 50, Optional.of(arithmetic), true);
 		for (String format : List.of("c", "csv", "json", "hex")) {
 			ExportedFile file = ExportFormat.of(format).orElseThrow().write(filter).getFirst();
 			ImportedTable table = read(file.name(), file.text()).tables().getFirst();

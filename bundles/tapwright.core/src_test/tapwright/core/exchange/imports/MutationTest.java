@@ -33,7 +33,8 @@ class MutationTest {
 			Seed seed = seeds.get(k % seeds.size());
 			byte[] damaged = damage(seed.content(), random);
 			String what = seed.name() + " " + k;
-			refused += assertTimeoutPreemptively(Duration.ofSeconds(20), () -> refuses(seed.name(), damaged), what) ? 1 : 0;
+			refused += assertTimeoutPreemptively(Duration.ofSeconds(20), () -> refuses(seed.name(), damaged), what) ? 1
+					: 0;
 		}
 		assertTrue(refused > FILES / 10 && refused < FILES, refused + " refused");
 	}

@@ -52,7 +52,8 @@ class SignalRunTest {
 		}
 		SignalRun run = run(filter, write("in.wav", WavFiles.of(16, false, 2, 8000, bytes.array())), "out.wav");
 		assertEquals(new SignalRun(10_001, 10_001, true), run);
-		ByteBuffer output = ByteBuffer.wrap(Files.readAllBytes(folder.resolve("out.wav"))).order(ByteOrder.LITTLE_ENDIAN);
+		ByteBuffer output = ByteBuffer.wrap(Files.readAllBytes(folder.resolve("out.wav")))
+				.order(ByteOrder.LITTLE_ENDIAN);
 		for (int channel = 0; channel < 2; channel++) {
 			long[] input = new long[10_001];
 			for (int n = 0; n < input.length; n++) {
@@ -60,7 +61,8 @@ class SignalRunTest {
 			}
 			long[] expected = new BitTrue(TAPS, filter.arithmetic().orElseThrow()).filter(input);
 			for (int n = 0; n < input.length; n++) {
-				assertEquals(expected[n], output.getShort(44 + 2 * (2 * n + channel)), "channel " + channel + " sample " + n);
+				assertEquals(expected[n], output.getShort(44 + 2 * (2 * n + channel)), "channel " + channel + " sample "
+						+ n);
 			}
 		}
 	}
@@ -82,13 +84,16 @@ class SignalRunTest {
 		Subject filter = filter(16, 16, Structure.POLYPHASE_DECIMATOR, 3);
 		long[] input = LongStream.range(0, 5000).map(n -> n * 7919 % 65536 - 32768).toArray();
 		long[] expected = new BitTrue(TAPS, filter.arithmetic().orElseThrow()).filter(input);
-		Path text = Files.writeString(folder.resolve("in.csv"), "# a comment\nvalue\n" + LongStream.of(input).mapToObj(n -> n + "\n").collect(Collectors.joining()));
+		Path text = Files.writeString(folder.resolve("in.csv"), "# a comment\nvalue\n" + LongStream.of(input)
+				.mapToObj(n -> n + "\n").collect(Collectors.joining()));
 		assertEquals(new SignalRun(5000, 1667, true), run(filter, text, "out.csv"));
-		assertArrayEquals(expected, Files.readAllLines(folder.resolve("out.csv")).stream().mapToLong(Long::parseLong).toArray());
+		assertArrayEquals(expected, Files.readAllLines(folder.resolve("out.csv")).stream().mapToLong(Long::parseLong)
+				.toArray());
 		ByteBuffer raw = ByteBuffer.allocate(10_000).order(ByteOrder.LITTLE_ENDIAN);
 		LongStream.of(input).forEach(n -> raw.putShort((short) n));
 		run(filter, write("in.raw", raw.array()), "out.raw");
-		ByteBuffer output = ByteBuffer.wrap(Files.readAllBytes(folder.resolve("out.raw"))).order(ByteOrder.LITTLE_ENDIAN);
+		ByteBuffer output = ByteBuffer.wrap(Files.readAllBytes(folder.resolve("out.raw")))
+				.order(ByteOrder.LITTLE_ENDIAN);
 		for (long value : expected) {
 			assertEquals(value, output.getShort());
 		}
@@ -101,7 +106,8 @@ class SignalRunTest {
 		Path text = Files.writeString(folder.resolve("in.csv"), "1,0\n0,2\n0,0\n");
 		assertEquals(new SignalRun(3, 6, false), run(filter, text, "out.csv"));
 		// Computed by hand: each input at every second place, convolved with the coefficients.
-		assertEquals("0.25,0.0\n0.5,0.0\n-0.25,0.5\n0.375,1.0\n0.0,-0.5\n0.0,0.75\n", Files.readString(folder.resolve("out.csv")));
+		assertEquals("0.25,0.0\n0.5,0.0\n-0.25,0.5\n0.375,1.0\n0.0,-0.5\n0.0,0.75\n",
+				Files.readString(folder.resolve("out.csv")));
 	}
 
 	@Test
@@ -111,10 +117,12 @@ class SignalRunTest {
 		refused("is 0.5; the filter runs on integers", filter, "1\n0.5\n");
 		refused("is 32768; the input format", filter, "1\n32768\n");
 		refused("there are 2 numbers, but 1", filter, "1\n1,2\n");
-		assertTrue(assertThrows(InputException.class, () -> run(filter, folder.resolve("in.csv"), "out.ogg")).describe().contains(".wav"));
+		assertTrue(assertThrows(InputException.class, () -> run(filter, folder.resolve("in.csv"), "out.ogg")).describe()
+				.contains(".wav"));
 		byte[] wav = WavFiles.of(16, false, 1, 8000, new byte[10]);
 		write("in.wav", Arrays.copyOf(wav, wav.length - 3));
-		assertTrue(assertThrows(InputException.class, () -> run(filter, folder.resolve("in.wav"), "out.wav")).describe().contains("ends 3 bytes before"));
+		assertTrue(assertThrows(InputException.class, () -> run(filter, folder.resolve("in.wav"), "out.wav")).describe()
+				.contains("ends 3 bytes before"));
 		try (var files = Files.list(folder)) {
 			assertEquals(2, files.count());
 		}
@@ -135,8 +143,10 @@ class SignalRunTest {
 	}
 
 	private static Subject filter(int input, int output, Structure structure, int factor) {
-		var arithmetic = new Arithmetic(structure, Optional.of(new NumberFormat(16, 14)), Optional.of(new NumberFormat(input, input - 1)),
-				Optional.empty(), Optional.empty(), Optional.of(new NumberFormat(output, output - 1)), Rounding.HALF_EVEN, Overflow.SATURATE, factor);
+		var arithmetic = new Arithmetic(structure, Optional.of(new NumberFormat(16, 14)),
+				Optional.of(new NumberFormat(input, input - 1)),
+				Optional.empty(), Optional.empty(), Optional.of(new NumberFormat(output, output - 1)),
+						Rounding.HALF_EVEN, Overflow.SATURATE, factor);
 		return new Subject(TAPS, 8000, Optional.of(arithmetic));
 	}
 }
