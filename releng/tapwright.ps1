@@ -39,7 +39,7 @@ if ($folder) {
 	$bytes = [Security.Cryptography.SHA256]::Create().ComputeHash([Text.Encoding]::UTF8.GetBytes($folder))
 	$hash = [BitConverter]::ToString($bytes, 0, 4).Replace('-', '').ToLowerInvariant()
 	$data = Join-Path $env:LOCALAPPDATA ('tapwright\' + (Split-Path -Leaf $folder) + "-$hash")
-	& $java '-Xmx2g' '--enable-native-access=ALL-UNNAMED' '-jar' (Get-Jar 'org.eclipse.equinox.launcher') '-data' $data '-portfolio' $folder
+	& $java '-Xmx2g' '--enable-native-access=ALL-UNNAMED' '-Djava.awt.headless=true' '-jar' (Get-Jar 'org.eclipse.equinox.launcher') '-data' $data '-portfolio' $folder
 } else {
 	$jars = @('tapwright.cli', 'tapwright.core', 'tapwright.model', 'tapwright.dsp', 'org.eclipse.emf.common', 'org.eclipse.emf.ecore',
 		'org.eclipse.emf.ecore.change', 'org.eclipse.emf.ecore.xmi', 'com.google.gson', 'org.apache.commons.math3', 'org.apache.commons.commons-codec',
