@@ -16,6 +16,7 @@ import java.util.TreeMap;
 
 import tapwright.core.InputException;
 import tapwright.core.format.Tool;
+import tapwright.core.load.Loads;
 import tapwright.core.portfolio.FilePartners;
 import tapwright.core.portfolio.PortfolioFolder;
 import tapwright.core.portfolio.Sources;
@@ -36,6 +37,7 @@ public final class Report {
 	private final String description;
 	private final VerificationRun run;
 	private final List<ReportedFilter> filters = new ArrayList<>();
+	private Loads loads = Loads.NONE;
 
 	private Report(String name, String description, VerificationRun run) {
 		this.name = name;
@@ -72,8 +74,10 @@ public final class Report {
 			return new Report(name, "", run);
 		}
 		Portfolio portfolio = PortfolioFolder.read(folder);
-		return new Report(portfolio.getName() == null ? name : portfolio.getName(), portfolio.getDescription() == null
-				? "" : portfolio.getDescription(), run);
+		var report = new Report(portfolio.getName() == null ? name : portfolio.getName(),
+				portfolio.getDescription() == null ? "" : portfolio.getDescription(), run);
+		report.loads = LoadSection.loads(portfolio, report.filters);
+		return report;
 	}
 
 	/** What the report rests on. */
@@ -137,6 +141,7 @@ public final class Report {
 			row(html, filters.get(k), histories.get(k));
 		}
 		html.raw("</tbody></table></div>");
+		LoadSection.write(html, loads);
 		html.raw("<aside aria-label=\"Caution\"><p>" + Html.escape(FilterPage.CAUTION) + "</p></aside>");
 		html.raw("</main>\n<footer><p class=\"dim\">" + Tool.NAME
 				+ ". Met and missed are proven for exactly the numbers stored; unproven means that neither was.</p></footer>");

@@ -100,6 +100,25 @@ class ReportTest {
 	}
 
 	@Test
+	void processorsAreListedWithWhatTheirFiltersUse() throws Exception {
+		Files.writeString(folder.resolve("portfolio.tapwright"), """
+				<?xml version="1.0" encoding="UTF-8"?>
+				<tapwright:Portfolio xmi:version="2.0" xmlns:xmi="http://www.omg.org/XMI" xmlns:tapwright="urn:tapwright:1" name="Buoy">
+				  <processors name="Sanderling" macRate="1000" coefficientMemory="100"/>
+				</tapwright:Portfolio>
+				""");
+		Files.writeString(folder.resolve("a.json"), FILTER.formatted("a", "", "-20").replace("\"arithmetic\"",
+				"\"deployments\": [{\"processor\": \"Sanderling\"}], \"arithmetic\""));
+		Report.of(folder, Effort.STANDARD).write(folder.resolve("out"));
+		String index = Files.readString(folder.resolve("out/index.html"));
+		// Two multiplications for each of 1000 samples a second; two coefficients of 100 words.
+		assertTrue(index.contains("<td class=\"number\">2000</td><td class=\"number\">1000</td>")
+				&& index.contains("✗</span> 200 %"), index);
+		assertTrue(index.contains("<td class=\"number\">2</td><td class=\"number\">100</td><td class=\"number\">2 %</td>"), index);
+		assertTrue(index.contains("<title>Buoy: digital filters</title>"), index);
+	}
+
+	@Test
 	void aFolderThatIsNotThereIsNamed() {
 		assertThrows(InputException.class, () -> Report.of(folder.resolve("nowhere"), Effort.STANDARD));
 	}
