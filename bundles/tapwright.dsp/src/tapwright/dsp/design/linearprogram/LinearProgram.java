@@ -77,7 +77,7 @@ public record LinearProgram(int taps, Symmetry symmetry, List<Band> bands, List<
 	public DesignResult compute(Progress progress) throws DesignException {
 		LinearProgramSolution solution = solve(progress);
 		return new DesignResult(solution.taps(), List.of(String.format(Locale.ROOT,
-				"The largest weighted error is %.6g; no filter that keeps the limits has less than %.6g.", solution.error(),
+				"The largest weighted error is %.6g; by an estimate from the multipliers none that keeps the limits has less than %.6g.", solution.error(),
 				solution.lower())));
 	}
 
