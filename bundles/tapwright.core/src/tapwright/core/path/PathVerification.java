@@ -36,10 +36,10 @@ import tapwright.model.Severity;
 import tapwright.model.SignalPath;
 
 /**
- * Verifies signal paths from end to end: what is asked of a path is asked of the one filter that it is equal to. Frequencies are
- * those at the path's input; after an expansion they reach as far as the rate that it raises to. An alias rejection speaks of the
- * factors of the decimations so far, multiplied, so that it covers all that these decimations fold, and with the factors of all of them,
- * everything that folds at all.
+ * Verifies signal paths from end to end: what is asked of a path is asked of the one filter that it is equal to.
+ * Frequencies are those at the path's input; after an expansion they reach as far as the rate that it raises to. The
+ * factor of an alias rejection is that of some decimation and all before it, multiplied, so that it covers all that
+ * these fold; with the factors of all decimations, it covers everything that folds at all.
  */
 public final class PathVerification {
 
